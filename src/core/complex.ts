@@ -1,0 +1,4 @@
+export interface Complex {
+  readonly re: number
+  readonly im: number
+}

@@ -1,0 +1,2 @@
+export type { Complex } from './complex'
+export { failure, type Result, success } from './result'

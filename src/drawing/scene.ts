@@ -1,0 +1,101 @@
+import type { Id, Place, Quantity, UnitsPerCentimetre } from '../sheet'
+
+/** A stretch of text in one face. `rise` shifts the baseline up (negative: down), in millimetres. */
+export interface TextRun {
+  readonly text: string
+  /** `sans` is upright, `symbol` the italic of quantity symbols. */
+  readonly face: 'sans' | 'bold' | 'symbol'
+  /** Height of the em in millimetres. */
+  readonly size: number
+  readonly rise?: number
+}
+
+interface ItemCommon {
+  /** What the item shows, so that a renderer can leave a part out. */
+  readonly part:
+    | 'paper'
+    | 'grid'
+    | 'frame'
+    | 'axis'
+    | 'arrow'
+    | 'angle'
+    | 'gap'
+    | 'label'
+    | 'scale-bar'
+    | 'title-block'
+  /** The key of the placed arrow that it belongs to. */
+  readonly arrow?: string
+}
+
+interface Stroke {
+  readonly stroke?: string
+  /** Millimetres. */
+  readonly width?: number
+  /** Millimetres on, off, … */
+  readonly dash?: readonly number[]
+}
+
+/** Straight strokes, four figures each: x1, y1, x2, y2, in one style. */
+export type LinesItem = ItemCommon &
+  Stroke & { readonly kind: 'lines'; readonly segments: readonly number[] }
+/** A chain of points x, y, …; closed and filled where it has a fill. */
+export type PathItem = ItemCommon &
+  Stroke & {
+    readonly kind: 'path'
+    readonly points: readonly number[]
+    readonly closed?: boolean
+    readonly fill?: string
+  }
+/** An arc about a centre, from `start` anticlockwise through `sweep` degrees (negative: clockwise). */
+export type ArcItem = ItemCommon &
+  Stroke & {
+    readonly kind: 'arc'
+    readonly centre: Place
+    readonly radius: number
+    readonly start: number
+    readonly sweep: number
+    readonly fill?: string
+  }
+/** One line of text; `at` is on the baseline. */
+export type TextItem = ItemCommon & {
+  readonly kind: 'text'
+  readonly at: Place
+  readonly anchor: 'start' | 'middle' | 'end'
+  readonly runs: readonly TextRun[]
+  readonly fill: string
+  /** The colour of a halo that keeps the text clear of what lies under it. */
+  readonly halo?: string
+}
+
+/** A primitive in millimetres, y up, with its style resolved: renderers decide nothing. */
+export type Item = LinesItem | PathItem | ArcItem | TextItem
+
+/** An arrow as it lies on the paper. */
+export interface PlacedArrow {
+  /** Unique in the scene and stable while values change: `term:s1:0`, `measured:s1`, `resultant:s1`, `loose:V1`. */
+  readonly key: string
+  readonly role: 'term' | 'resultant' | 'measured' | 'loose'
+  /** The phasor it shows; a resultant shows none. */
+  readonly phasor?: Id
+  readonly sum?: Id
+  readonly sign: 1 | -1
+  readonly quantity: Quantity
+  readonly from: Place
+  readonly to: Place
+}
+
+/** A sheet laid out on its paper: what every renderer paints, in painting order. */
+export interface Scene {
+  /** Paper size in millimetres. */
+  readonly width: number
+  readonly height: number
+  readonly items: readonly Item[]
+  readonly arrows: readonly PlacedArrow[]
+  readonly origin: Place
+  /** Only of the quantities that are drawn. */
+  readonly unitsPerCentimetre: UnitsPerCentimetre
+  readonly title: string
+  readonly description: string
+  /** How many labels found no free place. */
+  readonly labelsLeftOut: number
+}

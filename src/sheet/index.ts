@@ -1,0 +1,2 @@
+export type * from './evaluation'
+export type * from './types'
