@@ -1,2 +1,26 @@
-export type { Complex } from './complex'
+export {
+  angleOf,
+  cosDegrees,
+  degreesFromRadians,
+  differenceDegrees,
+  radiansFromDegrees,
+  sinDegrees,
+  wrapDegrees,
+} from './angle'
+export {
+  add,
+  type Complex,
+  conjugate,
+  divide,
+  isFiniteComplex,
+  magnitudeOf,
+  multiply,
+  negate,
+  scaleBy,
+  subtract,
+  ZERO,
+} from './complex'
+export { fromPolar, type Polar, toPolar } from './polar'
 export { failure, type Result, success } from './result'
+export type { Typed } from './typed'
+export { type Quantity, unitOf } from './units'
