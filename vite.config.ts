@@ -1,0 +1,26 @@
+import react from '@vitejs/plugin-react'
+import { defineConfig } from 'vitest/config'
+import { policyPlugin } from './.config/policy-plugin.ts'
+
+/** What every page needs and a new release seldom changes: a chunk that browsers keep. */
+const frame = /\/node_modules\/(react|react-dom|react-reconciler|scheduler|konva|react-konva)\//
+
+export default defineConfig({
+  plugins: [react(), policyPlugin()],
+  // Relative addresses, so that the page works from any sub-path.
+  base: './',
+  build: {
+    // The policy lets no data address run or style anything.
+    assetsInlineLimit: 0,
+    modulePreload: { polyfill: false },
+    // The notices that the packages' licences ask for travel with the page.
+    license: { fileName: 'licences.md' },
+    rolldownOptions: {
+      output: { codeSplitting: { groups: [{ name: 'frame', test: frame }] } },
+    },
+  },
+  test: {
+    include: ['test/**/*.test.{ts,tsx}'],
+    environment: 'node',
+  },
+})
