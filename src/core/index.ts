@@ -22,5 +22,7 @@ export {
 } from './complex'
 export { fromPolar, type Polar, toPolar } from './polar'
 export { failure, type Result, success } from './result'
+export { resultant, resultantOfPolar, type SignedTerm } from './resultant'
+export { isNiceScale, nextScale, niceScale, previousScale } from './scale'
 export type { Typed } from './typed'
 export { type Quantity, unitOf } from './units'
