@@ -20,7 +20,16 @@ export {
   subtract,
   ZERO,
 } from './complex'
+export { formatLimit } from './format-limit'
+export { decimalPlacesOf, formatNumber } from './format-number'
+export { formatAngle, formatPolar, formatRectangular } from './format-phasor'
+export { type FormatOptions, formatQuantity } from './format-quantity'
+export { absoluteLimit, type Limit } from './limit'
+export { parseAngle } from './parse-angle'
+export { type CellOptions, type CellPart, type CellValue, parseCell } from './parse-cell'
+export { parseNumber } from './parse-number'
 export { fromPolar, type Polar, toPolar } from './polar'
+export { resolutionOf, resolutionOf as decimalsOf } from './resolution'
 export { failure, type Result, success } from './result'
 export { resultant, resultantOfPolar, type SignedTerm } from './resultant'
 export { isNiceScale, nextScale, niceScale, previousScale } from './scale'

@@ -8,9 +8,9 @@ function scaleOf(step: number, exponent: number): number {
 /** The scales about a positive value, in rising order, from below it to above it. */
 function scalesAbout(value: number): readonly number[] {
   const exponent = Math.floor(Math.log10(value))
-  return [exponent - 1, exponent, exponent + 1].flatMap((each) =>
-    STEPS.map((step) => scaleOf(step, each)),
-  )
+  return [exponent - 1, exponent, exponent + 1]
+    .flatMap((each) => STEPS.map((step) => scaleOf(step, each)))
+    .filter(isPositive)
 }
 
 function isPositive(value: number): boolean {
