@@ -1,0 +1,2 @@
+export { DrawingMenu } from './DrawingMenu'
+export { fileNameOf } from './file-name'

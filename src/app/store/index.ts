@@ -1,0 +1,5 @@
+export { StoreContext, usePage, usePageStore } from './context'
+export { describeAnswer, labelOf, nameOfSum, quantityOfSum } from './describe'
+export { answerOf, checkedSum, shownEvaluation, shownSheet } from './selectors'
+export type { Answer, Draft, Notice, Origin, Selection, State } from './state'
+export { type Actions, createStore, type Store } from './store'
