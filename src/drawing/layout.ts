@@ -8,6 +8,8 @@ import { gapItem } from './items/gaps'
 import { frameItem, gridItems, paperItem } from './items/paper'
 import { createScaleBars } from './items/scale-bars'
 import { createTitleBlock } from './items/title-block'
+import { createLabels } from './labels'
+import { createRegister } from './labels/register'
 import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
@@ -19,7 +21,7 @@ import { type Palette, paletteOf, type Theme } from './theme'
 export interface LayoutOptions {
   /** Light where nothing is said. */
   readonly theme?: Theme
-  /** False leaves the labels out: they take most of the time. */
+  /** False leaves the labels out: they take most of the time. They are left out with `only`, too. */
   readonly labels?: boolean
   /** Keeps origin, scales and places as they are, as during a drag: pass the scene before it. */
   readonly frozen?: Frozen
@@ -32,29 +34,51 @@ export interface LayoutOptions {
  * What has no value yet is not drawn.
  */
 export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
-  const { theme = 'light', frozen, only } = options
+  const { theme = 'light', labels = true, frozen, only } = options
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
   const placement = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen)
   const picture = createPicture(sheet, placement.arrows)
   const items: Item[] = []
-  if (!only) {
-    const block = createTitleBlock(sheet, frame, palette)
-    const bars = createScaleBars(placement.unitsPerCentimetre, frame, palette)
-    items.push(paperItem(size, palette), ...gridItems(frame, palette), frameItem(frame, palette))
-    items.push(...block.items, ...bars.items)
-    items.push(...axisItems(placement, picture, frame, palette))
-  }
+  const fences = only ? [] : addSheet(items, sheet, placement, picture, palette)
   addDrawing(items, picture, palette, only)
+  const labelling =
+    labels && !only
+      ? createLabels(items, picture, createRegister(sheet, evaluation), frame, fences, palette)
+      : { items: [], leftOut: 0 }
+  items.push(...labelling.items)
   return {
     ...size,
     ...placement,
     items,
     title: sheet.title,
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
-    labelsLeftOut: 0,
+    labelsLeftOut: labelling.leftOut,
   }
+}
+
+/** Adds the paper and all that frames the drawing; gives the boxes that labels keep out of. */
+function addSheet(
+  items: Item[],
+  sheet: Sheet,
+  placement: Placement,
+  picture: Picture,
+  palette: Palette,
+): Box[] {
+  const size = paperSizeOf(sheet.drawing)
+  const frame = frameOf(size)
+  const block = createTitleBlock(sheet, frame, palette)
+  const bars = createScaleBars(placement.unitsPerCentimetre, frame, palette)
+  items.push(
+    paperItem(size, palette),
+    ...gridItems(frame, palette),
+    frameItem(frame, palette),
+    ...block.items,
+    ...bars.items,
+    ...axisItems(placement, picture, frame, palette),
+  )
+  return [block.box, ...bars.boxes]
 }
 
 /** Arcs, arrows and gaps, in painting order. */

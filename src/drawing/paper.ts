@@ -1,5 +1,6 @@
 import type { Drawing } from '../sheet'
 import type { Box } from './geometry'
+import type { Scene } from './scene'
 
 /** How far the frame lies inside the paper's edge, in millimetres. */
 export const FRAME_INSET = 10
@@ -27,4 +28,12 @@ export function frameOf({ width, height }: { width: number; height: number }): B
     right: width - FRAME_INSET,
     top: height - FRAME_INSET,
   }
+}
+
+/** Whether an arrow of the scene reaches beyond the frame. */
+export function isOffPaper(scene: Scene): boolean {
+  const { left, right, top, bottom } = frameOf(scene)
+  return scene.arrows.some(({ from, to }) =>
+    [from, to].some(({ x, y }) => x < left || x > right || y < bottom || y > top),
+  )
 }

@@ -36,8 +36,8 @@ FONTS = {
     ),
 }
 
-OPTIONS = ["--flavor=woff2", "--no-hinting", "--layout-features=", "--name-IDs=",
-           "--drop-tables+=FFTM,GDEF,GPOS,GSUB,kern,gasp,name"]
+OPTIONS = ["--flavor=woff2", "--no-hinting", "--layout-features=", "--name-IDs=1,2,4,6",
+           "--drop-tables+=FFTM,GDEF,GPOS,GSUB,kern,gasp"]
 
 
 def advances(path: Path) -> str:

@@ -1,4 +1,5 @@
 import type { Sheet } from '../../sheet'
+import { measureText } from '../font/measure'
 import { shorten } from '../font/shorten'
 import type { Box } from '../geometry'
 import type { Item, TextRun } from '../scene'
@@ -12,8 +13,8 @@ const TITLE_HEIGHT = 9.5
 const ROW_HEIGHT = 8.6
 const PADDING = 1.8
 const COLUMNS = 3
-const CAPTION_SIZE = 2.2
-const VALUE_SIZE = 3.5
+const CAPTION = { face: 'sans', size: 2.2 } as const
+const VALUE = { face: 'sans', size: 3.5 } as const
 const TITLE_SIZE = 4.4
 
 interface Cell {
@@ -48,12 +49,12 @@ export function createTitleBlock(sheet: Sheet, frame: Box, palette: Palette): Ti
   const texts: Item[] = [...titleItems(sheet, box, palette)]
   rows.forEach((cells, row) => {
     const top = box.top - TITLE_HEIGHT - row * ROW_HEIGHT
-    const width = WIDTH / cells.length
-    rules.push(box.left, top, box.right, top)
-    cells.forEach((cell, column) => {
-      const left = box.left + column * width
+    let left = box.left
+    rules.push(left, top, box.right, top)
+    widthsOf(cells).forEach((width, column) => {
       if (column > 0) rules.push(left, top, left, top - ROW_HEIGHT)
-      texts.push(...cellItems(cell, { left, top, width }, palette))
+      texts.push(...cellItems(cells[column] as Cell, { left, top, width }, palette))
+      left += width
     })
   })
   return { box, items: [outline(box, palette), ruleItem(rules, palette), ...texts] }
@@ -74,9 +75,9 @@ function rowsOf(sheet: Sheet): Cell[][] {
     value.trim() === '' ? [] : [{ caption, value: value.trim() }],
   )
   const rows: Cell[][] = []
-  const count = Math.ceil(filled.length / COLUMNS)
-  for (let row = 0; row < count; row += 1) {
-    rows.push(filled.slice(row * COLUMNS, (row + 1) * COLUMNS))
+  const columns = Math.ceil(filled.length / Math.ceil(filled.length / COLUMNS))
+  for (let first = 0; first < filled.length; first += columns) {
+    rows.push(filled.slice(first, first + columns))
   }
   const frequency = sheet.frequency && formatFrequency(sheet.frequency)
   rows.push([
@@ -85,6 +86,33 @@ function rowsOf(sheet: Sheet): Cell[][] {
     { caption: 'Sheet number', value: 'Sheet 1 of 1' },
   ])
   return rows
+}
+
+/** Each cell as wide as its text, what is left shared out; where it is short, the widest give way. */
+function widthsOf(cells: readonly Cell[]): number[] {
+  const needs = cells.map(({ caption, value }) => {
+    const texts = [
+      { ...CAPTION, text: caption },
+      { ...VALUE, text: oneLine(value) },
+    ]
+    return Math.max(...texts.map((text) => measureText([text]))) + 2 * PADDING
+  })
+  const largest = widestThatFits(needs)
+  const widths = needs.map((need) => Math.min(need, largest))
+  const left = WIDTH - widths.reduce((sum, width) => sum + width, 0)
+  return widths.map((width) => width + left / cells.length)
+}
+
+/** The width to which the widest are cut so that all fit: the narrow ones keep theirs. */
+function widestThatFits(needs: readonly number[]): number {
+  const rising = needs.toSorted((one, other) => one - other)
+  let room = WIDTH
+  for (const [index, need] of rising.entries()) {
+    const share = room / (rising.length - index)
+    if (need > share) return share
+    room -= need
+  }
+  return WIDTH
 }
 
 function titleItems({ title }: Sheet, { left, top }: Box, palette: Palette): Item[] {
@@ -100,18 +128,16 @@ function cellItems(
   palette: Palette,
 ): Item[] {
   const room = width - 2 * PADDING
-  const small = { face: 'sans', size: CAPTION_SIZE } as const
-  const large = { face: 'sans', size: VALUE_SIZE } as const
   const x = left + PADDING
   return [
     textItem(
       { x, y: top - 2.7 },
-      [{ ...small, text: shorten(caption, small, room) }],
+      [{ ...CAPTION, text: shorten(caption, CAPTION, room) }],
       palette.quiet,
     ),
     textItem(
       { x, y: top - ROW_HEIGHT + 1.7 },
-      [{ ...large, text: isolate(shorten(oneLine(value), large, room)) }],
+      [{ ...VALUE, text: isolate(shorten(oneLine(value), VALUE, room)) }],
       palette.ink,
     ),
   ]

@@ -7,6 +7,8 @@ import type { Figure } from './figure'
 
 /** Nothing is made smaller than this to fit, in millimetres. */
 const SMALLEST_EXTENT = 2
+/** How much of the area the arrows of further quantities take, beside those of the first. */
+const FURTHER_SHARE = 0.55
 /** What a start at the edge of the area has about it, in millimetres. */
 const LEAST_ROOM = 20
 
@@ -58,9 +60,15 @@ export function firstScale(figures: readonly Figure[], quantity: Quantity, area:
   }
   width = Math.max(width, loose.right - loose.left)
   height = Math.max(height, loose.top - loose.bottom)
-  const wide = scaleFor(width, (area.right - area.left) / 10)
-  const high = scaleFor(height, (area.top - area.bottom) / 10)
+  const share = quantity === firstQuantity(figures) ? 1 : FURTHER_SHARE
+  const wide = scaleFor(width, (share * (area.right - area.left)) / 10)
+  const high = scaleFor(height, (share * (area.top - area.bottom)) / 10)
   return Math.max(wide, high) || 1
+}
+
+/** The quantity that a drawing is about: its first sum's, else its first arrow's. */
+function firstQuantity(figures: readonly Figure[]): Quantity | undefined {
+  return (figures.find(({ isSum }) => isSum) ?? figures[0])?.quantity
 }
 
 /** 0 where nothing has an extent. */
@@ -100,8 +108,9 @@ function largestOf(
     for (const figure of figures) {
       const box = boxInUnits(figure, quantity)
       const extent = Math.max(box.right - box.left, box.top - box.bottom)
-      const millimetres = (extent * 10) / (scales.get(quantity) ?? 1)
-      if (millimetres > most) [largest, most] = [quantity, millimetres]
+      const scale = scales.get(quantity) ?? 1
+      const millimetres = (extent * 10) / scale
+      if (millimetres > most && nextScale(scale) > scale) [largest, most] = [quantity, millimetres]
     }
   }
   return largest

@@ -16,6 +16,18 @@ export function createVectors(evaluation: Evaluation): Vectors {
   return { phasors, sums }
 }
 
+/** Magnitude and angle of a phasor: as read, else as solved, part by part. */
+export function partsOf(
+  vectors: Vectors,
+  id: Id,
+): { readonly magnitude?: number | undefined; readonly angle?: number | undefined } {
+  const known = vectors.phasors.get(id)
+  return {
+    magnitude: known?.asRead.magnitude ?? known?.magnitude,
+    angle: known?.asRead.angle ?? known?.angle,
+  }
+}
+
 /**
  * A phasor's vector in its unit: as read, else as solved, part by part. Undefined where a part is
  * open; a phasor of no magnitude is a point, whatever its angle.
@@ -23,8 +35,7 @@ export function createVectors(evaluation: Evaluation): Vectors {
 export function vectorOf(vectors: Vectors, id: Id): Complex | undefined {
   const known = vectors.phasors.get(id)
   if (known === undefined) return undefined
-  const magnitude = known.asRead.magnitude ?? known.magnitude
-  const angle = known.asRead.angle ?? known.angle
+  const { magnitude, angle } = partsOf(vectors, id)
   const { real, imaginary } = known
   // The parts of a phasor typed rectangular are exact: going by the angle would round them.
   if (real !== undefined && imaginary !== undefined) {

@@ -1,5 +1,5 @@
 import type { Place } from '../../sheet'
-import type { Box } from '../geometry'
+import { type Box, joinBoxes, NO_BOX } from '../geometry'
 import type { Item } from '../scene'
 import { arc } from './arc'
 import { lines } from './lines'
@@ -14,6 +14,11 @@ const PRIMITIVES: {
 /** The smallest box about an item in millimetres, without the width of its stroke. */
 export function boundsOf(item: Item): Box {
   return primitiveOf(item).bounds(item)
+}
+
+/** The smallest box that holds all the items; `NO_BOX` for none. */
+export function boundsOfAll(items: readonly Item[]): Box {
+  return items.reduce((box, item) => joinBoxes(box, boundsOf(item)), NO_BOX)
 }
 
 /** How far a point is from an item in millimetres: 0 inside what is filled. */
