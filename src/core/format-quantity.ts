@@ -9,6 +9,8 @@ export interface FormatOptions {
   readonly limit?: number | undefined
   /** Significant digits where neither is known; 4 unless stated. */
   readonly digits?: number | undefined
+  /** A size whose prefix is used, so that a small difference reads in the unit of what it is between. */
+  readonly like?: number | undefined
 }
 
 const DEFAULT_DIGITS = 4
@@ -77,7 +79,7 @@ export function unitSuffix(unit: string, exponent: number): string {
 export function formatQuantity(value: number, unit: string, options: FormatOptions = {}): string {
   if (!Number.isFinite(value)) return '–'
   const place = placeValueOf(value, options)
-  const size = Math.abs(roundTo(value, place))
+  const size = Math.abs(roundTo(options.like ?? value, place))
   const exponent = prefixExponentOf(size, place, unit)
   return `${formatShifted(value, place, exponent)}${unitSuffix(unit, exponent)}`
 }

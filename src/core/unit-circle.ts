@@ -3,9 +3,9 @@
  * 2⁻⁵⁷ of the result. They are written out, figures and all, rather than left to Math.sin and
  * Math.cos, because a sum of a million phasors spends nearly all its time here.
  *
- * π/180 comes in two pieces: the first is so short that it times a typed angle is exact, the second
- * is the rest. `tail` is what rounding took off the angle in radians: with it the sine of 30° is one
- * half exactly, so that a balanced three-phase set closes.
+ * π/180 and the angle come in two pieces each, so short that the product of the first ones is exact.
+ * `tail` is what is left when the angle in radians is rounded to a double: with it the sine of 30° is
+ * one half exactly, so that a balanced three-phase set closes.
  */
 
 const SHORTENED = Math.fround(Math.PI / 180)
@@ -13,8 +13,9 @@ const REST = 1.3519960527851425e-10
 
 /** The sine of an angle of at most 45° either way, in degrees. */
 export function sineNearAxis(degrees: number): number {
-  const long = degrees * SHORTENED
-  const short = degrees * REST
+  const front = Math.fround(degrees)
+  const long = front * SHORTENED
+  const short = (degrees - front) * SHORTENED + degrees * REST
   const x = long + short
   const tail = short - (x - long)
   const z = x * x
@@ -27,14 +28,17 @@ export function sineNearAxis(degrees: number): number {
 
 /** The cosine of an angle of at most 45° either way, in degrees. */
 export function cosineNearAxis(degrees: number): number {
-  const long = degrees * SHORTENED
-  const short = degrees * REST
+  const front = Math.fround(degrees)
+  const long = front * SHORTENED
+  const short = (degrees - front) * SHORTENED + degrees * REST
   const x = long + short
   const tail = short - (x - long)
   const z = x * x
   const upper = -1 / 3628800 + z * (1 / 479001600 + z * (-1 / 87178291200 + z / 20922789888000))
   const series = 1 / 24 + z * (-1 / 720 + z * (1 / 40320 + z * upper))
-  return 1 - (z / 2 + (x * tail - z * z * series))
+  const half = z / 2
+  const most = 1 - half
+  return most + (1 - most - half + (z * z * series - x * tail))
 }
 
 /**
