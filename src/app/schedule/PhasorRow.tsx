@@ -28,7 +28,7 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
     caption: string,
     cell: CellText,
   ) => (
-    <td data-caption={caption}>
+    <td data-caption={caption} data-area={part}>
       <Cell
         name={`${caption} of ${name}`}
         column={part}
@@ -44,13 +44,18 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
       aria-selected={selected}
       onFocus={() => store.getState().select({ kind: 'phasor', id: phasor.id })}
     >
-      <td>
+      <td data-area="label">
         <div className="mark-and-label">
           <ArrowMark quantity={phasor.quantity} />
           <LabelCell phasor={phasor} name={name} />
+          {reference && (
+            <abbr className="tag" title="The reference: angles count from it">
+              ref.
+            </abbr>
+          )}
         </div>
       </td>
-      <td>
+      <td data-area="quantity">
         <div className="cell">
           <select
             aria-label={`Quantity of ${name}`}
@@ -71,9 +76,9 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
       </td>
       {value('magnitude', 'Magnitude', text.magnitude)}
       {value('angle', 'Angle', text.angle)}
-      {value('real', 'Real part', text.real)}
-      {value('imaginary', 'Imaginary part', text.imaginary)}
-      <td data-caption="Limit">
+      {value('real', 'Real', text.real)}
+      {value('imaginary', 'Imaginary', text.imaginary)}
+      <td data-caption="Limit" data-area="limit">
         <Cell
           name={`Limit of ${name}`}
           column="limit"
@@ -81,8 +86,8 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
           onCommit={(entered) => commitLimit(store, phasor, entered)}
         />
       </td>
-      <td data-caption="Known">
-        <KnownChoice id={phasor.id} name={name} known={text.known} reference={reference} />
+      <td data-area="known">
+        <KnownChoice id={phasor.id} name={name} known={text.known} />
       </td>
     </tr>
   )
@@ -109,11 +114,9 @@ function KnownChoice(properties: {
   readonly id: Id
   readonly name: string
   readonly known: RowText['known']
-  readonly reference: boolean
 }) {
-  const { id, name, known, reference } = properties
+  const { id, name, known } = properties
   const store = usePageStore()
-  const suffix = reference ? ' · reference' : ''
   return (
     <div className="cell">
       <select
@@ -127,13 +130,13 @@ function KnownChoice(properties: {
           })
         }
       >
-        {(known === 'open' || known === 'partly read') && (
+        {(known === 'open' || known === 'partly') && (
           <option value={known} disabled>
-            {known + suffix}
+            {known}
           </option>
         )}
-        <option value="typed">{`typed${suffix}`}</option>
-        <option value="read">{`read${suffix}`}</option>
+        <option value="typed">typed</option>
+        <option value="read">read</option>
       </select>
     </div>
   )

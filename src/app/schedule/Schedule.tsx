@@ -36,9 +36,9 @@ export function Schedule() {
         <table className="schedule">
           <thead>
             <tr>
-              {columns.map((column) => (
-                <th key={column} scope="col">
-                  {column}
+              {columns.map((name) => (
+                <th key={name} scope="col">
+                  {name}
                 </th>
               ))}
             </tr>

@@ -11,7 +11,7 @@ export interface CellText {
 }
 
 /** How a phasor's values came to be known, in the schedule's words. */
-export type Known = 'typed' | 'read' | 'partly read' | 'open'
+export type Known = 'typed' | 'read' | 'partly' | 'open'
 
 /** The cells of one row of the schedule. */
 export interface RowText {
@@ -141,5 +141,5 @@ function knownOf(
   const read = magnitudes.length + angles.length > 0
   const typed = phasor.magnitude ?? phasor.angle ?? phasor.real
   if (!read) return typed ? 'typed' : 'open'
-  return typed ? 'partly read' : 'read'
+  return typed ? 'partly' : 'read'
 }

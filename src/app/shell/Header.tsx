@@ -5,18 +5,30 @@ import { usePage, usePageStore } from '../store'
 /** The page's head: the sheet's title and the verbs for the sheet as a whole. */
 export function Header() {
   const store = usePageStore()
-  const canUndo = usePage((state) => state.history.past.length > 0)
-  const canRedo = usePage((state) => state.history.future.length > 0)
+  const undone = usePage((state) => state.history.past.at(-1)?.description)
+  const redone = usePage((state) => state.history.future[0]?.description)
   const { undo, redo } = store.getState()
   return (
     <header className="header">
       <h1>Phasogon</h1>
       <TitleField />
       <div className="verbs">
-        <button type="button" className="verb" disabled={!canUndo} onClick={undo}>
+        <button
+          type="button"
+          className="verb"
+          disabled={undone === undefined}
+          title={undone}
+          onClick={undo}
+        >
           Undo
         </button>
-        <button type="button" className="verb" disabled={!canRedo} onClick={redo}>
+        <button
+          type="button"
+          className="verb"
+          disabled={redone === undefined}
+          title={redone}
+          onClick={redo}
+        >
           Redo
         </button>
         <LinkVerbs />
