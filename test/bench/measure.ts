@@ -28,15 +28,17 @@ export interface Sides {
 
 /**
  * The median cost of ours over that of theirs. The two take turns, each going first every other time,
- * so that whatever slows the machine slows both; one turn to warm up does not count.
+ * so that whatever slows the machine slows both. Before that come a fifth as many rounds to warm up,
+ * which do not count.
  */
 export async function ratioOfMedians({ ours, theirs }: Sides, rounds: number): Promise<number> {
   const costs = { ours: [] as number[], theirs: [] as number[] }
-  for (let round = 0; round <= rounds; round += 1) {
+  const warmUp = Math.ceil(rounds / 5)
+  for (let round = 0; round < warmUp + rounds; round += 1) {
     const order = round % 2 === 0 ? (['ours', 'theirs'] as const) : (['theirs', 'ours'] as const)
     for (const side of order) {
       const cost = await (side === 'ours' ? ours() : theirs())
-      if (round > 0) costs[side].push(cost)
+      if (round >= warmUp) costs[side].push(cost)
     }
   }
   return median(costs.ours) / median(costs.theirs)

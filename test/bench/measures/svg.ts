@@ -50,7 +50,7 @@ export const svgAgainstJoining: Measure = {
         ours: () => millisecondsOf(() => svg(scene, '{}')),
         theirs: () => millisecondsOf(() => join(parts)),
       },
-      25,
+      101,
     )
   },
 }
