@@ -1,4 +1,11 @@
 export {
+  type AccuracyLimits,
+  type AccuracyStatement,
+  accuracyLimits,
+  parseAccuracy,
+  totalLimit,
+} from './accuracy'
+export {
   angleOf,
   cosDegrees,
   degreesFromRadians,
@@ -20,10 +27,26 @@ export {
   subtract,
   ZERO,
 } from './complex'
+export {
+  degreesOfEllipse,
+  degreesOfPower,
+  degreesOfPowerFactor,
+  degreesOfShift,
+  type Form,
+  formFactor,
+  interceptOfDegrees,
+  rmsOfAverageResponding,
+  rmsOfForm,
+  shiftOfDegrees,
+  type Tilt,
+  tiltOfDegrees,
+  type Wave,
+} from './conversions'
 export { formatLimit } from './format-limit'
 export { decimalPlacesOf, formatNumber } from './format-number'
 export { formatAngle, formatPolar, formatRectangular } from './format-phasor'
 export { type FormatOptions, formatQuantity } from './format-quantity'
+export { type Conversion, FORMULAS } from './formulas'
 export { absoluteLimit, type Limit } from './limit'
 export { parseAngle } from './parse-angle'
 export { type CellOptions, type CellPart, type CellValue, parseCell } from './parse-cell'
