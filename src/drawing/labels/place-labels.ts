@@ -1,22 +1,17 @@
-import { measureText } from '../font/measure'
 import { type Box, isOverlapping } from '../geometry'
 import { boxOfText } from '../primitives/text'
 import type { TextRun } from '../scene'
-import { columnSpots } from './column-spots'
-import { ledSpots, spotsAllOver } from './led-spots'
-import { nearSpots } from './near-spots'
+import { MANNERS, type Manner, quick, type Trial } from './manners'
 import type { Occupancy } from './occupancy'
-import { mistakableCost } from './rivals'
+import { crossingCost, mistakableCost } from './rivals'
 import { Room } from './room'
-import type { Leader, Size, Spot } from './spot'
+import type { Spot, Stand } from './spot'
 import type { Wish } from './wish'
 
-/** A label with its place: the baseline's left end, and a leader where it stands far off. */
-export interface PlacedLabel {
+/** A label with its place. */
+export interface PlacedLabel extends Stand {
   readonly wish: Wish
   readonly runs: readonly TextRun[]
-  readonly box: Box
-  readonly leader?: Leader
 }
 
 /** What is drawn where labels look for room. */
@@ -30,10 +25,8 @@ export interface Ground {
   readonly soft: readonly Box[]
 }
 
-/** How many labels are tried with all means; more are placed by the near places alone. */
-const MOST_WITH_CARE = 100
-const SMALLER = 0.75
-
+/** How many labels are tried with all means: those of forty phasors, with angles and gaps. */
+const MOST_WITH_CARE = 64
 /** What speaks against crowded surroundings, and against covering an axis, in the unit of the spots' costs. */
 const CROWD_COST = 10
 const SOFT_COST = 4
@@ -42,102 +35,56 @@ const SOFT_COST = 4
  * Finds a place for each label: clear of all that is drawn and of the others, near what it names. A
  * label for which there is no room is left out.
  */
-export function placeLabels(wishes: readonly Wish[], ground: Ground): PlacedLabel[] {
-  if (wishes.length > MOST_WITH_CARE) return attempt(wishes, ground, quick)
-  let best: PlacedLabel[] = []
-  for (const manner of MANNERS) {
-    const placed = attempt(wishes, ground, manner)
-    if (placed.length > best.length) best = placed
-    if (best.length === wishes.length) break
+export function placeLabels(wishes: readonly Wish[], ground: Ground): readonly PlacedLabel[] {
+  if (wishes.length > MOST_WITH_CARE) return attempt(wishes, ground, quick, []).placed
+  let best: Attempt | undefined
+  let order = wishes
+  for (const { manner, upTo } of MANNERS) {
+    if (best && best.leftOut.length > upTo) continue
+    const tried = attempt(order, ground, manner, wishes, best?.leftOut.length)
+    if (!best || tried.leftOut.length < best.leftOut.length) best = tried
+    if (best.leftOut.length === 0) break
+    // Those that found no room choose first the next time.
+    const failed = new Set(tried.leftOut)
+    order = [...tried.leftOut, ...order.filter((wish) => !failed.has(wish))]
   }
-  return best
+  return best?.placed ?? []
 }
 
-/** A text of a label that may be tried, and the places for it. */
-interface Trial {
-  readonly runs: readonly TextRun[]
-  readonly spots: (size: Size) => Spot[]
+interface Attempt {
+  readonly placed: readonly PlacedLabel[]
+  readonly leftOut: readonly Wish[]
 }
 
-/** The order in which texts and places are tried for a label. */
-type Manner = (wish: Wish, room: Room, ground: Ground) => Trial[]
-
-const NEAR = [7, 11, 16, 22]
-const FAR = [30, 40, 52, 66, 82]
-
-/** Beside what is named as long as there is room; the value goes before the label stands far off. */
-const generous: Manner = (wish, room, ground) => [
-  { runs: wish.full, spots: (size) => nearSpots(wish, size) },
-  { runs: wish.full, spots: (size) => ledSpots(wish, size, NEAR) },
-  { runs: wish.short, spots: (size) => nearSpots(wish, size) },
-  { runs: wish.short, spots: (size) => ledSpots(wish, size, NEAR) },
-  { runs: wish.full, spots: (size) => ledSpots(wish, size, FAR) },
-  anywhere(wish, wish.full, room, ground),
-  anywhere(wish, wish.short, room, ground),
-]
-
-const brief: Manner = (wish, room, ground) => [
-  { runs: wish.short, spots: (size) => nearSpots(wish, size) },
-  { runs: wish.short, spots: (size) => ledSpots(wish, size, NEAR) },
-  anywhere(wish, wish.short, room, ground),
-]
-
-/** In columns that many labels of one place can share. */
-function columns(scale: number, ...distances: number[]): Manner {
-  return (wish, room, ground) => {
-    const runs = scaled(wish.short, scale)
-    const { region } = ground
-    return [
-      { runs, spots: (size) => columnSpots(wish, size, region, distances) },
-      anywhere(wish, runs, room, ground),
-    ]
-  }
-}
-
-const quick: Manner = (wish) => [
-  { runs: wish.full, spots: (size) => nearSpots(wish, size) },
-  { runs: wish.short, spots: (size) => nearSpots(wish, size) },
-]
-
-/** From the fairest to the one that finds most room. */
-const MANNERS: readonly Manner[] = [
-  generous,
-  brief,
-  columns(1, 12),
-  columns(1, 24),
-  columns(1, 60, 14),
-  columns(SMALLER, 20),
-  columns(SMALLER, 60, 14),
-  columns(SMALLER, 110, 60, 30, 12),
-]
-
-function anywhere(wish: Wish, runs: readonly TextRun[], room: Room, { region }: Ground): Trial {
-  return { runs, spots: (size) => spotsAllOver(wish, size, region, (box) => room.isClear(box)) }
-}
-
-function scaled(runs: readonly TextRun[], scale: number): TextRun[] {
-  return runs.map((run) => ({
-    ...run,
-    size: scale * run.size,
-    ...(run.rise !== undefined && { rise: scale * run.rise }),
-  }))
-}
-
-function attempt(wishes: readonly Wish[], ground: Ground, manner: Manner): PlacedLabel[] {
+/**
+ * Places the labels one after the other.
+ *
+ * @param rivals What leaders and labels may be mistaken for, or cross.
+ * @param enough It is given up once so many are left out.
+ */
+function attempt(
+  wishes: readonly Wish[],
+  ground: Ground,
+  manner: Manner,
+  rivals: readonly Wish[],
+  enough = Number.POSITIVE_INFINITY,
+): Attempt {
   const room = new Room(ground.occupancy, ground.fences)
   const placed: PlacedLabel[] = []
-  const rivals = manner === quick ? [] : wishes
+  const leftOut: Wish[] = []
   for (const wish of wishes) {
-    const against = ({ box, leader }: Spot) =>
-      CROWD_COST * room.crowd(box) +
-      softCost(box, ground) +
-      (leader ? 0 : mistakableCost(box, wish, rivals))
-    const label = settle(wish, manner(wish, room, ground), room, against)
-    if (!label) continue
-    room.take(label)
-    placed.push(label)
+    const label = settle(wish, manner(wish, room, ground.region), room, (spot) =>
+      costOf(spot, wish, room, ground, rivals),
+    )
+    if (label) {
+      room.take(label)
+      placed.push(label)
+    } else {
+      leftOut.push(wish)
+      if (leftOut.length >= enough) break
+    }
   }
-  return placed
+  return { placed, leftOut }
 }
 
 function settle(
@@ -146,10 +93,9 @@ function settle(
   room: Room,
   against: (spot: Spot) => number,
 ): PlacedLabel | undefined {
-  for (const { runs, spots } of trials) {
-    const { bottom, top } = boxOfText({ at: { x: 0, y: 0 }, anchor: 'start', runs })
-    const size = { width: measureText(runs), height: top - bottom }
-    const spot = cheapest(spots(size), room, against)
+  for (const { runs, spots, most } of trials) {
+    const { right, bottom, top } = boxOfText({ at: { x: 0, y: 0 }, anchor: 'start', runs })
+    const spot = cheapest(spots({ width: right, height: top - bottom }), room, against, most)
     if (!spot) continue
     const { box, leader } = spot
     return { wish, runs, box, ...(leader && { leader }) }
@@ -157,18 +103,15 @@ function settle(
   return undefined
 }
 
-function softCost(box: Box, { soft }: Ground): number {
-  return soft.some((line) => isOverlapping(line, box)) ? SOFT_COST : 0
-}
-
 /** The free place with the least against it. */
 function cheapest(
   spots: readonly Spot[],
   room: Room,
   against: (spot: Spot) => number,
+  most = Number.POSITIVE_INFINITY,
 ): Spot | undefined {
   let best: Spot | undefined
-  let least = Number.POSITIVE_INFINITY
+  let least = most
   for (const spot of spots) {
     // Looking closer only adds to the cost, and most places need no such look.
     if (spot.cost >= least || !room.isFree(spot)) continue
@@ -176,4 +119,17 @@ function cheapest(
     if (cost < least) [best, least] = [spot, cost]
   }
   return best
+}
+
+/** What speaks against a place besides what it costs by itself. */
+function costOf(
+  { box, leader }: Spot,
+  wish: Wish,
+  room: Room,
+  { soft }: Ground,
+  rivals: readonly Wish[],
+): number {
+  const covering = soft.some((line) => isOverlapping(line, box)) ? SOFT_COST : 0
+  const doubtful = leader ? crossingCost(leader, wish, rivals) : mistakableCost(box, wish, rivals)
+  return CROWD_COST * room.crowd(box) + covering + doubtful
 }

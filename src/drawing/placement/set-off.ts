@@ -35,6 +35,8 @@ export function setOffs(figures: readonly Figure[], scales: Scales): Map<string,
     const [first] = members
     if (isSum || !first) continue
     const ray = rayOf(first, scales)
+    // So short an arrow hides nothing, wherever it lies.
+    if (ray.length < ALONG_MILLIMETRES) continue
     const steps = freeStep(rays, ray)
     if (steps === undefined) continue
     keep(rays, { ...ray, steps })
@@ -51,7 +53,7 @@ function rayOf({ vector, quantity }: Member, scales: Scales): Ray {
 }
 
 function keep(rays: Ray[][], ray: Ray): void {
-  if (ray.length > 0) rays[sectorOf(ray.angle)]?.push(ray)
+  rays[sectorOf(ray.angle)]?.push(ray)
 }
 
 /** The first step that no arrow along the ray has taken; undefined where all are taken. */
