@@ -42,7 +42,9 @@ export interface Split {
 
 /** Parts the word at the end (mV, k, °) from the figure before it. */
 export function splitUnit(text: string): Split {
-  const word = /[\p{L}µΩ°º˚%]+$/u.exec(text)?.[0] ?? ''
+  const letters = /(?:(?!π)[\p{L}°º˚%])+$/u.exec(text)?.[0] ?? ''
+  // π is a figure, however it is spelled.
+  const word = letters === 'pi' ? '' : letters
   const figure = text.slice(0, text.length - word.length).trimEnd()
   return { figure, word, meaning: word === '' ? undefined : maybeUnitWord(word) }
 }

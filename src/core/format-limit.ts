@@ -4,11 +4,11 @@ import type { Limit } from './limit'
 
 /** A size to two significant digits, never below itself: a limit must not look tighter than it is. */
 function roundUp(size: number): number {
-  if (size === 0) return 0
-  const place = powerOfTen(Math.floor(Math.log10(size) + 1e-12) - 1)
-  // 0.3 is 30 hundredths, though division says 30.000000000000004.
-  const count = Math.ceil(size / place - 1e-9)
-  return Number((count * place).toPrecision(2))
+  const nearest = Number(size.toPrecision(2))
+  // What lies within a rounding error above is no reason for a wider limit: 0.1 + 0.2 is 0.3.
+  if (nearest >= size * (1 - 1e-9)) return nearest
+  const [, exponent = '0'] = size.toExponential(1).split('e')
+  return Number((nearest + powerOfTen(Number(exponent) - 1)).toPrecision(2))
 }
 
 /** The place value of the last digit that is not 0, of the first two. */

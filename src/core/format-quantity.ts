@@ -15,9 +15,10 @@ export interface FormatOptions {
 
 const DEFAULT_DIGITS = 4
 
-/** The place value of a size's n-th significant digit. */
+/** The place value of the n-th significant digit that a size has once it is rounded to n digits. */
 function placeOf(size: number, digits: number): number {
-  return powerOfTen(Math.floor(Math.log10(size) + 1e-12) - digits + 1)
+  const [, exponent = '0'] = size.toExponential(digits - 1).split('e')
+  return powerOfTen(Number(exponent) - digits + 1)
 }
 
 /**

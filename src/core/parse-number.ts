@@ -41,7 +41,11 @@ export function readLimited(text: string, readFigures: ReadFigures): Result<Limi
     )
   }
   const limit = readLimit(limitText, readFigures)
-  return limit.ok ? success({ ...read, limit: limit.value }) : limit
+  if (!limit.ok) return limit
+  if (!Number.isFinite(absoluteLimit(limit.value, read.value))) {
+    return failure(`“± ${limitText}” is too large: check the figures.`)
+  }
+  return success({ ...read, limit: limit.value })
 }
 
 /** What was typed as the sheet keeps it: the limit as half a width in the value's unit. */

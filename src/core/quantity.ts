@@ -1,6 +1,7 @@
 import { splitUnit } from './cell-text'
 import { type Figure, isExpression, readFigure } from './figure'
 import { failure, type Result } from './result'
+import { takesPrefix } from './units'
 
 /** A cell in another unit than the one typed: what to do about it. */
 function wrongUnit(
@@ -30,6 +31,7 @@ export function readQuantity(text: string, unit: string): Result<Figure> {
   if (meaning.unit !== undefined) {
     return meaning.unit === unit ? readFigure(figure, meaning.exponent) : wrongUnit(word, unit)
   }
+  if (unit !== '' && !takesPrefix(unit)) return wrongUnit(word, unit)
   if (isExpression(figure) && /\s/.test(text.slice(figure.length))) {
     return failure(
       `It is open what “${word}” belongs to: write it against its figure, or with the unit.`,

@@ -27,10 +27,13 @@ const PRINTED_PREFIXES = new Map([
   [12, 'T'],
 ])
 
+/** The Greek letter, which looks like the micro sign µ. */
+const GREEK_MU = '\u03bc'
+
 /** The letters that are read as a prefix: both signs for micro, u for it, and K for kilo besides. */
 const READ_PREFIXES = new Map([
   ...[...PRINTED_PREFIXES].map(([exponent, letter]) => [letter, exponent] as const),
-  ['μ', -6],
+  [GREEK_MU, -6],
   ['u', -6],
   ['K', 3],
 ])
@@ -55,11 +58,14 @@ export function takesPrefix(unit: string): boolean {
   return !ONLY_WHOLE.has(unit)
 }
 
+/** The sign of its own that some keyboards give for the letter Ω. */
+const OHM_SIGN = '\u2126'
+
 /** How each unit may be written; one letter in the other case is let pass where it means nothing else. */
 const WRITTEN: { readonly [unit: string]: readonly string[] } = {
   V: ['V', 'v', 'volt', 'volts'],
   A: ['A', 'a', 'amp', 'amps', 'ampere', 'amperes'],
-  Ω: ['Ω', 'Ω', 'R', 'ohm', 'Ohm', 'ohms', 'Ohms'],
+  Ω: ['Ω', OHM_SIGN, 'R', 'ohm', 'Ohm', 'ohms', 'Ohms'],
   VA: ['VA', 'va'],
   W: ['W', 'w', 'watt', 'watts'],
   var: ['var', 'VAr', 'VAR', 'vars'],
