@@ -11,6 +11,8 @@ export interface Notice {
   readonly text: string
   /** A verb that the notice offers. */
   readonly offer?: 'undo' | 'go-back'
+  /** Other verbs that go with it. */
+  readonly verbs?: readonly { readonly verb: string; readonly act: () => void }[]
 }
 
 /** An edit that is being tried, with the sheet as it would be. A drag is a draft until it is let go. */
@@ -20,14 +22,35 @@ export interface Draft {
 }
 
 /** Where the open sheet came from: it settles what the first visit says and what the address shows. */
-export type Origin = 'example' | 'new' | 'link' | 'file'
+export type Origin = 'example' | 'new' | 'link' | 'file' | 'kept'
+
+/** Of what a sheet is a copy: someone's, that came by a link, or one that two tabs changed at once. */
+export interface Copy {
+  /** The title that it bears. */
+  readonly of: string
+  readonly why: 'link' | 'tabs'
+}
+
+/** Which sheet is open. It stands beside the document, so that no link or file carries it. */
+export interface Identity {
+  readonly id: string
+  readonly copy?: Copy
+}
+
+/** A sheet that was open before, as it was left. */
+export interface Shelved {
+  readonly history: History
+  readonly origin: Origin
+  readonly identity: Identity
+}
 
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */
 export interface State {
   readonly history: History
   /** Histories of sheets that were open before this one, newest last. */
-  readonly shelf: readonly { readonly history: History; readonly origin: Origin }[]
+  readonly shelf: readonly Shelved[]
   readonly origin: Origin
+  readonly identity: Identity
   readonly draft: Draft | undefined
   readonly selection: Selection | undefined
   /** The sum in the check line; the first where none was chosen. */

@@ -7,11 +7,13 @@ import {
   type Edit,
   redo,
   type Sheet,
+  serializeSheet,
   undo,
 } from '../../sheet'
 import { describeAnswer } from './describe'
+import { createIdentity } from './identity'
 import { answerOf, hasPhasor, hasSum } from './selectors'
-import type { Notice, Origin, Selection, State } from './state'
+import type { Identity, Notice, Origin, Selection, Shelved, State } from './state'
 
 /** What can be done to the page's state. Each either does the whole thing or says why it does not. */
 export interface Actions {
@@ -25,8 +27,15 @@ export interface Actions {
   redo(): void
   select(selection: Selection | undefined): void
   chooseSum(id: string): void
-  /** Opens another sheet; the one that was open stays on the shelf. */
-  open(sheet: Sheet, origin: Origin, text?: string): void
+  /**
+   * Opens another sheet; the one that was open stays on the shelf. Where the sheet of that identity
+   * stands on the shelf just as it is, its history comes back with it.
+   */
+  open(sheet: Sheet, origin: Origin, text?: string, identity?: Identity): void
+  /** Takes over what another tab made of a sheet, open or shelved, as one step of its history. */
+  receive(id: string, sheet: Sheet): void
+  /** Gives a sheet, open or shelved, another identity: it goes on as a sheet of its own. */
+  identify(id: string, identity: Identity): void
   /** Goes back to the sheet that was open before. */
   goBack(): void
   notify(notice: Notice | undefined): void
@@ -36,11 +45,22 @@ export interface Actions {
 export type Store = StoreApi<State & Actions>
 
 /** Makes the store with a sheet open in it. It knows nothing of the browser. */
-export function createStore(sheet: Sheet, origin: Origin): Store {
+export function createStore(
+  sheet: Sheet,
+  origin: Origin,
+  identity: Identity = createIdentity(),
+): Store {
   return createZustandStore<State & Actions>()((set, get) => {
-    const settle = (history: State['history'], said: string, notice?: Notice) => {
-      const { selection, chosenSum } = get()
+    const settle = (
+      history: State['history'],
+      said: string,
+      notice?: Notice,
+      opening?: Pick<State, 'shelf' | 'origin' | 'identity'>,
+    ) => {
+      // What was picked on one sheet means nothing on another.
+      const { selection, chosenSum } = opening ? {} : get()
       set({
+        ...opening,
         history,
         draft: undefined,
         selection: keptSelection(history.sheet, selection),
@@ -72,6 +92,7 @@ export function createStore(sheet: Sheet, origin: Origin): Store {
       history: createHistory(sheet),
       shelf: [],
       origin,
+      identity,
       draft: undefined,
       selection: undefined,
       chosenSum: undefined,
@@ -96,27 +117,72 @@ export function createStore(sheet: Sheet, origin: Origin): Store {
       },
       select: (selection) => set({ selection }),
       chooseSum: (id) => set({ chosenSum: id }),
-      open: (opened, from, text) => {
-        const { history, shelf, origin: before } = get()
-        set({
-          shelf: [...shelf, { history, origin: before }],
-          origin: from,
-          selection: undefined,
-          chosenSum: undefined,
-        })
+      open: (opened, from, text, known = createIdentity()) => {
+        const { history, shelf, origin: before, identity: left } = get()
+        const shelved = shelf.find(({ identity: { id } }) => id === known.id)
         const said = text ?? `Opened “${opened.title || 'Untitled sheet'}”.`
-        settle(createHistory(opened), said, { tone: 'news', text: said, offer: 'go-back' })
+        settle(
+          historyOf(opened, shelved),
+          said,
+          { tone: 'news', text: said, offer: 'go-back' },
+          {
+            shelf: [
+              ...shelf.filter((each) => each !== shelved),
+              { history, origin: before, identity: left },
+            ],
+            origin: from,
+            identity: known,
+          },
+        )
+      },
+      receive: (id, received) => {
+        const { history, identity: open, draft, notice } = get()
+        const description = 'Change made in another tab'
+        if (open.id !== id) {
+          set(({ shelf }) => ({
+            shelf: shelf.map((each) =>
+              each.identity.id === id
+                ? { ...each, history: commit(each.history, received, description) }
+                : each,
+            ),
+          }))
+          return
+        }
+        settle(commit(history, received, description), `${description}.`, notice)
+        // A drag goes on, upon the sheet as it is now.
+        if (draft) get().preview(draft.edit)
+      },
+      identify: (id, given) => {
+        if (get().identity.id === id) set({ identity: given })
+        else {
+          set(({ shelf }) => ({
+            shelf: shelf.map((each) =>
+              each.identity.id === id ? { ...each, identity: given } : each,
+            ),
+          }))
+        }
       },
       goBack: () => {
         const { shelf } = get()
         const last = shelf.at(-1)
         if (!last) return
-        set({ shelf: shelf.slice(0, -1), origin: last.origin })
-        settle(last.history, `Back to “${last.history.sheet.title || 'Untitled sheet'}”.`)
+        const { history, origin: before, identity: known } = last
+        const said = `Back to “${history.sheet.title || 'Untitled sheet'}”.`
+        settle(history, said, undefined, {
+          shelf: shelf.slice(0, -1),
+          origin: before,
+          identity: known,
+        })
       },
       notify: (notice) => set({ notice }),
     }
   })
+}
+
+function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history'] {
+  return shelved && serializeSheet(shelved.history.sheet) === serializeSheet(sheet)
+    ? shelved.history
+    : createHistory(sheet)
 }
 
 function keptSelection(sheet: Sheet, selection: Selection | undefined): Selection | undefined {
