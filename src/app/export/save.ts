@@ -34,7 +34,8 @@ export async function copyPicture(store: Store): Promise<void> {
   })
 }
 
-function download(blob: Blob, name: string): void {
+/** Hands a file to the browser to be saved. */
+export function download(blob: Blob, name: string): void {
   const address = URL.createObjectURL(blob)
   const anchor = document.createElement('a')
   anchor.href = address
