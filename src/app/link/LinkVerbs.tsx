@@ -1,5 +1,6 @@
 import { useState } from 'react'
 import { emptySheet, serializeLink } from '../../sheet'
+import { MySheetsVerb } from '../keep'
 import { usePageStore } from '../store'
 import { CopyLinkDialog } from './CopyLinkDialog'
 import { OpenDialog } from './OpenDialog'
@@ -37,6 +38,7 @@ export function LinkVerbs() {
       >
         New sheet
       </button>
+      <MySheetsVerb />
       <button type="button" className="verb" onClick={() => setOpening(true)}>
         Open
       </button>

@@ -1,19 +1,21 @@
 import { useState } from 'react'
 import { parseLink } from '../../sheet'
+import { useKeeping } from '../keep'
 import { Dialog } from '../shell/Dialog'
 import { usePageStore } from '../store'
-import { openFile, openLink } from './open'
+import { openFiles, openLink } from './open'
 
 /** Opens a sheet from a pasted link, from whatever host it came, or from a saved file. */
 export function OpenDialog({ onClose }: { readonly onClose: () => void }) {
   const store = usePageStore()
+  const keeping = useKeeping()
   const [text, setText] = useState('')
   const [problem, setProblem] = useState<string>()
 
   const openText = () => {
     const result = parseLink(text)
     if (result.ok) {
-      openLink(store, text)
+      void openLink(store, keeping, text)
       onClose()
     } else {
       setProblem(result.errors[0]?.message ?? 'There is no sheet in this text.')
@@ -56,11 +58,11 @@ export function OpenDialog({ onClose }: { readonly onClose: () => void }) {
             Choose a file
             <input
               type="file"
+              multiple
               className="visually-hidden"
               accept=".svg,.json,image/svg+xml,application/json"
               onChange={async (event) => {
-                const file = event.target.files?.[0]
-                if (file) await openFile(store, file)
+                await openFiles(store, keeping, [...(event.target.files ?? [])])
                 onClose()
               }}
             />
@@ -70,7 +72,8 @@ export function OpenDialog({ onClose }: { readonly onClose: () => void }) {
           </button>
         </div>
         <p>
-          A drawing saved here as SVG carries its sheet: choose it, or drop it anywhere on the page.
+          A sheet saved to a file opens here again, and so does a drawing saved as SVG, which
+          carries its sheet: choose them, or drop them anywhere on the page.
         </p>
       </form>
     </Dialog>

@@ -46,11 +46,16 @@ export function keepAddress(
     }
   }
 
-  const stopStore = store.subscribe((state, before) => {
-    if (state.history.sheet === before.history.sheet) return
-    pending = state.history.sheet
+  const schedule = (sheet: Sheet) => {
+    pending = sheet
     clearTimeout(timer)
     timer = setTimeout(flush, pause)
+  }
+
+  // What was kept may be newer than what the address shows.
+  if (store.getState().origin === 'kept') schedule(store.getState().history.sheet)
+  const stopStore = store.subscribe((state, before) => {
+    if (state.history.sheet !== before.history.sheet) schedule(state.history.sheet)
   })
   const stopHash = bar.onHash(() => {
     const hash = bar.readHash()

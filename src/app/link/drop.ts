@@ -1,20 +1,21 @@
+import type { Keeping } from '../keep'
 import type { Store } from '../store'
-import { openFile, openLink } from './open'
+import { openFiles, openLink } from './open'
 
-/** Opens a file or a link that is dropped anywhere on the page. Returns what stops it. */
-export function acceptDrops(store: Store): () => void {
+/** Opens the files or the link that are dropped anywhere on the page. Returns what stops it. */
+export function acceptDrops(store: Store, keeping: Keeping): () => void {
   const onDragOver = (event: DragEvent) => {
     if (event.target instanceof HTMLInputElement || event.target instanceof HTMLTextAreaElement)
       return
     event.preventDefault()
   }
   const onDrop = (event: DragEvent) => {
-    const [file] = event.dataTransfer?.files ?? []
+    const files = [...(event.dataTransfer?.files ?? [])]
     const text = event.dataTransfer?.getData('text/uri-list')
-    if (!file && !text) return
+    if (files.length === 0 && !text) return
     event.preventDefault()
-    if (file) void openFile(store, file)
-    else if (text) openLink(store, text)
+    if (files.length > 0) void openFiles(store, keeping, files)
+    else if (text) void openLink(store, keeping, text)
   }
   document.addEventListener('dragover', onDragOver)
   document.addEventListener('drop', onDrop)

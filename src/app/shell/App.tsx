@@ -1,6 +1,7 @@
 import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
+import { CopyBanner, KeepNotes } from '../keep'
 import { Schedule } from '../schedule'
 import { Sums } from '../sums'
 import { Announcer } from './Announcer'
@@ -17,7 +18,9 @@ export function App() {
       <Header />
       <Board />
       <div className="side">
+        <KeepNotes />
         <Notice />
+        <CopyBanner />
         <FirstVisit />
         <Schedule />
         <Sums />

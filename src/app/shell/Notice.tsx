@@ -24,6 +24,11 @@ export function Notice() {
             Go back
           </button>
         )}
+        {notice.verbs?.map(({ verb, act }) => (
+          <button key={verb} type="button" className="verb" onClick={act}>
+            {verb}
+          </button>
+        ))}
         <button type="button" className="verb" onClick={() => notify(undefined)}>
           Put away
         </button>
