@@ -17,7 +17,7 @@ export interface Palette {
   /** The lines of the grid every millimetre. */
   readonly fineGrid: string
   readonly quantities: { readonly [quantity in Quantity]: string }
-  /** A broad stroke under what is picked. */
+  /** A broad clear stroke over what is picked. */
   readonly selection: string
   /** Gaps between what is measured and what is calculated, and what a hand drew. */
   readonly gap: string
@@ -37,7 +37,7 @@ const light: Palette = {
     power: '#6b3a8a',
     other: '#4c545d',
   },
-  selection: '#d3e3f4',
+  selection: 'rgba(62, 132, 200, 0.22)',
   gap: '#b3205a',
 }
 
@@ -55,7 +55,7 @@ const dark: Palette = {
     power: '#c79be6',
     other: '#b4bcc5',
   },
-  selection: '#2e465f',
+  selection: 'rgba(120, 175, 235, 0.26)',
   gap: '#f585ae',
 }
 

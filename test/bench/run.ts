@@ -1,4 +1,5 @@
 import type { Measure } from './measure'
+import { dragFirstOf100, dragLooseAmong1000, redraw1000 } from './measures/board'
 import { bytesOfFirstLoad, firstShaftsOnScreen } from './measures/first-load'
 import { charactersOfLink, linkAgainstDeflate } from './measures/link'
 import { resultantAgainstLoop, resultantAgainstMathjs } from './measures/resultant'
@@ -14,6 +15,9 @@ const measures: readonly Measure[] = [
   charactersOfLink,
   bytesOfFirstLoad,
   firstShaftsOnScreen,
+  dragFirstOf100,
+  dragLooseAmong1000,
+  redraw1000,
 ]
 
 const width = Math.max(...measures.map(({ name }) => name.length))

@@ -1,7 +1,7 @@
 import { type KeyboardEvent, useEffect, useId, useMemo, useRef, useState } from 'react'
 import { Layer, Stage } from 'react-konva/lib/ReactKonvaCore'
 import type { Grip, Scene } from '../../drawing'
-import { shownEvaluation, shownSheet, usePage, usePageStore } from '../store'
+import { answerOf, shownSheet, usePage, usePageStore } from '../store'
 import { BoardVerbs } from './BoardVerbs'
 import { CarriedShape } from './CarriedShape'
 import { describeBoard } from './describe'
@@ -21,7 +21,6 @@ export function Board() {
   const store = usePageStore()
   const sheet = usePage((state) => state.history.sheet)
   const shown = usePage(shownSheet)
-  const evaluation = usePage(shownEvaluation)
   const selection = usePage((state) => state.selection)
   const theme = useTheme()
   const pixelRatio = usePixelRatio()
@@ -34,7 +33,7 @@ export function Board() {
   const description = useId()
 
   const scene = useMemo(() => base ?? drawnScene(sheet, theme), [base, sheet, theme])
-  const view = chosenView ?? fitView(size, scene)
+  const view = useMemo(() => chosenView ?? fitView(size, scene), [chosenView, size, scene])
   const moving = useMovingScene(base, theme)
   const ground = useMemo(() => scene.items.filter(isGround), [scene])
   const still = useMemo(
@@ -43,6 +42,11 @@ export function Board() {
         (item) => !isGround(item) && !(item.arrow !== undefined && moving.moved.has(item.arrow)),
       ),
     [scene, moving.moved],
+  )
+
+  const words = useMemo(
+    () => describeBoard(sheet, answerOf(sheet).evaluation, scene),
+    [sheet, scene],
   )
 
   const latest = useRef({ scene, view, size })
@@ -90,15 +94,15 @@ export function Board() {
             <SceneShape items={ground} view={view} height={scene.height} />
           </Layer>
           <Layer listening={false}>
+            <SceneShape items={still} view={view} height={scene.height} />
+          </Layer>
+          <Layer listening={false}>
             <SelectionShape
               scene={moving.after ?? scene}
               selection={selection}
               theme={theme}
               view={view}
             />
-            <SceneShape items={still} view={view} height={scene.height} />
-          </Layer>
-          <Layer listening={false}>
             {moving.carried.map((group) => (
               <CarriedShape
                 key={group.key}
@@ -114,7 +118,7 @@ export function Board() {
         </Stage>
       </div>
       <p id={description} className="visually-hidden">
-        {describeBoard(shown, evaluation, scene)}
+        {words}
       </p>
       {readout && <ReadoutLabel readout={readout} sheet={shown} board={size} />}
       <BoardVerbs

@@ -7,7 +7,7 @@ import type { View } from './view'
 
 const breadth = 3.2
 
-/** A broad soft stroke under the arrows that are picked. */
+/** A broad soft stroke over the arrows that are picked, clear enough to see them through it. */
 export function SelectionShape(properties: {
   readonly scene: Scene
   readonly selection: Selection | undefined

@@ -6,29 +6,35 @@ const dark = window.matchMedia('(prefers-color-scheme: dark)')
 
 /** Light or dark, as the system has it. */
 export function useTheme(): Theme {
-  return useSyncExternalStore(
-    (changed) => {
-      dark.addEventListener('change', changed)
-      return () => dark.removeEventListener('change', changed)
-    },
-    () => (dark.matches ? 'dark' : 'light'),
-  )
+  return useSyncExternalStore(onThemeChange, currentTheme)
+}
+
+function onThemeChange(changed: () => void): () => void {
+  dark.addEventListener('change', changed)
+  return () => dark.removeEventListener('change', changed)
+}
+
+function currentTheme(): Theme {
+  return dark.matches ? 'dark' : 'light'
 }
 
 /** Device pixels in a CSS pixel; it changes when a window moves to another screen or is zoomed. */
 export function usePixelRatio(): number {
-  return useSyncExternalStore(
-    (changed) => {
-      const current = window.matchMedia(`(resolution: ${window.devicePixelRatio}dppx)`)
-      current.addEventListener('change', changed)
-      window.addEventListener('resize', changed)
-      return () => {
-        current.removeEventListener('change', changed)
-        window.removeEventListener('resize', changed)
-      }
-    },
-    () => window.devicePixelRatio,
-  )
+  return useSyncExternalStore(onPixelRatioChange, currentPixelRatio)
+}
+
+function onPixelRatioChange(changed: () => void): () => void {
+  const current = window.matchMedia(`(resolution: ${window.devicePixelRatio}dppx)`)
+  current.addEventListener('change', changed)
+  window.addEventListener('resize', changed)
+  return () => {
+    current.removeEventListener('change', changed)
+    window.removeEventListener('resize', changed)
+  }
+}
+
+function currentPixelRatio(): number {
+  return window.devicePixelRatio
 }
 
 /** The size of an element in CSS pixels, as it is now. */
