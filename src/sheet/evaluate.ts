@@ -1,4 +1,4 @@
-import { type Complex, fromPolar, isFiniteComplex, resultant, toPolar } from '../core'
+import { type Complex, fromPolar, isFiniteComplex, resultant, toPolar, ZERO } from '../core'
 import { type AsRead, asReadOf, type KnownParts } from './as-read'
 import type { Evaluation, PhasorEvaluation, PolarValue, SumEvaluation } from './evaluation'
 import type { Phasor, PhasorId, Sheet, Sum } from './types'
@@ -20,36 +20,42 @@ export function quick(sheet: Sheet): Evaluation {
   return { phasors, sums: (sheet.sums ?? []).map((sum) => evaluateSum(sum, values)) }
 }
 
+/** What is known is written down part by part; spreading objects would take longer than the sums. */
+type Writable<Part> = { -readonly [field in keyof Part]: Part[field] }
+
 function evaluatePhasor(phasor: Phasor, { values }: AsRead): PhasorEvaluation {
   const asRead = values.get(phasor.id) ?? {}
   const { magnitude, angle } = asRead
+  const value = complexOfPhasor(phasor, asRead)
   const isAngleOpen = angle === undefined || magnitude === 0
-  return {
+  const evaluation: Writable<PhasorEvaluation> = {
     id: phasor.id,
-    ...(magnitude === undefined ? {} : { magnitude }),
-    ...(isAngleOpen ? {} : { angle }),
-    ...partsOf(phasor, asRead),
     asRead,
     magnitudeState: magnitude === undefined ? 'open' : 'given',
     angleState: isAngleOpen ? 'open' : 'given',
   }
+  if (magnitude !== undefined) evaluation.magnitude = magnitude
+  if (!isAngleOpen) evaluation.angle = angle
+  if (value !== undefined) {
+    evaluation.real = value.re
+    evaluation.imaginary = value.im
+  }
+  return evaluation
 }
 
-/** Real and imaginary part where both are settled: those of a phasor typed so are not computed anew. */
-function partsOf(
+/** The value where both parts are settled: that of a phasor typed rectangular is not computed anew. */
+function complexOfPhasor(
   { real, imaginary }: Phasor,
   { magnitude, angle }: KnownParts,
-): { readonly real?: number; readonly imaginary?: number } {
-  if (magnitude === 0) return { real: 0, imaginary: 0 }
-  if (magnitude === undefined || angle === undefined) return {}
+): Complex | undefined {
+  if (magnitude === 0) return ZERO
+  if (magnitude === undefined || angle === undefined) return undefined
   if (real !== undefined && imaginary !== undefined) {
-    const typed = toPolar({ re: real.value, im: imaginary.value })
-    if (typed.magnitude === magnitude && typed.angle === angle) {
-      return { real: real.value, imaginary: imaginary.value }
-    }
+    const typed = { re: real.value, im: imaginary.value }
+    const polar = toPolar(typed)
+    if (polar.magnitude === magnitude && polar.angle === angle) return typed
   }
-  const { re, im } = fromPolar(magnitude, angle)
-  return { real: re, imaginary: im }
+  return fromPolar(magnitude, angle)
 }
 
 function evaluateSum(sum: Sum, phasors: ReadonlyMap<PhasorId, PhasorEvaluation>): SumEvaluation {
@@ -61,7 +67,7 @@ function evaluateSum(sum: Sum, phasors: ReadonlyMap<PhasorId, PhasorEvaluation>)
   const total = resultant(known)
   const isKnown = terms.length > 0 && known.length === terms.length && isFiniteComplex(total)
   const measured = typeof sum.equals === 'string' ? phasors.get(sum.equals) : undefined
-  const target = sum.equals === 0 ? { re: 0, im: 0 } : complexOf(measured)
+  const target = sum.equals === 0 ? ZERO : complexOf(measured)
   const percentOf = measured?.magnitude || largestMagnitude(sum, phasors)
   return {
     id: sum.id,

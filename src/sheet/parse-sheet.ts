@@ -1,13 +1,12 @@
-import * as v from 'valibot'
 import { toCanonical } from './canonical'
 import { checkFigures } from './checks/figures'
 import { checkIds } from './checks/ids'
 import { findUnplain } from './checks/plain'
 import { checkReferences } from './checks/references'
 import { checkRelations } from './checks/relations'
+import { findMisshapen, isShapedSheet } from './checks/shape'
 import { MAXIMUM_ERRORS, MAXIMUM_FILE_BYTES } from './limits'
-import { sheetSchema } from './schema/sheet'
-import { joinPath, type SheetError, type SheetResult, sheetFailure } from './sheet-result'
+import { type SheetError, type SheetResult, sheetFailure } from './sheet-result'
 import type { Sheet } from './types'
 
 /**
@@ -19,7 +18,7 @@ export function parseSheet(input: unknown): SheetResult {
   if (unplain.length > 0) return { ok: false, errors: unplain }
   const newer = versionAbove(input)
   if (newer !== undefined) return sheetFailure('version', newer)
-  if (!isShapedRight(input)) return { ok: false, errors: findMisshapen(input) }
+  if (!isShapedSheet(input)) return { ok: false, errors: firstOf(findMisshapen(input)) }
   const errors = findContradictions(input)
   return errors.length === 0 ? { ok: true, sheet: toCanonical(input) } : { ok: false, errors }
 }
@@ -40,17 +39,8 @@ export function parseSheetText(text: string): SheetResult {
 
 /** Everything that is wrong with a sheet that an edit made; empty where nothing is. */
 export function findErrors(sheet: Sheet): readonly SheetError[] {
-  const unplain = firstOf(findUnplain(sheet))
-  if (unplain.length > 0) return unplain
-  return isShapedRight(sheet) ? findContradictions(sheet) : findMisshapen(sheet)
-}
-
-function isShapedRight(input: unknown): input is Sheet {
-  return v.is(sheetSchema, input)
-}
-
-function findMisshapen(input: unknown): readonly SheetError[] {
-  return firstOf((v.safeParse(sheetSchema, input).issues ?? []).map(toError))
+  const errors = firstOf(both(findUnplain(sheet), findMisshapen(sheet)))
+  return errors.length > 0 ? errors : findContradictions(sheet)
 }
 
 function findContradictions(sheet: Sheet): readonly SheetError[] {
@@ -70,14 +60,6 @@ function firstOf(errors: Iterable<SheetError>): readonly SheetError[] {
     first.push(error)
   }
   return first
-}
-
-function toError(issue: v.BaseIssue<unknown>): SheetError {
-  let path = ''
-  for (const { key } of issue.path ?? []) {
-    path = joinPath(path, typeof key === 'number' ? key : String(key))
-  }
-  return { path, message: issue.message }
 }
 
 function versionAbove(input: unknown): string | undefined {
