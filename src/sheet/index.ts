@@ -1,4 +1,4 @@
-export { serializeSheet, serializeSheetLine } from './codec-file'
+export { serializeSheet } from './codec-file'
 export { parseLink, serializeLink } from './codec-link'
 export { apply, describeEdit, type Edit, type Several } from './edit'
 export type { Change } from './edits/change'
