@@ -1,4 +1,4 @@
-import { type Box, growBox, isOverlapping } from '../geometry'
+import { type Box, distanceToBox, growBox, isOverlapping } from '../geometry'
 import { clipToBox } from './clip'
 import type { Occupancy } from './occupancy'
 import type { Leader, Stand } from './spot'
@@ -64,7 +64,9 @@ export class Room {
 
   private isFreeLeader(leader: Leader): boolean {
     const isBlocked = (box: Box) => isCrossing(leader, box)
-    return !this.boxes.some(isBlocked) && !this.fences.some(isBlocked)
+    // What starts behind a fence has to cross it.
+    const ahead = this.fences.filter((fence) => distanceToBox(leader.from, fence) > BESIDE_LEADER)
+    return !this.boxes.some(isBlocked) && !ahead.some(isBlocked)
   }
 }
 
