@@ -1,3 +1,4 @@
+export { type ArrowAt, arrowAt } from './arrow-at'
 export { type Displacement, displacementBetween } from './displacement'
 export { dragBody, dragTip, pinDrawing, type TipDrag, whyTipIsHeld } from './drag'
 export { measureText } from './font/measure'
@@ -33,3 +34,4 @@ export {
   readingsByPhasor,
 } from './text/resolution'
 export { type Palette, paletteOf, type Theme } from './theme'
+export { type Trace, trace } from './trace'
