@@ -16,8 +16,8 @@ import type { Sheet } from './types'
 export function parseSheet(input: unknown): SheetResult {
   const unplain = firstOf(findUnplain(input))
   if (unplain.length > 0) return { ok: false, errors: unplain }
-  const newer = versionAbove(input)
-  if (newer !== undefined) return sheetFailure('version', newer)
+  const foreign = whyForeign(input)
+  if (foreign !== undefined) return { ok: false, errors: [foreign] }
   if (!isShapedSheet(input)) return { ok: false, errors: firstOf(findMisshapen(input)) }
   const errors = findContradictions(input)
   return errors.length === 0 ? { ok: true, sheet: toCanonical(input) } : { ok: false, errors }
@@ -62,11 +62,20 @@ function firstOf(errors: Iterable<SheetError>): readonly SheetError[] {
   return first
 }
 
-function versionAbove(input: unknown): string | undefined {
-  if (typeof input !== 'object' || input === null || !('version' in input)) return undefined
-  const { version } = input
-  if (typeof version !== 'number' || version <= 1) return undefined
-  return `This sheet was made by a newer version of the program (${version}): open it there, or bring this one up to date.`
+/** Why a value is no sheet of this version at all, so that its parts need not be looked at. */
+function whyForeign(input: unknown): SheetError | undefined {
+  if (typeof input !== 'object' || input === null || Array.isArray(input)) {
+    return { path: '', message: 'This is not a sheet: a sheet is an object, in braces.' }
+  }
+  if (!('format' in input) || input.format !== 'phasogon-sheet') {
+    const message = 'This is not a sheet: its format must be "phasogon-sheet".'
+    return { path: 'format', message }
+  }
+  if ('version' in input && typeof input.version === 'number' && input.version > 1) {
+    const message = `This sheet was made by a newer version of the program (${input.version}): open it there, or bring this one up to date.`
+    return { path: 'version', message }
+  }
+  return undefined
 }
 
 function utf8Length(text: string): number {
