@@ -72,7 +72,11 @@ export function Board() {
         scene: () => latest.current.scene,
         view: () => latest.current.view,
         size: () => latest.current.size,
-        setView,
+        // Several moves may come before the next rendering: each goes on from the one before.
+        setView: (next) => {
+          latest.current = { ...latest.current, view: next }
+          setView(next)
+        },
         setBase,
         setReadout,
         setGrip,
