@@ -2,6 +2,7 @@ import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
 import { CopyBanner, KeepNotes } from '../keep'
+import { VersionNote } from '../offline'
 import { Schedule } from '../schedule'
 import { Sums } from '../sums'
 import { Announcer } from './Announcer'
@@ -19,6 +20,7 @@ export function App() {
       <Board />
       <div className="side">
         <KeepNotes />
+        <VersionNote />
         <Notice />
         <CopyBanner />
         <FirstVisit />
