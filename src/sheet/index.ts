@@ -1,7 +1,10 @@
+export { type AssumedLimits, assumedOf } from './assumed'
 export { serializeSheet } from './codec-file'
 export { parseLink, serializeLink } from './codec-link'
 export { apply, describeEdit, type Edit, type Several } from './edit'
 export type { Change } from './edits/change'
+export { nameOfChannel } from './edits/channels'
+export { nameOfInstrument } from './edits/instruments'
 export { describeRemoval } from './edits/remove-phasor'
 export type { ValuePart } from './edits/set-value'
 export { evaluate, quick } from './evaluate'
@@ -12,7 +15,26 @@ export { commit, createHistory, type History, redo, type Step, undo } from './hi
 export * from './limits'
 export { newId } from './new-id'
 export { parseSheet, parseSheetText } from './parse-sheet'
+export { type LimitedTerm, standardUncertaintyOf } from './readings/combine'
+export { createReading, type ReadingSubject } from './readings/create'
+export { formulasOf } from './readings/formulas'
+export { observedOf } from './readings/indication'
+export { type Lead, leadOf } from './readings/lead'
+export { limitOf, type ReadingLimit } from './readings/limit'
+export type { LimitPart, SharedLimitPart } from './readings/limit-part'
+export { type NextReading, nextReading } from './readings/next'
+export type { Observed } from './readings/observed'
+export {
+  numbersIn,
+  READING_COLUMNS,
+  type ReadingRows,
+  readingTable,
+  readReadingRows,
+} from './readings/rows'
+export { parseReadingText, type ReadingFigures, readingText } from './readings/text'
+export { angleSentence, wordsOf } from './readings/words'
 export { referenceOf } from './reference'
+export { type Remark, remarksOn } from './remarks'
 export { type RowsRead, readRows, tableOf } from './rows'
 export { formatErrors, type SheetError, type SheetResult } from './sheet-result'
 export { extractSheetText } from './svg-metadata'
