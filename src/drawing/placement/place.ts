@@ -1,4 +1,4 @@
-import type { Drawing, Evaluation, Place, Quantity, Sheet, UnitsPerCentimetre } from '../../sheet'
+import type { Drawing, Evaluation, Place, Sheet, UnitsPerCentimetre } from '../../sheet'
 import type { Box } from '../geometry'
 import type { PlacedArrow } from '../scene'
 import type { Scales } from './extent'
@@ -90,6 +90,3 @@ function placeMember(
     ? { key, role, phasor, sign, quantity, from, to }
     : { key, role, phasor, sum, sign, quantity, from, to }
 }
-
-/** The quantities in the order in which scale bars and descriptions name them. */
-export const QUANTITIES: readonly Quantity[] = ['voltage', 'current', 'impedance', 'power', 'other']
