@@ -20,6 +20,14 @@ import {
 import { type DragTip, dragTip } from './edits/drag-tip'
 import type { EditKind } from './edits/edit-kind'
 import {
+  type ClearHand,
+  clearHand,
+  type RemoveHandArrow,
+  removeHandArrow,
+  type SetHandArrow,
+  setHandArrow,
+} from './edits/hand'
+import {
   type AddInstrument,
   addInstrument,
   type RemoveInstrument,
@@ -99,6 +107,9 @@ interface EditByKind {
   readonly 'add-channel': AddChannel
   readonly 'remove-channel': RemoveChannel
   readonly 'set-channel': SetChannel
+  readonly 'set-hand-arrow': SetHandArrow
+  readonly 'remove-hand-arrow': RemoveHandArrow
+  readonly 'clear-hand': ClearHand
   readonly several: Several
 }
 
@@ -153,6 +164,9 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'add-channel': addChannel,
   'remove-channel': removeChannel,
   'set-channel': setChannel,
+  'set-hand-arrow': setHandArrow,
+  'remove-hand-arrow': removeHandArrow,
+  'clear-hand': clearHand,
   several,
 }
 

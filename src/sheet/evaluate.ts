@@ -1,7 +1,8 @@
 import { type Complex, fromPolar, isFiniteComplex, resultant, toPolar, ZERO } from '../core'
 import { type AsRead, asReadOf, type KnownParts } from './as-read'
 import type { Evaluation, PhasorEvaluation, PolarValue, SumEvaluation } from './evaluation'
-import type { Phasor, PhasorId, Sheet, Sum } from './types'
+import { evaluateHand } from './hand/evaluate-hand'
+import type { Id, Phasor, PhasorId, Sheet, Sum } from './types'
 
 /** What the program says of a sheet. */
 export function evaluate(sheet: Sheet): Evaluation {
@@ -10,14 +11,25 @@ export function evaluate(sheet: Sheet): Evaluation {
 
 /**
  * The half of the evaluation that keeps up with a drag: the phasors as typed and read, and of each sum
- * the exact resultant and how far it is from what was measured. Nothing is solved or adjusted.
+ * the exact resultant and how far it is from what was measured, and what a hand drew beside what it
+ * stands for. Nothing is solved or adjusted.
  */
 export function quick(sheet: Sheet): Evaluation {
   const asRead = asReadOf(sheet)
   const phasors = sheet.phasors.map((phasor) => evaluatePhasor(phasor, asRead))
   const values = new Map<PhasorId, PhasorEvaluation>()
   for (const phasor of phasors) values.set(phasor.id, phasor)
-  return { phasors, sums: (sheet.sums ?? []).map((sum) => evaluateSum(sum, values)) }
+  const sums = (sheet.sums ?? []).map((sum) => evaluateSum(sum, values))
+  const hand = evaluateHand(sheet, {
+    phasor: (id) => complexOf(values.get(id)),
+    resultant: (id) => resultantIn(sums, id),
+  })
+  return { phasors, sums, hand }
+}
+
+function resultantIn(sums: readonly SumEvaluation[], id: Id): Complex | undefined {
+  const found = sums.find((sum) => sum.id === id)?.resultant
+  return found && { re: found.real, im: found.imaginary }
 }
 
 /** What is known is written down part by part; spreading objects would take longer than the sums. */

@@ -161,5 +161,35 @@ const others: fc.Arbitrary<EditOf> = fc.oneof(
   ),
 )
 
+const drawn: fc.Arbitrary<EditOf> = fc.oneof(
+  fc.tuple(which, fc.boolean(), place, place).map(([at, closes, from, to]) =>
+    onPhasor(({ id }, sheet) => {
+      const [sum] = sheet.sums ?? []
+      return {
+        kind: 'set-hand-arrow',
+        id: sheet.hand?.[at % 3]?.id ?? newId(sheet, 'h1'),
+        stands: closes ? 'closing' : id,
+        ...(sum && { sum: sum.id }),
+        from,
+        to,
+      }
+    })(at),
+  ),
+  which.map(
+    (at): EditOf =>
+      (sheet) => {
+        const arrow = pick(sheet.hand, at)
+        return arrow && { kind: 'remove-hand-arrow', id: arrow.id }
+      },
+  ),
+  which.map(
+    (at): EditOf =>
+      (sheet) => {
+        const sum = pick(sheet.sums, at)
+        return sum ? { kind: 'clear-hand', sum: sum.id } : { kind: 'clear-hand' }
+      },
+  ),
+)
+
 /** Any edit of any kind but `several` and `add-rows`, which are made of others. */
-export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, others)
+export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, drawn, others)
