@@ -1,4 +1,3 @@
-export { type ArrowAt, arrowAt } from './arrow-at'
 export { type Displacement, displacementBetween } from './displacement'
 export { dragBody, dragTip, pinDrawing, type TipDrag, whyTipIsHeld } from './drag'
 export { measureText } from './font/measure'
@@ -34,4 +33,3 @@ export {
   readingsByPhasor,
 } from './text/resolution'
 export { type Palette, paletteOf, type Theme } from './theme'
-export { type Trace, trace } from './trace'
