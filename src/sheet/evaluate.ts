@@ -1,4 +1,4 @@
-import { type Complex, fromPolar, isFiniteComplex, resultant, toPolar, ZERO } from '../core'
+import { type Complex, fromPolar, magnitudeOf, resultant, toPolar, ZERO } from '../core'
 import { type AsRead, asReadOf, type KnownParts } from './as-read'
 import type { Evaluation, PhasorEvaluation, PolarValue, SumEvaluation } from './evaluation'
 import { evaluateHand } from './hand/evaluate-hand'
@@ -35,8 +35,23 @@ function resultantIn(sums: readonly SumEvaluation[], id: Id): Complex | undefine
 /** What is known is written down part by part; spreading objects would take longer than the sums. */
 type Writable<Part> = { -readonly [field in keyof Part]: Part[field] }
 
+const evaluations = new WeakMap<Phasor, PhasorEvaluation>()
+
+/** A phasor that neither changed itself nor by its readings keeps its evaluation, the object itself. */
 function evaluatePhasor(phasor: Phasor, { values }: AsRead): PhasorEvaluation {
   const asRead = values.get(phasor.id) ?? {}
+  const before = evaluations.get(phasor)
+  if (before && isSame(before.asRead, asRead)) return before
+  const evaluation = evaluateAnew(phasor, asRead)
+  evaluations.set(phasor, evaluation)
+  return evaluation
+}
+
+function isSame(one: KnownParts, other: KnownParts): boolean {
+  return one === other || (one.magnitude === other.magnitude && one.angle === other.angle)
+}
+
+function evaluateAnew(phasor: Phasor, asRead: KnownParts): PhasorEvaluation {
   const { magnitude, angle } = asRead
   const value = complexOfPhasor(phasor, asRead)
   const isAngleOpen = angle === undefined || magnitude === 0
@@ -77,17 +92,19 @@ function evaluateSum(sum: Sum, phasors: ReadonlyMap<PhasorId, PhasorEvaluation>)
   }))
   const known = terms.flatMap(({ value, sign }) => (value === undefined ? [] : [{ value, sign }]))
   const total = resultant(known)
-  const isKnown = terms.length > 0 && known.length === terms.length && isFiniteComplex(total)
+  const isKnown =
+    terms.length > 0 && known.length === terms.length && Number.isFinite(magnitudeOf(total))
   const measured = typeof sum.equals === 'string' ? phasors.get(sum.equals) : undefined
   const target = sum.equals === 0 ? ZERO : complexOf(measured)
-  const percentOf = measured?.magnitude || largestMagnitude(sum, phasors)
+  const gap =
+    isKnown && target !== undefined
+      ? gapBetween(target, known, [measured?.magnitude ?? 0, largestMagnitude(sum, phasors)])
+      : undefined
   return {
     id: sum.id,
     ...(isKnown ? { resultant: toPolarValue(total) } : {}),
     ...(measured === undefined ? {} : { measured: measured.asRead }),
-    ...(isKnown && target !== undefined
-      ? { closingError: gapBetween(target, known, percentOf) }
-      : {}),
+    ...(gap === undefined ? {} : { closingError: gap }),
   }
 }
 
@@ -100,12 +117,16 @@ function toPolarValue(value: Complex): PolarValue {
   return { ...toPolar(value), real: value.re, imaginary: value.im }
 }
 
-/** What is missing from the sum: measured − resultant, added up in one go so that little is rounded. */
+/**
+ * What is missing from the sum: measured − resultant, added up in one go so that little is rounded. Its
+ * percentage is of the first size that is more than nothing; without one there is no gap either.
+ * Undefined where the gap is too large to be a figure.
+ */
 function gapBetween(
   target: Complex,
   terms: readonly { readonly value: Complex; readonly sign: 1 | -1 }[],
-  percentOf: number,
-): NonNullable<SumEvaluation['closingError']> {
+  sizes: readonly number[],
+): SumEvaluation['closingError'] {
   const { magnitude, angle } = toPolar(
     resultant([
       { value: target },
@@ -115,7 +136,9 @@ function gapBetween(
       })),
     ]),
   )
-  return { magnitude, angle, percent: percentOf === 0 ? 0 : (100 * magnitude) / percentOf }
+  if (!Number.isFinite(magnitude)) return undefined
+  const percents = sizes.map((size) => (magnitude / size) * 100)
+  return { magnitude, angle, percent: percents.find(Number.isFinite) ?? 0 }
 }
 
 function largestMagnitude(

@@ -336,3 +336,24 @@ test(
     )
   },
 )
+
+test('a gap beside next to nothing is in percent of the largest term', () => {
+  const sheet = sheetOf({
+    phasors: [
+      polar('A', '3', '0'),
+      { ...phasor('M'), magnitude: { value: 5e-324 }, angle: { value: 90 } },
+    ],
+    sums: [{ id: 's1', terms: [{ phasor: 'A' }], equals: 'M' }],
+  })
+  expect(sumIn(evaluate(sheet), 's1').closingError).toMatchObject({ magnitude: 3, percent: 100 })
+})
+
+test('a hand arrow at a scale beyond any figure is not compared', () => {
+  const sheet = sheetOf({
+    phasors: [polar('A', '3', '0')],
+    drawing: { unitsPerCentimetre: { voltage: 5e-324 } },
+    hand: [{ id: 'h1', stands: 'A', from: { x: 0, y: 0 }, to: { x: 10, y: 0 } }],
+  })
+  const evaluation = evaluate(sheet)
+  expect(JSON.parse(JSON.stringify(evaluation))).toEqual(evaluation)
+})

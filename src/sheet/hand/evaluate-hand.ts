@@ -56,6 +56,15 @@ function compare(
   const own = seat.position === 'closing' ? subtract(error, inherited) : error
   const millimetres = magnitudeOf(error) / perMillimetre
   const allowed = tipErrorAllowed(magnitudeOf(should) / perMillimetre, tolerance)
+  // A scale may be so fine that what it makes of the paper is beyond any figure.
+  const figures = [
+    millimetres,
+    allowed,
+    magnitudeOf(vector),
+    magnitudeOf(own),
+    magnitudeOf(inherited),
+  ]
+  if (!figures.every(Number.isFinite)) return drawn
   const isPoint = drawn.angle === undefined || magnitudeOf(value) === 0
   return {
     ...drawn,
@@ -72,6 +81,7 @@ function compare(
 
 function drawnValue(id: HandArrow['id'], value: Complex): HandEvaluation {
   const { magnitude, angle } = toPolar(value)
+  if (!Number.isFinite(magnitude)) return { id }
   return magnitude === 0 ? { id, magnitude } : { id, magnitude, angle }
 }
 
