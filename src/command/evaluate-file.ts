@@ -19,21 +19,28 @@ interface Origin {
 /** One line of output: what the program says of a sheet, or what is wrong with it. */
 export type Answer = Origin & (Evaluation | { readonly errors: readonly SheetError[] })
 
+/** An answer with the title of its sheet, which is empty where there is none. */
+export interface Evaluated {
+  readonly title: string
+  readonly answer: Answer
+}
+
 /**
  * Evaluates the sheets of a file, in order: one in a JSON file or in the metadata of an SVG drawing, one
  * a line in a file that ends in `.jsonl`, blank lines passed over. `file` is how the answers name it,
  * `path` where it lies. A file that cannot be read is answered like a sheet that is not valid.
  */
-export async function* evaluateFile(file: string, path: string): AsyncGenerator<Answer> {
+export async function* evaluateFile(file: string, path: string): AsyncGenerator<Evaluated> {
   try {
     if (path.toLowerCase().endsWith('.jsonl')) yield* evaluateLines(file, path)
     else yield answerTo({ file }, await readSheet(path))
   } catch (error) {
-    yield { file, errors: [{ path: '', message: whyUnreadable(error) }] }
+    const errors = [{ path: '', message: whyUnreadable(error) }]
+    yield { title: '', answer: { file, errors } }
   }
 }
 
-async function* evaluateLines(file: string, path: string): AsyncGenerator<Answer> {
+async function* evaluateLines(file: string, path: string): AsyncGenerator<Evaluated> {
   let line = 0
   for await (const text of linesOf(path)) {
     line += 1
@@ -60,8 +67,10 @@ function refusal(message: string): SheetResult {
   return { ok: false, errors: [{ path: '', message }] }
 }
 
-function answerTo(origin: Origin, result: SheetResult): Answer {
-  return result.ok ? { ...origin, ...evaluate(result.sheet) } : { ...origin, errors: result.errors }
+function answerTo(origin: Origin, result: SheetResult): Evaluated {
+  if (!result.ok) return { title: '', answer: { ...origin, errors: result.errors } }
+  const { sheet } = result
+  return { title: sheet.title, answer: { ...origin, ...evaluate(sheet) } }
 }
 
 const REASONS: { readonly [code: string]: string } = {
