@@ -1,5 +1,6 @@
 import { readFile } from 'node:fs/promises'
 import type { Page } from '@playwright/test'
+import { test } from './test'
 
 /** A file that the page gave out. */
 export interface Saved {
@@ -14,8 +15,10 @@ export async function saveDrawing(page: Page, verb: RegExp): Promise<Saved> {
   const coming = page.waitForEvent('download')
   await page.getByRole('button', { name: verb }).click()
   const download = await coming
-  const path = await download.path()
-  return { name: download.suggestedFilename(), path, bytes: await readFile(path) }
+  const name = download.suggestedFilename()
+  const path = test.info().outputPath(name)
+  await download.saveAs(path)
+  return { name, path, bytes: await readFile(path) }
 }
 
 /** Opens a file with the Open dialog's file chooser. */
