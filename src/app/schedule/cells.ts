@@ -1,6 +1,15 @@
 import { formatAngle, formatLimit, formatQuantity, resolutionOf, unitOf } from '../../core'
 import { digitsOf, type PhasorDigits, type ReadingsByPhasor } from '../../drawing'
-import type { Phasor, PhasorEvaluation, Reading, Sheet, Typed } from '../../sheet'
+import {
+  assumedOf,
+  limitOf,
+  type Phasor,
+  type PhasorEvaluation,
+  type Reading,
+  type ReadingLimit,
+  type Sheet,
+  type Typed,
+} from '../../sheet'
 
 /** What one cell of the schedule shows, and what is edited in it. */
 export interface CellText {
@@ -24,8 +33,6 @@ export interface RowText {
 }
 
 const nothing: CellText = { shown: '', typed: '', derived: false }
-/** Limits where none is stated, in per cent and degrees (common practice, no source). */
-const usual = { percent: 1, degrees: 1 }
 
 /** The texts of a phasor's row: as typed or read where it was, worked out from the rest where not. */
 export function rowText(
@@ -36,7 +43,7 @@ export function rowText(
 ): RowText {
   const own = readings.get(phasor.id) ?? []
   const magnitudes = own.filter(({ kind }) => kind === 'magnitude')
-  const angles = own.filter(({ kind }) => kind === 'angle')
+  const angles = own.filter(({ kind }) => isOfAngle(kind))
   const row = {
     phasor,
     evaluation,
@@ -73,8 +80,15 @@ function magnitudeCell(
 
 function angleCell({ phasor, evaluation, digits }: Row, readings: readonly Reading[]): CellText {
   const shown = printed(evaluation.angle, (angle) => formatAngle(angle, digits.angle))
-  const typed = typedText(readings, phasor.angle)
+  const direct = readings.filter(({ kind }) => kind === 'angle')
+  const isWorkedOut = readings.length > direct.length
+  const typed = isWorkedOut ? undefined : typedText(direct, phasor.angle)
   return typed === undefined ? derived(shown) : { shown, typed, derived: false }
+}
+
+/** Whether a reading of this kind says something of its phasor's angle, shown as degrees or not. */
+function isOfAngle(kind: Reading['kind']): boolean {
+  return kind === 'angle' || kind === 'shift' || kind === 'ellipse' || kind === 'power-factor'
 }
 
 function rectangularCell(
@@ -118,19 +132,33 @@ function limitCell(
   [magnitude]: readonly Reading[],
   [angle]: readonly Reading[],
 ): CellText {
-  const size = magnitude ? magnitude.limit : (phasor.magnitude ?? phasor.real)?.limit
-  const turn = angle ? angle.limit : phasor.angle?.limit
-  const stated = [
-    ...(size === undefined ? [] : [formatLimit(size, unit)]),
-    ...(turn === undefined ? [] : [formatLimit(turn, '°')]),
-  ].map((limit) => limit.replace('± ', ''))
-  if (stated.length > 0) {
-    return { shown: stated.join('; '), typed: stated.join('; '), derived: false }
-  }
+  const parts = [
+    { found: limitOfPart(sheet, magnitude, (phasor.magnitude ?? phasor.real)?.limit), unit },
+    { found: limitOfPart(sheet, angle, phasor.angle?.limit), unit: '°' },
+  ]
+  const textOf = (from: readonly ReadingLimit['from'][]) =>
+    parts
+      .flatMap(({ found, unit: of }) =>
+        found && from.includes(found.from) ? [formatLimit(found.limit, of).replace('± ', '')] : [],
+      )
+      .join('; ')
+  const shown = textOf(['stated', 'instrument'])
+  const typed = textOf(['stated'])
+  if (shown !== '') return { shown, typed, derived: typed === '' }
   if (evaluation.magnitude === undefined) return nothing
-  const { percent = usual.percent } = sheet.assumed ?? {}
+  const { percent } = assumedOf(sheet)
   const assumed = formatLimit((evaluation.magnitude * percent) / 100, unit).replace('± ', '')
   return { shown: `${assumed} assumed`, typed: '', derived: true }
+}
+
+/** The limit of a part of a phasor: of its reading where it was read, else as typed. */
+function limitOfPart(
+  sheet: Sheet,
+  reading: Reading | undefined,
+  typed: number | undefined,
+): Pick<ReadingLimit, 'from' | 'limit'> | undefined {
+  if (reading !== undefined) return limitOf(sheet, reading)
+  return typed === undefined ? undefined : { from: 'stated', limit: typed }
 }
 
 function knownOf(
