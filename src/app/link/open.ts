@@ -1,5 +1,6 @@
 import { extractSheetText, parseLink, parseSheetText, type SheetResult } from '../../sheet'
-import { type Keeping, openFiled, openLinked } from '../keep'
+import type { Keeping } from '../keep'
+import { openFiled, openLinked } from '../keep/open-kept'
 import type { Store } from '../store'
 
 const largestFile = 5_000_000
