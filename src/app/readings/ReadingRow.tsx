@@ -116,7 +116,7 @@ function LimitCell(properties: {
       column="limit"
       shown={text}
       typed={text}
-      placeholder={from === 'instrument' ? 'by accuracy' : 'assumed'}
+      placeholder={from === 'instrument' ? 'accuracy' : 'assumed'}
       onCommit={(entered) => commitReadingLimit(store, sheet, reading, entered)}
     />
   )

@@ -30,14 +30,18 @@ export function nextReading(sheet: Sheet): NextReading | undefined {
     : following(sheet, angle, 'angle')
 }
 
+/** The kinds that say something of an angle: one of them is enough for a phasor. */
+const ANGLES: ReadonlySet<Reading['kind']> = new Set(['angle', 'shift', 'ellipse', 'power-factor'])
+
 /** The next phasor after one, in the order of the list and then from its top, not read in that kind. */
 function nextUnread(
   sheet: Sheet,
   after: PhasorId | undefined,
   kind: Reading['kind'],
 ): PhasorId | undefined {
+  const alike = ANGLES.has(kind) ? ANGLES : new Set([kind])
   const read = new Set(
-    (sheet.readings ?? []).filter((reading) => reading.kind === kind).map(({ of }) => of),
+    (sheet.readings ?? []).filter((reading) => alike.has(reading.kind)).map(({ of }) => of),
   )
   const isAngle = kind !== 'magnitude'
   const reference = referenceOf(sheet)
