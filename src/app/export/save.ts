@@ -1,13 +1,14 @@
-import { svg } from '../../drawing'
+import { type ConstructionLines, svg } from '../../drawing'
 import { serializeSheet } from '../../sheet'
 import type { Store } from '../store'
+import { download } from './download'
 import { fileNameOf } from './file-name'
 import { printedScene, toPng } from './picture'
 
 /** Saves the drawing as an SVG, true to scale, which carries its sheet. */
 export function saveSvg(store: Store): void {
   const { sheet } = store.getState().history
-  const text = svg(printedScene(sheet), serializeSheet(sheet))
+  const text = svg(printedScene(sheet, linesToSave(store)), serializeSheet(sheet))
   const name = fileNameOf(sheet, 'svg')
   download(new Blob([text], { type: 'image/svg+xml' }), name)
   tell(store, `Saved “${name}”. Its millimetres are true, and it opens here again.`)
@@ -18,7 +19,7 @@ export async function savePng(store: Store): Promise<void> {
   const { sheet } = store.getState().history
   await attempt(store, 'No picture was saved', async () => {
     const name = fileNameOf(sheet, 'png')
-    download(await toPng(sheet), name)
+    download(await toPng(sheet, linesToSave(store)), name)
     tell(store, `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.`)
   })
 }
@@ -29,19 +30,17 @@ export async function copyPicture(store: Store): Promise<void> {
   await attempt(store, 'The picture was not copied', async () => {
     if (!('ClipboardItem' in window))
       throw new Error('this browser keeps pictures off the clipboard.')
-    await navigator.clipboard.write([new ClipboardItem({ 'image/png': toPng(sheet) })])
+    await navigator.clipboard.write([
+      new ClipboardItem({ 'image/png': toPng(sheet, linesToSave(store)) }),
+    ])
     tell(store, 'Picture copied: paste it into the report.')
   })
 }
 
-/** Hands a file to the browser to be saved. */
-export function download(blob: Blob, name: string): void {
-  const address = URL.createObjectURL(blob)
-  const anchor = document.createElement('a')
-  anchor.href = address
-  anchor.download = name
-  anchor.click()
-  setTimeout(() => URL.revokeObjectURL(address), 10_000)
+/** The construction lines, where they were asked for in what is saved. */
+function linesToSave(store: Store): ConstructionLines | undefined {
+  const { pen } = store.getState()
+  return pen.isConstructionSaved ? pen.construction : undefined
 }
 
 async function attempt(store: Store, refusal: string, work: () => Promise<void>): Promise<void> {
