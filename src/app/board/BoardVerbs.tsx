@@ -12,7 +12,7 @@ export function BoardVerbs(properties: {
 }) {
   const { scene, onKeyDown, onFit, onZoom } = properties
   const store = usePageStore()
-  const pinned = store.getState().history.sheet.drawing
+  const { drawing: pinned, hand } = store.getState().history.sheet
   const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
   const refit = () =>
     store
@@ -34,7 +34,8 @@ export function BoardVerbs(properties: {
         </p>
       )}
       {isOffPaper(scene) && <p className="board-remark">The drawing reaches beyond its frame</p>}
-      {isPinned && (
+      {/* What a hand drew is true to the scale that it was drawn at. */}
+      {isPinned && hand === undefined && (
         <button type="button" className="verb" onClick={refit}>
           Fit drawing to paper
         </button>

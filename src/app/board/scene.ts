@@ -1,5 +1,5 @@
-import { type Item, layout, type Scene, type Theme } from '../../drawing'
-import type { Sheet } from '../../sheet'
+import { type ConstructionLines, type Item, layout, type Scene, type Theme } from '../../drawing'
+import type { Id, Sheet } from '../../sheet'
 import { answerOf } from '../store'
 
 const groundParts: ReadonlySet<Item['part']> = new Set([
@@ -11,9 +11,13 @@ const groundParts: ReadonlySet<Item['part']> = new Set([
   'title-block',
 ])
 
-const scenes = {
-  light: new WeakMap<Sheet, Scene>(),
-  dark: new WeakMap<Sheet, Scene>(),
+const scenes = new WeakMap<Sheet, Map<string, Scene>>()
+
+/** What of a scene is a matter of the view: no sheet says it. */
+export interface ViewOptions {
+  /** Sums whose exact drawing is hidden. */
+  readonly hidden?: ReadonlySet<Id>
+  readonly construction?: ConstructionLines
 }
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
@@ -21,11 +25,15 @@ export function isGround(item: Item): boolean {
   return groundParts.has(item.part)
 }
 
-/** The whole scene of a sheet in the colours of a theme; laid out once for each sheet. */
-export function drawnScene(sheet: Sheet, theme: Theme): Scene {
-  const known = scenes[theme].get(sheet)
+/** The whole scene of a sheet in the colours of a theme; laid out once for each sheet and view. */
+export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}): Scene {
+  const { hidden = [], construction: { parallels = false, arcs = false } = {} } = options
+  const name = [theme, parallels, arcs, ...hidden].join(' ')
+  const own = scenes.get(sheet) ?? new Map<string, Scene>()
+  scenes.set(sheet, own)
+  const known = own.get(name)
   if (known) return known
-  const scene = layout(sheet, answerOf(sheet).evaluation, { theme })
-  scenes[theme].set(sheet, scene)
+  const scene = layout(sheet, answerOf(sheet).evaluation, { theme, ...options })
+  own.set(name, scene)
   return scene
 }

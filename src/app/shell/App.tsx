@@ -2,6 +2,7 @@ import { Suspense } from 'react'
 import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
+import { HandPanel } from '../hand'
 import { CopyBanner, KeepNotes } from '../keep'
 import { VersionNote } from '../offline'
 import { Readings } from '../readings'
@@ -28,6 +29,7 @@ export function App() {
         <FirstVisit />
         <Schedule />
         <Sums />
+        <HandPanel />
         <Suspense>
           <Readings />
         </Suspense>
