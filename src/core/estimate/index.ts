@@ -14,6 +14,13 @@ export {
   studentTwoSidedPoint,
   studentTwoTails,
 } from './distributions'
+export { Drawing, type Found, type ObservationOutcome, type TipCovariance } from './drawing'
+export {
+  type EstimateOptions,
+  estimatePhasors,
+  type PhasorEstimate,
+  type Wanted,
+} from './estimate'
 export {
   type LeastSquaresSolution,
   type SolverOptions,
@@ -25,4 +32,17 @@ export {
   type QuantitySpread,
   uncertaintyOf,
 } from './linearisation'
+export type {
+  ClosedSum,
+  ElementIndex,
+  ElementModel,
+  Observable,
+  Observation,
+  PhasorIndex,
+  PhasorProblem,
+  SharedError,
+  SharedErrorIndex,
+  SharedPart,
+} from './phasor-problem'
 export { type Equations, type LeastSquaresProblem, NO_EQUATIONS } from './problem'
+export { createRandom, normalDeviate, type Random, rectangularDeviate } from './random'

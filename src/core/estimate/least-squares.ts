@@ -22,6 +22,11 @@ export interface LeastSquaresSolution {
 export interface SolverOptions {
   /** Steps that lower the sum of squares; 200 where omitted. */
   readonly iterations?: number
+  /**
+   * How freely each unknown moves, 0 … 1, when the start is first brought onto the conditions: little
+   * for one that is known, so that those that were guessed give way. 1 where omitted.
+   */
+  readonly mobility?: Float64Array
 }
 
 const MOST_STEPS = 200
@@ -42,16 +47,21 @@ const LEAST_DAMPING = 1e-12
 const MOST_DAMPING = 1e12
 
 /** The nearest place to a start that meets the conditions (Newton, halved where it overshoots). */
-function feasible(problem: LeastSquaresProblem, start: Float64Array): Float64Array | undefined {
+export function feasible(
+  problem: LeastSquaresProblem,
+  start: Float64Array,
+  mobility?: Float64Array,
+): Float64Array | undefined {
   let x = start
   for (let step = 0; step < FEASIBLE_START_STEPS; step++) {
-    const conditions = new ConditionsAt(problem.conditions, x, problem.sizes(x))
+    const sizes = problem.sizes(x).map((size, each) => size * (mobility?.[each] ?? 1))
+    const conditions = new ConditionsAt(problem.conditions, x, sizes)
     const worst = largestOf(conditions.values)
     if (worst <= CONDITIONS_MET) return conditions.restored(x)
     const full = conditions.space.stepFor(conditions.values)
     let next: Float64Array | undefined
     for (let share = 1; share > 1e-4 && next === undefined; share /= 2) {
-      const tried = moved(x, full, -share, problem.sizes(x))
+      const tried = moved(x, full, -share, sizes)
       if (sumOfSquares(conditions.missAt(tried)) < sumOfSquares(conditions.values)) next = tried
     }
     if (next === undefined) return undefined
@@ -212,7 +222,7 @@ export function solveLeastSquares(
   start: Float64Array,
   options: SolverOptions = {},
 ): LeastSquaresSolution {
-  const found = feasible(problem, start)
+  const found = feasible(problem, start, options.mobility)
   const first = placeAt(problem, found ?? start)
   if (found === undefined || !Number.isFinite(first.chiSquare)) {
     return { ...first, iterations: 0, converged: false, conditionsMet: false }
