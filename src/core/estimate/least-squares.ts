@@ -27,6 +27,11 @@ export interface SolverOptions {
    * for one that is known, so that those that were guessed give way. 1 where omitted.
    */
   readonly mobility?: Float64Array
+  /**
+   * A sum of squares above which a place is worth no more work: the solver leaves it, not converged,
+   * where it falls by less than a tenth in a step.
+   */
+  readonly worthwhile?: number
 }
 
 const MOST_STEPS = 200
@@ -35,6 +40,7 @@ const SMALLEST_STEP = 1e-12
 const CONVERGED_STEP = 1e-8
 const NOTHING_LEFT = 1e-14
 const POLISHING_STEPS = 100
+const SLOW = 0.9
 const STILL_SHORTER = 0.95
 /** A predicted gain below this share of the sum of squares drowns in its rounding. */
 const FLAT = 1e-12
@@ -153,35 +159,49 @@ function stepBy(
   }
 }
 
+/** How a descent ended: at rest, where the sum of squares is too flat to tell, or for good. */
+interface Descent {
+  readonly place: Place
+  readonly iterations: number
+  readonly end: 'at rest' | 'flat' | 'given up'
+}
+
 /** Goes downhill until the sum of squares is too flat to tell one place from the next. */
-function descend(problem: LeastSquaresProblem, from: Place, most: number) {
+function descend(
+  problem: LeastSquaresProblem,
+  from: Place,
+  { iterations: most = MOST_STEPS, worthwhile = Number.POSITIVE_INFINITY }: SolverOptions,
+): Descent {
   let place = from
   let damping = FIRST_DAMPING
   let growth = 2
   for (let iterations = 0; iterations < most; iterations++) {
     const local = localAt(problem, place)
-    if (local.slopes.columns === 0) return { place, iterations, flat: true }
+    if (local.slopes.columns === 0) return { place, iterations, end: 'at rest' }
     const unit = largestSquare(local.slopes)
     for (;;) {
       const reduced = dampedStep(local.slopes, place.residuals, damping * unit)
       const step = stepBy(problem, place, local, reduced)
-      const isFlat = step.predicted <= FLAT * place.chiSquare || step.length <= SMALLEST_STEP
-      if (isFlat && (damping <= GAUSS_NEWTON || step.length <= SMALLEST_STEP)) {
-        return { place, iterations, flat: true }
+      const isStill = step.length <= SMALLEST_STEP
+      const isFlat = isStill || step.predicted <= FLAT * place.chiSquare
+      if (isFlat && damping <= GAUSS_NEWTON) {
+        return { place, iterations, end: isStill ? 'at rest' : 'flat' }
       }
       const gain = step.next ? (place.chiSquare - step.next.chiSquare) / step.predicted : -1
-      if (step.next && gain > 0) {
+      if (step.next && gain > 0 && !isFlat) {
+        const isSlow = step.next.chiSquare > SLOW * place.chiSquare
         place = step.next
+        if (isSlow && place.chiSquare > worthwhile) return { place, iterations, end: 'given up' }
         damping = Math.max(LEAST_DAMPING, damping * Math.max(1e-3, 1 - (2 * gain - 1) ** 3))
         growth = 2
         break
       }
-      if (damping > MOST_DAMPING) return { place, iterations, flat: false }
-      damping = isFlat ? damping / 10 : damping * growth
-      growth *= isFlat ? 1 : 2
+      if (damping > MOST_DAMPING) return { place, iterations, end: 'given up' }
+      damping = isFlat ? GAUSS_NEWTON : damping * growth
+      growth *= 2
     }
   }
-  return { place, iterations: most, flat: false }
+  return { place, iterations: most, end: 'given up' }
 }
 
 /** Gauss–Newton steps where the sum of squares no longer tells: they go on while they shorten. */
@@ -227,8 +247,10 @@ export function solveLeastSquares(
   if (found === undefined || !Number.isFinite(first.chiSquare)) {
     return { ...first, iterations: 0, converged: false, conditionsMet: false }
   }
-  const { place, iterations, flat } = descend(problem, first, options.iterations ?? MOST_STEPS)
-  if (!flat) return { ...place, iterations, converged: false, conditionsMet: true }
+  const { place, iterations, end } = descend(problem, first, options)
+  if (end !== 'flat') {
+    return { ...place, iterations, converged: end === 'at rest', conditionsMet: true }
+  }
   const polished = polish(problem, place)
   return {
     ...polished.place,

@@ -6,6 +6,7 @@ import { valueAt } from './layout'
 import { feasible, solveLeastSquares } from './least-squares'
 import { mirrorsOf } from './mirrors'
 import type { Observable, PhasorProblem } from './phasor-problem'
+import { sumOfSquares } from './problem'
 import { createRandom } from './random'
 import { startsOf } from './starts'
 
@@ -26,6 +27,8 @@ const MOST_CANDIDATES = 16
 /** A start so near to a solution, in sizes, leads to it. */
 const LEADS_TO = 1e-3
 
+/** How far, in chi-square a residual, the mirror of a solution may be from one itself. */
+const MIRRORS = 25
 /** By how much chi-square must fall for another drawing to fit better. */
 const BETTER = 1e-6
 
@@ -34,6 +37,18 @@ export function needsNegativeResistance(candidate: Candidate, problem: PhasorPro
   return problem.elements.some(
     ({ kind }, element) =>
       kind !== 'impedance' && candidate.isBelowZero({ kind: 'resistance', element }, 1),
+  )
+}
+
+function byFit(candidates: readonly Candidate[]): readonly Candidate[] {
+  return [...candidates].sort((a, b) => a.solution.chiSquare - b.solution.chiSquare)
+}
+
+/** The chi-square that the readings allow: its 95 % point, or the best one and one reading's 95 % point. */
+function mostAllowed({ linearisation, solution }: Candidate): number {
+  return Math.max(
+    chiSquarePoint(OUTSIDE, linearisation.degreesOfFreedom),
+    solution.chiSquare + chiSquarePoint(OUTSIDE, 1),
   )
 }
 
@@ -52,33 +67,57 @@ class Collection {
     this.#quantities = quantitiesOf(problem.phasors, problem.elements.length)
   }
 
-  /** Looks from a start, then from the mirrors of whatever is new. True where something was. */
-  add(start: Float64Array): boolean {
-    if (this.candidates.length >= MOST_CANDIDATES) return false
-    const found = this.#lookFrom(start)
-    if (found === undefined) return false
-    this.candidates.push(found)
-    if (needsNegativeResistance(found, this.#problem)) return true
-    const mirrors = mirrorsOf(this.#problem, this.#equations, found.solution.x, MOST_MIRRORS)
-    for (const place of mirrors) this.add(place)
-    return true
+  /** Looks from starts, the likeliest first, then from the mirrors of what is new. True where something was. */
+  add(starts: readonly Float64Array[], likely = Number.POSITIVE_INFINITY): boolean {
+    let isNew = false
+    for (const { x } of this.#onConditions(starts, likely)) {
+      if (this.candidates.length >= MOST_CANDIDATES) break
+      const found = this.#lookFrom(x)
+      if (found === undefined) continue
+      isNew = true
+      this.candidates.push(found)
+      if (found.solution.chiSquare > this.#worthwhile) continue
+      if (needsNegativeResistance(found, this.#problem)) continue
+      const mirrors = mirrorsOf(this.#problem, this.#equations, found.solution.x, MOST_MIRRORS)
+      this.add(mirrors, found.solution.chiSquare + MIRRORS * this.#equations.residuals.count)
+    }
+    return isNew
   }
 
-  #lookFrom(start: Float64Array): Candidate | undefined {
-    const place = feasible(this.#equations, start, this.#mobility)
-    if (place === undefined || this.#leadsToKnown(place)) return undefined
-    const solution = solveLeastSquares(this.#equations, place)
+  /** The starts brought onto the conditions, those that are likely, the best first. */
+  #onConditions(starts: readonly Float64Array[], likely: number) {
+    return starts
+      .flatMap((start) => {
+        const x = feasible(this.#equations, start, this.#mobility)
+        if (x === undefined) return []
+        const chiSquare = sumOfSquares(this.#equations.residuals.evaluate(x))
+        return chiSquare <= likely ? [{ x, chiSquare }] : []
+      })
+      .sort((a, b) => a.chiSquare - b.chiSquare)
+  }
+
+  /** The chi-square above which a drawing would not be one that the readings allow. */
+  get #worthwhile(): number {
+    const [best] = byFit(this.candidates)
+    return best ? mostAllowed(best) : Number.POSITIVE_INFINITY
+  }
+
+  #lookFrom(place: Float64Array): Candidate | undefined {
+    if (this.#leadsToKnown(place)) return undefined
+    const options = { worthwhile: this.#worthwhile }
+    const solution = solveLeastSquares(this.#equations, place, options)
     if (!solution.conditionsMet || !Number.isFinite(solution.chiSquare)) return undefined
-    if (this.#isBackToFront(solution.x)) {
-      return this.#lookFrom(
-        solution.x.map((value, k) => (k < 2 * this.#problem.phasors ? -value : value)),
-      )
-    }
+    if (solution.chiSquare > options.worthwhile) return undefined
+    if (this.#isBackToFront(solution.x)) return this.#lookFrom(this.#turned(solution.x))
     const candidate = this.#unfolded(new Candidate(this.#equations, solution))
     const isKnown = this.candidates.some((known) =>
       isSameSolution(known, candidate, this.#quantities),
     )
     return isKnown ? undefined : candidate
+  }
+
+  #turned(x: Float64Array): Float64Array {
+    return x.map((value, column) => (column < 2 * this.#problem.phasors ? -value : value))
   }
 
   /** A flat drawing is a saddle where one that is not flat fits better: then that one. */
@@ -115,34 +154,25 @@ class Collection {
 function collect(problem: PhasorProblem, equations: PhasorEquations): readonly Candidate[] {
   const first = startsOf(problem, equations)
   const collection = new Collection(problem, equations, first.mobility)
-  for (const place of first.places) collection.add(place)
+  collection.add(first.places)
   const isSure = !first.isGuessed && collection.candidates.length > 0
   let sinceNew = 0
   for (let round = 1; round <= MOST_ROUNDS && sinceNew < ENOUGH_ROUNDS && !isSure; round++) {
     const { places } = startsOf(problem, equations, round)
-    const news = places.filter((place) => collection.add(place))
-    sinceNew = news.length > 0 ? 0 : sinceNew + 1
+    sinceNew = collection.add(places) ? 0 : sinceNew + 1
   }
   return collection.candidates
 }
 
 /**
- * Those that the readings allow: chi-square within its 95 % point, or no further from the smallest
- * one than one reading's 95 % point. A drawing that needs a negative resistance is left out where
- * there is one that does not.
+ * Those that the readings allow. A drawing that needs a negative resistance is left out where there
+ * is one that does not.
  */
 function allowed(candidates: readonly Candidate[], problem: PhasorProblem): readonly Candidate[] {
   const possible = candidates.filter((each) => !needsNegativeResistance(each, problem))
-  const sorted = [...(possible.length > 0 ? possible : candidates)].sort(
-    (a, b) => a.solution.chiSquare - b.solution.chiSquare,
-  )
-  const best = sorted[0]
-  if (best === undefined) return []
-  const most = Math.max(
-    chiSquarePoint(OUTSIDE, best.linearisation.degreesOfFreedom),
-    best.solution.chiSquare + chiSquarePoint(OUTSIDE, 1),
-  )
-  return sorted.filter(({ solution }) => solution.chiSquare <= most)
+  const sorted = byFit(possible.length > 0 ? possible : candidates)
+  const [best] = sorted
+  return best ? sorted.filter(({ solution }) => solution.chiSquare <= mostAllowed(best)) : []
 }
 
 /**
