@@ -16,17 +16,16 @@ export class Candidate {
   readonly equations: PhasorEquations
   readonly solution: LeastSquaresSolution
   readonly linearisation: Linearisation
-  /** The linearisation beside a place where more is fixed than its own slopes show; else the same. */
-  readonly #beside: Linearisation
+  /** A place beside the solution, where nothing is open: there only what is fixed everywhere is fixed. */
+  readonly #beside: Beside | undefined
 
   constructor(equations: PhasorEquations, solution: LeastSquaresSolution) {
     this.equations = equations
     this.solution = solution
     this.linearisation = new Linearisation(equations, solution.x, solution.residuals)
-    this.#beside = this.linearisation
     if (this.linearisation.openDirections > 0) {
-      const beside = linearisedBeside(equations, solution)
-      if (beside !== undefined && beside.rank > this.linearisation.rank) this.#beside = beside
+      const x = besides(equations, solution.x, createRandom(1))
+      if (x) this.#beside = { x, at: linearisedAt(equations, x) }
     }
   }
 
@@ -35,7 +34,7 @@ export class Candidate {
    * so that linear limits say nothing there.
    */
   get isFolded(): boolean {
-    return this.#beside !== this.linearisation
+    return this.#beside !== undefined && this.#beside.at.rank > this.linearisation.rank
   }
 
   /** The value of an observable, with its gradient by the unknowns. */
@@ -59,10 +58,31 @@ export class Candidate {
     return isFixed && sign * value < -3 * uncertaintyOf(shares)
   }
 
-  /** Whether the observations and conditions fix a quantity with this gradient. */
-  isFixed(gradient: Float64Array): boolean {
-    return this.#beside.spreadOf(gradient).isFixed
+  /**
+   * Whether the observations and conditions fix an observable. Where something is open, what happens
+   * to have no slope just here (an open angle that was guessed in line) does not count as fixed.
+   */
+  isFixed(observable: Observable): boolean {
+    const { x, at } = this.#beside ?? { x: this.solution.x, at: this.linearisation }
+    return at.spreadOf(gradientAt(this.equations, observable, x).gradient).isFixed
   }
+}
+
+interface Beside {
+  readonly x: Float64Array
+  readonly at: Linearisation
+}
+
+function gradientAt(equations: PhasorEquations, observable: Observable, x: Float64Array) {
+  const gradient = new Float64Array(equations.unknowns)
+  const value = equations.observables.valueOf(observable, x, (column, slope) => {
+    if (column !== undefined) gradient[column] = (gradient[column] ?? 0) + slope
+  })
+  return { value, gradient }
+}
+
+function linearisedAt(equations: PhasorEquations, x: Float64Array): Linearisation {
+  return new Linearisation(equations, x, equations.residuals.evaluate(x))
 }
 
 /** A place near x, moved every way at once by a fiftieth of each unknown's size, that meets the conditions. */
@@ -75,14 +95,6 @@ export function besides(
   const aside = x.map((value, each) => value + BESIDE * (2 * random() - 1) * (sizes[each] ?? 1))
   const conditions = new ConditionsAt(equations.conditions, x, sizes)
   return conditions.restored(aside) ?? feasible(equations, aside)
-}
-
-function linearisedBeside(
-  equations: PhasorEquations,
-  { x }: LeastSquaresSolution,
-): Linearisation | undefined {
-  const place = besides(equations, x, createRandom(1))
-  return place && new Linearisation(equations, place, equations.residuals.evaluate(place))
 }
 
 /** Whether two places are the same to rounding. */
@@ -112,8 +124,8 @@ export function isSameSolution(
   if (isSamePlace(a.solution.x, b.solution.x, sizes)) return true
   if (a.linearisation.openDirections === 0 && b.linearisation.openDirections === 0) return false
   return quantities.every((observable) => {
+    if (!a.isFixed(observable) || !b.isFixed(observable)) return true
     const [one, other] = [a.gradientOf(observable), b.gradientOf(observable)]
-    if (!a.isFixed(one.gradient) || !b.isFixed(other.gradient)) return true
     if (observable.kind === 'angle') {
       const apart = Math.abs(one.value - other.value) % 360
       const size = Math.hypot(

@@ -76,7 +76,7 @@ export class Drawing {
   /** Best value and uncertainty; nothing where the observations leave the quantity open. */
   find(observable: Observable): Found | undefined {
     const { value, gradient } = this.#candidate.gradientOf(observable)
-    if (!Number.isFinite(value) || !this.#candidate.isFixed(gradient)) return undefined
+    if (!Number.isFinite(value) || !this.#candidate.isFixed(observable)) return undefined
     if (observable.kind === 'angle' && !this.#hasAngle(observable.phasor)) return undefined
     const best = observable.kind === 'angle' ? wrapDegrees(value) : value
     if (this.#draws) return this.#foundByDraws(observable, best, this.#draws)
@@ -90,7 +90,7 @@ export class Drawing {
     const observable = { kind: 'magnitude', phasor } as const
     const { value, gradient } = this.#candidate.gradientOf(observable)
     if (value === 0) return false
-    if (!this.#candidate.isFixed(gradient)) return true
+    if (!this.#candidate.isFixed(observable)) return true
     const parts = this.partsOf(this.sharesOf(gradient))
     return value > combinedUncertainty(parts) * coverageFactor(parts)
   }
@@ -131,10 +131,13 @@ export class Drawing {
 
   /** Covariance of a phasor's two parts; nothing where one of them is open. */
   tipCovariance(phasor: number): TipCovariance | undefined {
-    const real = this.#candidate.gradientOf({ kind: 'real', phasor }).gradient
-    const imaginary = this.#candidate.gradientOf({ kind: 'imaginary', phasor }).gradient
-    if (!this.#candidate.isFixed(real) || !this.#candidate.isFixed(imaginary)) return undefined
-    const [a, b] = [this.sharesOf(real), this.sharesOf(imaginary)]
+    const parts = [
+      { kind: 'real', phasor },
+      { kind: 'imaginary', phasor },
+    ] as const
+    if (parts.some((part) => !this.#candidate.isFixed(part))) return undefined
+    const [a, b] = parts.map((part) => this.sharesOf(this.#candidate.gradientOf(part).gradient))
+    if (a === undefined || b === undefined) return undefined
     let both = 0
     for (let each = 0; each < a.length; each++) both += (a[each] ?? 0) * (b[each] ?? 0)
     return { real: uncertaintyOf(a) ** 2, imaginary: uncertaintyOf(b) ** 2, both }

@@ -131,7 +131,7 @@ interface Step {
 
 /** The whole Gauss–Newton step: none where the residuals do not depend on the unknowns. */
 function gaussNewtonStep(local: Local, residuals: Float64Array): Float64Array {
-  const fixed = fixedDirections(local.slopes, local.lengths)
+  const fixed = fixedDirections(local.slopes, local.lengths).directions
   if (fixed.columns === 0) return new Float64Array(local.slopes.columns)
   const right = Matrix.columnVector([...residuals]).neg()
   const solved = new QrDecomposition(local.slopes.mmul(fixed)).solve(right)

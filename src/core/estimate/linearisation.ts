@@ -31,6 +31,8 @@ export class Linearisation {
   readonly openDirections: number
   /** How many independent conditions there are. */
   readonly conditionRank: number
+  /** How much worse the worst fixed direction is fixed than the best, every observation counting alike. */
+  readonly conditionNumber: number
   /** Observations less what they fix: how often one checks the others. */
   readonly degreesOfFreedom: number
   /** Each observation's share in that, 0 … 1: 0 where nothing checks it. They add up to `degreesOfFreedom`. */
@@ -59,7 +61,9 @@ export class Linearisation {
     this.conditionRank = conditions.space.rank
     this.#free = conditions.space.free
     const slopes = derivatives.mmul(this.#free)
-    this.#fixed = fixedDirections(slopes, lengths)
+    const fixed = fixedDirections(slopes, lengths)
+    this.#fixed = fixed.directions
+    this.conditionNumber = fixed.condition
     this.rank = this.#fixed.columns
     this.openDirections = this.#free.columns - this.rank
     const { adjusted, spread } = adjustment(slopes, this.#fixed)
