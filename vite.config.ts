@@ -22,5 +22,8 @@ export default defineConfig({
   test: {
     include: ['test/**/*.test.{ts,tsx}'],
     environment: 'node',
+    // For what hangs, not for what is slow: a busy machine fails no test.
+    testTimeout: 120_000,
+    hookTimeout: 120_000,
   },
 })

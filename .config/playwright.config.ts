@@ -10,6 +10,9 @@ export default defineConfig({
   workers: 2,
   fullyParallel: true,
   retries: 0,
+  // For what hangs, not for what is slow: a busy machine fails no test.
+  timeout: 120_000,
+  expect: { timeout: 20_000 },
   reporter: 'list',
   use: {
     // Known once the server is up: it prints its address.

@@ -6,13 +6,12 @@ import { commandFile, run } from './run.mjs'
 
 /**
  * A step of `npm test`: what it is called, what it does (true: all is well), and, where it runs
- * tests, the report it leaves and how to count in it.
+ * tests, the JSON report it leaves and how to count in it.
  *
  * @typedef {object} Check
  * @property {string} name
  * @property {() => Promise<boolean>} isWell
- * @property {string} [report]
- * @property {(report: any) => import('./counts.mjs').Counts} [count]
+ * @property {{ report: string, count: (report: string) => import('./counts.mjs').Counts }} [tests]
  */
 
 /**
@@ -50,8 +49,7 @@ export function createChecks(reports) {
           '--reporter=json',
           `--outputFile.json=${unit}`,
         ]),
-      report: unit,
-      count: countsOfVitest,
+      tests: { report: unit, count: countsOfVitest },
     },
     { name: 'production build', isWell: () => installed('vite', 'vite', ['build']) },
     {
@@ -68,8 +66,7 @@ export function createChecks(reports) {
           ],
           { PLAYWRIGHT_JSON_OUTPUT_FILE: endToEnd },
         ),
-      report: endToEnd,
-      count: countsOfPlaywright,
+      tests: { report: endToEnd, count: countsOfPlaywright },
     },
   ]
 }

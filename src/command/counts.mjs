@@ -7,10 +7,11 @@
 /**
  * The counts in a JSON report of vitest.
  *
- * @param {{ numPassedTests: number, numFailedTests: number, numPendingTests: number, numTodoTests: number }} report
+ * @param {string} text
  * @returns {Counts}
  */
-export function countsOfVitest(report) {
+export function countsOfVitest(text) {
+  const report = JSON.parse(text)
   return {
     passed: report.numPassedTests,
     failed: report.numFailedTests,
@@ -22,10 +23,11 @@ export function countsOfVitest(report) {
  * The counts in a JSON report of Playwright. A test that failed at first and then passed counts as
  * failed.
  *
- * @param {{ stats: { expected: number, unexpected: number, flaky: number, skipped: number } }} report
+ * @param {string} text
  * @returns {Counts}
  */
-export function countsOfPlaywright({ stats }) {
+export function countsOfPlaywright(text) {
+  const { stats } = JSON.parse(text)
   return {
     passed: stats.expected,
     failed: stats.unexpected + stats.flaky,

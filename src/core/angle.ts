@@ -1,4 +1,5 @@
 import type { Complex } from './complex'
+import { cosineNearAxis, quarterOf, sineNearAxis } from './unit-circle'
 
 const RADIANS_PER_DEGREE = Math.PI / 180
 
@@ -17,7 +18,8 @@ export function radiansFromDegrees(degrees: number): number {
  * NaN where the angle is not finite.
  */
 export function wrapDegrees(degrees: number): number {
-  const rest = degrees % 360
+  // The remainder is slow, and hardly ever needed.
+  const rest = degrees > -360 && degrees < 360 ? degrees : degrees % 360
   if (rest > 180) return rest - 360
   if (rest <= -180) return rest + 360
   return rest + 0
@@ -28,27 +30,22 @@ export function differenceDegrees(a: number, b: number): number {
   return wrapDegrees(wrapDegrees(a) - wrapDegrees(b))
 }
 
-/** The nearest multiple of 90° in −2 … 2, and what is left of the angle, at most 45° either way. */
-function quadrantOf(degrees: number): { readonly quarter: number; readonly rest: number } {
-  const wrapped = wrapDegrees(degrees)
-  const quarter = Math.round(wrapped / 90)
-  return { quarter, rest: (wrapped - 90 * quarter) * RADIANS_PER_DEGREE }
-}
-
 /** The sine of an angle in degrees: exactly 0, 1 or −1 at every multiple of 90°, however many turns away. */
 export function sinDegrees(degrees: number): number {
-  const { quarter, rest } = quadrantOf(degrees)
-  if (quarter === 1) return Math.cos(rest)
-  if (quarter === -1) return -Math.cos(rest)
-  return (quarter === 0 ? Math.sin(rest) : -Math.sin(rest)) + 0
+  const wrapped = wrapDegrees(degrees)
+  const quarter = quarterOf(wrapped)
+  const rest = wrapped - 90 * quarter
+  const size = quarter % 2 === 0 ? sineNearAxis(rest) : cosineNearAxis(rest)
+  return (quarter === 0 || quarter === 1 ? size : -size) + 0
 }
 
 /** The cosine of an angle in degrees: exactly 0, 1 or −1 at every multiple of 90°, however many turns away. */
 export function cosDegrees(degrees: number): number {
-  const { quarter, rest } = quadrantOf(degrees)
-  if (quarter === 1) return -Math.sin(rest) + 0
-  if (quarter === -1) return Math.sin(rest) + 0
-  return quarter === 0 ? Math.cos(rest) : -Math.cos(rest)
+  const wrapped = wrapDegrees(degrees)
+  const quarter = quarterOf(wrapped)
+  const rest = wrapped - 90 * quarter
+  const size = quarter % 2 === 0 ? cosineNearAxis(rest) : sineNearAxis(rest)
+  return (quarter === 0 || quarter === -1 ? size : -size) + 0
 }
 
 /**

@@ -70,7 +70,10 @@ export type TextItem = ItemCommon & {
 /** A primitive in millimetres, y up, with its style resolved: renderers decide nothing. */
 export type Item = LinesItem | PathItem | ArcItem | TextItem
 
-/** An arrow as it lies on the paper. */
+/**
+ * An arrow as it lies on the paper. The resultant of a sum that must close is listed like any other,
+ * and drawn as a gap alone: what it is short of its start.
+ */
 export interface PlacedArrow {
   /** Unique in the scene and stable while values change: `term:s1:0`, `measured:s1`, `resultant:s1`, `loose:V1`. */
   readonly key: string
@@ -94,6 +97,8 @@ export interface Scene {
   readonly origin: Place
   /** Only of the quantities that are drawn. */
   readonly unitsPerCentimetre: UnitsPerCentimetre
+  /** Where figures start that the layout set apart from the origin: `sum:s2`, `loose:I`. */
+  readonly starts: ReadonlyMap<string, Place>
   readonly title: string
   readonly description: string
   /** How many labels found no free place. */

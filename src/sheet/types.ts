@@ -1,3 +1,5 @@
+import type { Quantity, Typed } from '../core'
+
 /**
  * The document of the program. Units are SI (V, A, Ω, H, F, W, var, Hz, s), values rms, angles in
  * degrees in (−180°, 180°] and anticlockwise positive, so that a positive angle leads the reference;
@@ -5,21 +7,12 @@
  * is an `Edit`, which makes a new sheet.
  */
 
+export type { Quantity, Typed } from '../core'
+
 /** A name inside a sheet: a letter, then up to fifteen letters, digits or underscores. */
 export type Id = string
 /** The `Id` of a phasor. */
 export type PhasorId = Id
-
-/**
- * What someone typed. `text` keeps the digits as typed ("23.40" shows hundredths) and always agrees
- * with `value`. The true value lies within ± `limit` for certain: 0 is exact; omitted, it was not
- * stated, and the sheet's `assumed` serves.
- */
-export interface Typed {
-  readonly value: number
-  readonly text?: string
-  readonly limit?: number
-}
 
 /** What a display showed: a string keeps the digits as read. */
 export type Shown = number | string
@@ -29,9 +22,6 @@ export interface Place {
   readonly x: number
   readonly y: number
 }
-
-/** What kind of quantity a phasor is: it settles the unit, the scale and the shape of the arrow. */
-export type Quantity = 'voltage' | 'current' | 'impedance' | 'power' | 'other'
 
 /** Where the tail of a phasor lies that is no term of a sum: a place, or another phasor's tip. */
 export type Tail = Place | { readonly tipOf: PhasorId }

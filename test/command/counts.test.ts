@@ -6,24 +6,30 @@ import {
   formatCounts,
 } from '../../src/command/counts.mjs'
 
+const unit = JSON.stringify({
+  numPassedTests: 40,
+  numFailedTests: 1,
+  numPendingTests: 2,
+  numTodoTests: 1,
+})
+
+function endToEnd(stats: { expected: number; unexpected: number; flaky: number; skipped: number }) {
+  return JSON.stringify({ stats })
+}
+
 describe('the counts of a run', () => {
   test('are added up over both kinds of tests', () => {
-    const unit = countsOfVitest({
-      numPassedTests: 40,
-      numFailedTests: 1,
-      numPendingTests: 2,
-      numTodoTests: 1,
+    const report = endToEnd({ expected: 10, unexpected: 1, flaky: 0, skipped: 1 })
+    expect(addCounts(countsOfVitest(unit), countsOfPlaywright(report))).toEqual({
+      passed: 50,
+      failed: 2,
+      skipped: 4,
     })
-    const endToEnd = countsOfPlaywright({
-      stats: { expected: 10, unexpected: 1, flaky: 0, skipped: 1 },
-    })
-    expect(addCounts(unit, endToEnd)).toEqual({ passed: 50, failed: 2, skipped: 4 })
   })
 
   test('a test that passes only at the second try has failed', () => {
-    expect(
-      countsOfPlaywright({ stats: { expected: 9, unexpected: 0, flaky: 1, skipped: 0 } }),
-    ).toEqual({ passed: 9, failed: 1, skipped: 0 })
+    const report = endToEnd({ expected: 9, unexpected: 0, flaky: 1, skipped: 0 })
+    expect(countsOfPlaywright(report)).toEqual({ passed: 9, failed: 1, skipped: 0 })
   })
 
   test('are said in one line, with the skipped ones only where there are any', () => {

@@ -1,0 +1,53 @@
+import type { KeyboardEvent } from 'react'
+import { isOffPaper, type Scene } from '../../drawing'
+import { usePageStore } from '../store'
+
+/** The verbs that lie on the desk beside the paper. */
+export function BoardVerbs(properties: {
+  readonly scene: Scene
+  /** Arrows move the sheet, + and − zoom, 0 shows all of it. */
+  readonly onKeyDown: (event: KeyboardEvent) => void
+  readonly onFit: () => void
+  readonly onZoom: (factor: number) => void
+}) {
+  const { scene, onKeyDown, onFit, onZoom } = properties
+  const store = usePageStore()
+  const pinned = store.getState().history.sheet.drawing
+  const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
+  const refit = () =>
+    store
+      .getState()
+      .edit({ kind: 'set-drawing', drawing: { origin: null, unitsPerCentimetre: null } })
+
+  return (
+    <div
+      className="board-verbs"
+      role="toolbar"
+      aria-label="View of the sheet; arrow keys move it"
+      onKeyDown={onKeyDown}
+    >
+      {scene.labelsLeftOut > 0 && (
+        <p className="board-remark">
+          {scene.labelsLeftOut === 1
+            ? '1 label left out: no free place'
+            : `${scene.labelsLeftOut} labels left out: no free place`}
+        </p>
+      )}
+      {isOffPaper(scene) && <p className="board-remark">The drawing reaches beyond its frame</p>}
+      {isPinned && (
+        <button type="button" className="verb" onClick={refit}>
+          Fit drawing to paper
+        </button>
+      )}
+      <button type="button" className="verb small" aria-label="Smaller" onClick={() => onZoom(0.8)}>
+        −
+      </button>
+      <button type="button" className="verb small" aria-label="Larger" onClick={() => onZoom(1.25)}>
+        +
+      </button>
+      <button type="button" className="verb" onClick={onFit}>
+        Whole sheet
+      </button>
+    </div>
+  )
+}

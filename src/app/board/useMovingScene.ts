@@ -1,0 +1,83 @@
+import { useEffect, useMemo, useRef } from 'react'
+import {
+  type Displacement,
+  displacementBetween,
+  type Item,
+  layout,
+  type Scene,
+  type Theme,
+} from '../../drawing'
+import type { Place } from '../../sheet'
+import { answerOf, usePage } from '../store'
+
+/** The part of the scene that a drag changes, apart from what stands still. */
+export interface MovingScene {
+  /** The keys of all arrows that the drag touches. */
+  readonly moved: ReadonlySet<string>
+  /** Items drawn anew in each frame. */
+  readonly live: readonly Item[]
+  /** Items that keep their shape, and how far they have been carried, in millimetres. */
+  readonly carried: readonly {
+    readonly key: string
+    readonly items: readonly Item[]
+    readonly by: Place
+  }[]
+  /** The scene as the draft has it; only the live arrows have items. */
+  readonly after: Scene | undefined
+}
+
+interface Sorted extends Displacement {
+  readonly moved: ReadonlySet<string>
+  readonly groups: readonly { readonly key: string; readonly items: readonly Item[] }[]
+}
+
+const atRest: MovingScene = { moved: new Set(), live: [], carried: [], after: undefined }
+const none: ReadonlySet<string> = new Set()
+
+/** The moving part of the scene while a drag that began from `base` has a draft. */
+export function useMovingScene(base: Scene | undefined, theme: Theme): MovingScene {
+  const draft = usePage((state) => state.draft)
+  const sorted = useRef<Sorted>(undefined)
+  useEffect(() => {
+    if (!base) sorted.current = undefined
+  }, [base])
+
+  return useMemo(() => {
+    if (!base || !draft) return atRest
+    const { evaluation } = answerOf(draft.sheet)
+    const options = { theme, labels: false, frozen: base }
+    sorted.current ??= maybeSort(base, layout(draft.sheet, evaluation, { ...options, only: none }))
+    if (!sorted.current) return atRest
+    const { live, moved, groups } = sorted.current
+    const after = layout(draft.sheet, evaluation, { ...options, only: live })
+    return {
+      moved,
+      live: after.items.filter((item) => item.arrow !== undefined && live.has(item.arrow)),
+      carried: groups.map(({ key, items }) => ({ key, items, by: carriedBy(base, after, key) })),
+      after,
+    }
+  }, [base, draft, theme])
+}
+
+/** What moves is settled by the first frame in which anything does, and holds for the whole drag. */
+function maybeSort(base: Scene, after: Scene): Sorted | undefined {
+  const { live, carried } = displacementBetween(base, after)
+  if (live.size === 0 && carried.length === 0) return undefined
+  const groups = carried.map((keys) => ({
+    key: [...keys][0] as string,
+    items: base.items.filter((item) => item.arrow !== undefined && keys.has(item.arrow)),
+  }))
+  return {
+    live,
+    carried,
+    groups,
+    moved: new Set([...live, ...carried.flatMap((keys) => [...keys])]),
+  }
+}
+
+function carriedBy(base: Scene, after: Scene, key: string): Place {
+  const before = base.arrows.find((arrow) => arrow.key === key)
+  const now = after.arrows.find((arrow) => arrow.key === key)
+  if (!before || !now) return { x: 0, y: 0 }
+  return { x: now.from.x - before.from.x, y: now.from.y - before.from.y }
+}

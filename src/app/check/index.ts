@@ -1,0 +1,1 @@
+export { CheckLine } from './CheckLine'

@@ -1,0 +1,212 @@
+import {
+  differenceDegrees,
+  formatAngle,
+  formatNumber,
+  formatPolar,
+  formatQuantity,
+  unitOf,
+} from '../../core'
+import { type Digits, digitsOf, digitsOfResult, formatScale, readingsByPhasor } from '../../drawing'
+import type { Evaluation, Sheet, Sum, SumEvaluation } from '../../sheet'
+import { labelOf, quantityOfSum } from '../store'
+
+/** One figure of the check line. */
+export interface CheckFigure {
+  readonly name: string
+  readonly figure: string
+  readonly under: string
+}
+
+/** What the check line says of a sum. */
+export interface CheckText {
+  readonly drawn: string
+  readonly scale: string
+  readonly figures: readonly CheckFigure[]
+}
+
+interface Context {
+  readonly sheet: Sheet
+  readonly sum: Sum
+  readonly found: SumEvaluation
+  readonly unit: string
+  readonly magnitude: Digits
+  readonly angle: Digits
+  /** Units for each millimetre of paper; undefined where nothing of the quantity is drawn. */
+  readonly perMillimetre: number | undefined
+}
+
+/**
+ * The check line of a sum, in words and figures: calculated, measured, and the differences in the
+ * unit, per cent, degrees and millimetres of paper. `unitsPerCentimetre` is that of the drawing.
+ */
+export function checkText(
+  sheet: Sheet,
+  evaluation: Evaluation,
+  sum: Sum,
+  unitsPerCentimetre: number | undefined,
+): CheckText {
+  const quantity = quantityOfSum(sheet, sum)
+  const count = sum.terms.length
+  const head = {
+    drawn:
+      sum.arrangement === 'from-origin' ? 'Sum drawn from one origin' : 'Sum drawn tip to tail',
+    scale: [
+      count === 1 ? '1 phasor' : `${count} phasors`,
+      ...(unitsPerCentimetre === undefined ? [] : [formatScale(unitsPerCentimetre, quantity)]),
+    ].join(' · '),
+  }
+  const found = evaluation.sums.find(({ id }) => id === sum.id)
+  if (!found?.resultant) return { ...head, figures: [unresolved(sheet, evaluation, sum)] }
+  const context: Context = {
+    sheet,
+    sum,
+    found,
+    unit: unitOf(quantity),
+    ...digitsOfSum(sheet, sum),
+    perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
+  }
+  return {
+    ...head,
+    figures: [
+      calculated(context),
+      ...(sum.equals === 0 ? [] : [measured(context)]),
+      difference(context),
+    ],
+  }
+}
+
+function unresolved(sheet: Sheet, evaluation: Evaluation, sum: Sum): CheckFigure {
+  if (sum.terms.length === 0) {
+    return { name: 'Calculated', figure: '–', under: 'Add terms to the sum to see its resultant.' }
+  }
+  const open = sum.terms
+    .map(({ phasor }) => evaluation.phasors.find(({ id }) => id === phasor))
+    .filter((term) => term && (term.magnitude === undefined || term.angle === undefined))
+    .map((term) => labelOf(sheet, term?.id ?? ''))
+  return {
+    name: 'Calculated',
+    figure: '–',
+    under: `Still open: ${[...new Set(open)].join(', ')}. Type or read magnitude and angle.`,
+  }
+}
+
+function calculated({ found, unit, magnitude, angle, perMillimetre }: Context): CheckFigure {
+  const resultant = found.resultant ?? { magnitude: 0, angle: 0 }
+  return {
+    name: 'Calculated',
+    figure:
+      resultant.magnitude === 0
+        ? formatQuantity(0, unit, magnitude)
+        : formatPolar(resultant, unit, {
+            magnitude: digitsOfResult(resultant.magnitude, magnitude, 2),
+            angle,
+          }),
+    under:
+      perMillimetre === undefined
+        ? ''
+        : `${millimetres(resultant.magnitude / perMillimetre)} on paper`,
+  }
+}
+
+function measured({ sheet, sum, found, unit, magnitude, angle }: Context): CheckFigure {
+  const name = 'Measured'
+  if (typeof sum.equals !== 'string') {
+    return { name, figure: '–', under: 'Choose what the sum must equal to compare it.' }
+  }
+  const label = labelOf(sheet, sum.equals)
+  const { magnitude: size, angle: turn } = found.measured ?? {}
+  if (size === undefined) {
+    return { name, figure: '–', under: `${label} has no magnitude yet: type it or read it.` }
+  }
+  if (turn === undefined) {
+    return {
+      name,
+      figure: formatQuantity(size, unit, magnitude),
+      under: `${label} has no angle yet, so only the size is compared.`,
+    }
+  }
+  const read = sheet.readings?.some((reading) => reading.of === sum.equals && !reading.struck)
+  return {
+    name,
+    figure: formatPolar({ magnitude: size, angle: turn }, unit, { magnitude, angle }),
+    under: `${label}, ${read ? 'read on a meter' : 'as typed'}`,
+  }
+}
+
+function difference(context: Context): CheckFigure {
+  const { sum, found, unit, magnitude, angle, perMillimetre } = context
+  const { resultant, measured: seen, closingError } = found
+  if (closingError) {
+    const like = Math.max(resultant?.magnitude ?? 0, seen?.magnitude ?? 0) || closingError.magnitude
+    const digits = { ...digitsOfResult(closingError.magnitude, magnitude, 1), like }
+    const size = formatQuantity(closingError.magnitude, unit, digits)
+    const under = [
+      `${formatNumber(closingError.percent, 1)} %`,
+      ...(perMillimetre === undefined
+        ? []
+        : [`${millimetres(closingError.magnitude / perMillimetre)} on paper`]),
+    ]
+    if (
+      sum.equals === 0 ||
+      !resultant ||
+      seen?.magnitude === undefined ||
+      seen.angle === undefined
+    ) {
+      return {
+        name: 'Closing error',
+        figure: size,
+        under: `${under.join(', ')}; it should be nothing`,
+      }
+    }
+    return {
+      name: 'Measured less calculated',
+      figure: [
+        signed(formatQuantity(seen.magnitude - resultant.magnitude, unit, digits)),
+        signed(formatAngle(differenceDegrees(seen.angle, resultant.angle), angle)),
+      ].join(', '),
+      under: `gap ${size}, ${under.join(', ')}`,
+    }
+  }
+  const name = 'Measured less calculated'
+  if (resultant && seen?.magnitude !== undefined) {
+    const by = seen.magnitude - resultant.magnitude
+    const percent =
+      resultant.magnitude === 0
+        ? ''
+        : `${signed(formatNumber((100 * by) / resultant.magnitude, 1))} %`
+    return { name, figure: signed(formatQuantity(by, unit, magnitude)), under: percent }
+  }
+  return { name, figure: '–', under: 'Nothing checks this sum yet.' }
+}
+
+/** The digits of a sum: the finest that any of its terms, or what it must equal, was given with. */
+function digitsOfSum(sheet: Sheet, sum: Sum): { magnitude: Digits; angle: Digits } {
+  const readings = readingsByPhasor(sheet)
+  const ids = new Set([...sum.terms.map(({ phasor }) => phasor), sum.equals])
+  const all = sheet.phasors
+    .filter(({ id }) => ids.has(id))
+    .map((phasor) => digitsOf(phasor, readings))
+  return {
+    magnitude: all.map((each) => each.magnitude).reduce(finer, {}),
+    angle: { resolution: Math.min(0.1, ...all.flatMap(({ angle }) => angle.resolution ?? [])) },
+  }
+}
+
+function finer(one: Digits, other: Digits): Digits {
+  const { resolution: first } = one
+  const { resolution: second } = other
+  if (first === undefined) return other
+  return second === undefined ? one : { resolution: Math.min(first, second) }
+}
+
+function signed(text: string): string {
+  return /^[−0]/.test(text) && !/[1-9]/.test(text)
+    ? text.replace('−', '')
+    : text.startsWith('−')
+      ? text
+      : `+${text}`
+}
+
+function millimetres(length: number): string {
+  return `${formatNumber(length, 1)} mm`
+}

@@ -1,0 +1,2 @@
+export { DrawingSettings } from './DrawingSettings'
+export { TitleBlock } from './TitleBlock'

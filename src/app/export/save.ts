@@ -1,0 +1,61 @@
+import { svg } from '../../drawing'
+import { serializeSheet } from '../../sheet'
+import type { Store } from '../store'
+import { fileNameOf } from './file-name'
+import { printedScene, toPng } from './picture'
+
+/** Saves the drawing as an SVG, true to scale, which carries its sheet. */
+export function saveSvg(store: Store): void {
+  const { sheet } = store.getState().history
+  const text = svg(printedScene(sheet), serializeSheet(sheet))
+  const name = fileNameOf(sheet, 'svg')
+  download(new Blob([text], { type: 'image/svg+xml' }), name)
+  tell(store, `Saved “${name}”. Its millimetres are true, and it opens here again.`)
+}
+
+/** Saves the drawing as a PNG at 300 dots an inch. */
+export async function savePng(store: Store): Promise<void> {
+  const { sheet } = store.getState().history
+  await attempt(store, 'No picture was saved', async () => {
+    const name = fileNameOf(sheet, 'png')
+    download(await toPng(sheet), name)
+    tell(store, `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.`)
+  })
+}
+
+/** Puts the drawing on the clipboard as a picture. */
+export async function copyPicture(store: Store): Promise<void> {
+  const { sheet } = store.getState().history
+  await attempt(store, 'The picture was not copied', async () => {
+    if (!('ClipboardItem' in window))
+      throw new Error('this browser keeps pictures off the clipboard.')
+    await navigator.clipboard.write([new ClipboardItem({ 'image/png': toPng(sheet) })])
+    tell(store, 'Picture copied: paste it into the report.')
+  })
+}
+
+/** Hands a file to the browser to be saved. */
+export function download(blob: Blob, name: string): void {
+  const address = URL.createObjectURL(blob)
+  const anchor = document.createElement('a')
+  anchor.href = address
+  anchor.download = name
+  anchor.click()
+  setTimeout(() => URL.revokeObjectURL(address), 10_000)
+}
+
+async function attempt(store: Store, refusal: string, work: () => Promise<void>): Promise<void> {
+  try {
+    await work()
+  } catch (error) {
+    const reason = error instanceof Error ? error.message : 'the browser refused.'
+    store.getState().notify({
+      tone: 'problem',
+      text: `${refusal}: ${reason} Save the drawing as an SVG instead.`,
+    })
+  }
+}
+
+function tell(store: Store, text: string): void {
+  store.getState().notify({ tone: 'news', text })
+}

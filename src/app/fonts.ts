@@ -1,0 +1,20 @@
+import type { TextRun } from '../drawing'
+
+const families = {
+  sans: '"Phasogon Sans", "DejaVu Sans", Verdana, sans-serif',
+  bold: '"Phasogon Bold", "DejaVu Sans", Verdana, sans-serif',
+  symbol: '"Phasogon Symbol", "DejaVu Serif", Georgia, serif',
+}
+
+/** The canvas font of a run, its size in the context's unit. */
+export function fontOf({ face, size }: Pick<TextRun, 'face' | 'size'>): string {
+  return `${size}px ${families[face]}`
+}
+
+/** Settles when the bundled faces can be drawn with; a face that fails falls back and holds up nothing. */
+export async function loadFonts(): Promise<void> {
+  const faces = (['sans', 'bold', 'symbol'] as const).map((face) =>
+    document.fonts.load(fontOf({ face, size: 16 }), 'VΩ∠'),
+  )
+  await Promise.allSettled(faces)
+}

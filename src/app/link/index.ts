@@ -1,0 +1,5 @@
+export { type AddressBar, browserAddress, keepAddress } from './address'
+export { acceptDrops } from './drop'
+export { LinkVerbs } from './LinkVerbs'
+export { acceptLaunches } from './launch'
+export { openFiles, openLink } from './open'

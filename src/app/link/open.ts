@@ -1,0 +1,73 @@
+import { extractSheetText, parseLink, parseSheetText, type SheetResult } from '../../sheet'
+import { type Keeping, openFiled, openLinked } from '../keep'
+import type { Store } from '../store'
+
+const largestFile = 5_000_000
+
+/** Opens the sheet that a link carries. A link that cannot be read costs nothing and is said. */
+export async function openLink(store: Store, keeping: Keeping, text: string): Promise<boolean> {
+  const result = parseLink(text)
+  if (result.ok) await openLinked(store, keeping, result.sheet)
+  else refuse(store, [describeRefusal(result, 'This link')])
+  return result.ok
+}
+
+/**
+ * Opens the sheets in files: a sheet's own JSON, or a drawing that carries its sheet. The first of
+ * several is shown, and all are kept; those that hold no sheet are named with the reason.
+ */
+export async function openFiles(
+  store: Store,
+  keeping: Keeping,
+  files: readonly File[],
+): Promise<void> {
+  const refusals: string[] = []
+  let opened = 0
+  for (const file of [...files].reverse()) {
+    const result = await readFile(file)
+    if (result.ok) {
+      await openFiled(store, keeping, result.sheet)
+      opened += 1
+    } else refusals.unshift(describeRefusal(result, `“${file.name}”`))
+  }
+  if (refusals.length > 0) refuse(store, refusals)
+  else if (opened > 1) {
+    store.getState().notify({
+      tone: 'news',
+      text: `${opened} sheets opened. The first is shown, the others are in My sheets.`,
+      offer: 'go-back',
+    })
+  }
+}
+
+async function readFile(file: File): Promise<SheetResult> {
+  if (file.size > largestFile) {
+    return refusal(
+      'it is larger than 5 MB, and no sheet is. Choose a drawing or sheet that Phasogon saved.',
+    )
+  }
+  const text = await file.text().catch(() => undefined)
+  if (text === undefined) return refusal('the browser could not read it. Choose it again.')
+  const carried = extractSheetText(text)
+  if (carried === undefined && text.trimStart().startsWith('<')) {
+    return refusal('it is a drawing that carries no sheet. Choose an SVG that Phasogon saved.')
+  }
+  return parseSheetText(carried ?? text)
+}
+
+function refusal(message: string): SheetResult {
+  return { ok: false, errors: [{ path: '', message }] }
+}
+
+function describeRefusal(result: SheetResult & { readonly ok: false }, what: string): string {
+  const [first] = result.errors
+  const where = first?.path ? ` (at ${first.path})` : ''
+  const more =
+    result.errors.length > 1 ? ` There are ${result.errors.length - 1} more such faults.` : ''
+  return `${what} was not opened: ${first?.message ?? 'it holds no sheet.'}${where}${more}`
+}
+
+function refuse(store: Store, refusals: readonly string[]): void {
+  const text = [...refusals, 'The sheet that was open is still here.'].join(' ')
+  store.getState().notify({ tone: 'problem', text })
+}

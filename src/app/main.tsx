@@ -1,0 +1,36 @@
+import { StrictMode } from 'react'
+import { createRoot } from 'react-dom/client'
+import { loadFonts } from './fonts'
+import { KeepingContext, openKeeping } from './keep'
+import { acceptDrops, acceptLaunches, browserAddress, keepAddress, openLink } from './link'
+import { App } from './shell/App'
+import { StoreContext } from './store'
+import './style.css'
+
+async function start(): Promise<void> {
+  const [{ store, keeping }] = await Promise.all([
+    openKeeping(browserAddress.readHash()),
+    loadFonts(),
+  ])
+  keepAddress(store, browserAddress, (hash) => void openLink(store, keeping, hash))
+  acceptDrops(store, keeping)
+  acceptLaunches(store, keeping)
+  const showTitle = () => {
+    document.title = `${store.getState().history.sheet.title || 'Untitled sheet'} · Phasogon`
+  }
+  showTitle()
+  store.subscribe(showTitle)
+  const root = document.getElementById('root')
+  if (!root) throw new Error('The page has no element called root.')
+  createRoot(root).render(
+    <StrictMode>
+      <StoreContext value={store}>
+        <KeepingContext value={keeping}>
+          <App />
+        </KeepingContext>
+      </StoreContext>
+    </StrictMode>,
+  )
+}
+
+void start()

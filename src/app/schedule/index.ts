@@ -1,0 +1,1 @@
+export { Schedule } from './Schedule'

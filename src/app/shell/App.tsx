@@ -1,0 +1,47 @@
+import { Board } from '../board'
+import { CheckLine } from '../check'
+import { DrawingSettings, TitleBlock } from '../details'
+import { CopyBanner, KeepNotes } from '../keep'
+import { Schedule } from '../schedule'
+import { Sums } from '../sums'
+import { Announcer } from './Announcer'
+import { FirstVisit } from './FirstVisit'
+import { Header } from './Header'
+import { Notice } from './Notice'
+import { useShortcuts } from './useShortcuts'
+
+/** The page: the sheet on its desk, its schedule beside it, the check line under both. */
+export function App() {
+  useShortcuts()
+  return (
+    <main className="page">
+      <Header />
+      <Board />
+      <div className="side">
+        <KeepNotes />
+        <Notice />
+        <CopyBanner />
+        <FirstVisit />
+        <Schedule />
+        <Sums />
+        <section aria-label="Sheet">
+          <TitleBlock />
+          <DrawingSettings />
+        </section>
+        <Safety />
+      </div>
+      <CheckLine />
+      <Announcer />
+    </main>
+  )
+}
+
+/** The caution that every sheet carries. */
+function Safety() {
+  return (
+    <p className="safety">
+      Readings are taken on live circuits. Local rules and licensed practice have the last word, and
+      nothing on this page replaces them.
+    </p>
+  )
+}

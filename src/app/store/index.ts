@@ -1,0 +1,16 @@
+export { StoreContext, usePage, usePageStore } from './context'
+export { describeAnswer, labelOf, nameOfSum, quantityOfSum } from './describe'
+export { createIdentity, createName } from './identity'
+export { answerOf, checkedSum, shownEvaluation, shownSheet } from './selectors'
+export type {
+  Answer,
+  Copy,
+  Draft,
+  Identity,
+  Notice,
+  Origin,
+  Selection,
+  Shelved,
+  State,
+} from './state'
+export { type Actions, createStore, type Store } from './store'

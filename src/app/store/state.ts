@@ -1,0 +1,67 @@
+import type { Edit, Evaluation, History, Id, Sheet } from '../../sheet'
+
+/** What is picked on the board and in the schedule. */
+export type Selection =
+  | { readonly kind: 'phasor'; readonly id: Id }
+  | { readonly kind: 'sum'; readonly id: Id }
+
+/** One sentence to the user. A problem stays until it is put away; news gives way to the next. */
+export interface Notice {
+  readonly tone: 'news' | 'problem'
+  readonly text: string
+  /** A verb that the notice offers. */
+  readonly offer?: 'undo' | 'go-back'
+  /** Other verbs that go with it. */
+  readonly verbs?: readonly { readonly verb: string; readonly act: () => void }[]
+}
+
+/** An edit that is being tried, with the sheet as it would be. A drag is a draft until it is let go. */
+export interface Draft {
+  readonly edit: Edit
+  readonly sheet: Sheet
+}
+
+/** Where the open sheet came from: it settles what the first visit says and what the address shows. */
+export type Origin = 'example' | 'new' | 'link' | 'file' | 'kept'
+
+/** Of what a sheet is a copy: someone's, that came by a link, or one that two tabs changed at once. */
+export interface Copy {
+  /** The title that it bears. */
+  readonly of: string
+  readonly why: 'link' | 'tabs'
+}
+
+/** Which sheet is open. It stands beside the document, so that no link or file carries it. */
+export interface Identity {
+  readonly id: string
+  readonly copy?: Copy
+}
+
+/** A sheet that was open before, as it was left. */
+export interface Shelved {
+  readonly history: History
+  readonly origin: Origin
+  readonly identity: Identity
+}
+
+/** All that the page remembers. What can be derived from it is derived: see the selectors. */
+export interface State {
+  readonly history: History
+  /** Histories of sheets that were open before this one, newest last. */
+  readonly shelf: readonly Shelved[]
+  readonly origin: Origin
+  readonly identity: Identity
+  readonly draft: Draft | undefined
+  readonly selection: Selection | undefined
+  /** The sum in the check line; the first where none was chosen. */
+  readonly chosenSum: Id | undefined
+  readonly notice: Notice | undefined
+  /** What a screen reader is told after an edit. */
+  readonly announcement: string
+}
+
+/** A sheet with what the program says of it. */
+export interface Answer {
+  readonly sheet: Sheet
+  readonly evaluation: Evaluation
+}

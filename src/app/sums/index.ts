@@ -1,0 +1,1 @@
+export { Sums } from './Sums'

@@ -1,0 +1,35 @@
+export { type Displacement, displacementBetween } from './displacement'
+export { dragBody, dragTip, pinDrawing, type TipDrag, whyTipIsHeld } from './drag'
+export { measureText } from './font/measure'
+export { shorten } from './font/shorten'
+export type { Box } from './geometry'
+export { type Grip, gripAt } from './grip'
+export { type LayoutOptions, layout } from './layout'
+export { frameOf, isOffPaper, paperSizeOf } from './paper'
+export type { Frozen } from './placement/place'
+export { boundsOf, boundsOfAll, distance } from './primitives'
+export { HALO_WIDTH } from './primitives/text'
+export { SAMPLE_SIZE, sampleArrow } from './sample'
+export type {
+  ArcItem,
+  Item,
+  LinesItem,
+  PathItem,
+  PlacedArrow,
+  Scene,
+  TextItem,
+  TextRun,
+} from './scene'
+export { svg } from './svg/document'
+export { labelRuns } from './text/label-runs'
+export { digitsOfResult } from './text/phasor-text'
+export { formatScale } from './text/quantity-text'
+export {
+  coarser,
+  type Digits,
+  digitsOf,
+  type PhasorDigits,
+  type ReadingsByPhasor,
+  readingsByPhasor,
+} from './text/resolution'
+export { type Palette, paletteOf, type Theme } from './theme'

@@ -1,0 +1,30 @@
+import {
+  type Evaluation,
+  type Id,
+  type Phasor,
+  referenceOf,
+  type Sheet,
+  type Sum,
+} from '../../sheet'
+import { createVectors, type Vectors } from '../placement/vectors'
+import { type ReadingsByPhasor, readingsByPhasor } from '../text/resolution'
+
+/** What the labels of a sheet are written from, by name. */
+export interface Register {
+  readonly phasors: ReadonlyMap<Id, Phasor>
+  readonly sums: ReadonlyMap<Id, Sum>
+  readonly vectors: Vectors
+  readonly readings: ReadingsByPhasor
+  readonly reference: Id | undefined
+}
+
+/** The register of a sheet. */
+export function createRegister(sheet: Sheet, evaluation: Evaluation): Register {
+  return {
+    phasors: new Map(sheet.phasors.map((phasor) => [phasor.id, phasor])),
+    sums: new Map((sheet.sums ?? []).map((sum) => [sum.id, sum])),
+    vectors: createVectors(evaluation),
+    readings: readingsByPhasor(sheet),
+    reference: referenceOf(sheet),
+  }
+}

@@ -1,0 +1,119 @@
+import type { Evaluation, Sheet } from '../sheet'
+import { drawingAreaOf } from './area'
+import { type Box, boxOfPoints, joinBoxes, NO_BOX } from './geometry'
+import { angleItem } from './items/angles'
+import { addArrow } from './items/arrows'
+import { axisItem } from './items/axis'
+import { gapItem } from './items/gaps'
+import { frameItem, gridItems, paperItem } from './items/paper'
+import { createScaleBars } from './items/scale-bars'
+import { createTitleBlock } from './items/title-block'
+import { createLabels } from './labels'
+import { createRegister } from './labels/register'
+import { frameOf, paperSizeOf } from './paper'
+import { createPicture, type Picture } from './picture'
+import { type Frozen, type Placement, place } from './placement/place'
+import type { Item, PlacedArrow, Scene } from './scene'
+import { describeDrawing } from './text/description'
+import { type Palette, paletteOf, type Theme } from './theme'
+
+/** How a sheet is laid out. */
+export interface LayoutOptions {
+  /** Light where nothing is said. */
+  readonly theme?: Theme
+  /** False leaves the labels out: they take most of the time. They are left out with `only`, too. */
+  readonly labels?: boolean
+  /** Keeps origin, scales and places as they are, as during a drag: pass the scene before it. */
+  readonly frozen?: Frozen
+  /** Makes items for the arrows of these keys alone; `arrows` still lists all. */
+  readonly only?: ReadonlySet<string>
+}
+
+/**
+ * Lays a sheet out on its paper, in millimetres: the same sheet and evaluation give the same scene.
+ * What has no value yet is not drawn.
+ */
+export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
+  const { theme = 'light', labels = true, frozen, only } = options
+  const palette = paletteOf(theme)
+  const size = paperSizeOf(sheet.drawing)
+  const frame = frameOf(size)
+  const placement = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen)
+  const picture = createPicture(sheet, placement.arrows)
+  const items: Item[] = []
+  const fences = only ? [] : addSheet(items, sheet, placement, picture, palette)
+  addDrawing(items, picture, palette, only)
+  const labelling =
+    labels && !only
+      ? createLabels(items, picture, createRegister(sheet, evaluation), frame, fences, palette)
+      : { items: [], leftOut: 0 }
+  items.push(...labelling.items)
+  return {
+    ...size,
+    ...placement,
+    items,
+    title: sheet.title,
+    description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
+    labelsLeftOut: labelling.leftOut,
+  }
+}
+
+/** Adds the paper and all that frames the drawing; gives the boxes that labels keep out of. */
+function addSheet(
+  items: Item[],
+  sheet: Sheet,
+  placement: Placement,
+  picture: Picture,
+  palette: Palette,
+): Box[] {
+  const size = paperSizeOf(sheet.drawing)
+  const frame = frameOf(size)
+  const block = createTitleBlock(sheet, frame, palette)
+  const bars = createScaleBars(placement.unitsPerCentimetre, frame, palette)
+  items.push(
+    paperItem(size, palette),
+    ...gridItems(frame, palette),
+    frameItem(frame, palette),
+    ...block.items,
+    ...bars.items,
+    ...axisItems(placement, picture, frame, palette),
+  )
+  return [block.box, ...bars.boxes]
+}
+
+/** Arcs, arrows and gaps, in painting order. */
+function addDrawing(
+  items: Item[],
+  { arcs, painted, gaps }: Picture,
+  palette: Palette,
+  only: ReadonlySet<string> | undefined,
+): void {
+  for (const arc of arcs) if (!only || only.has(arc.key)) items.push(angleItem(arc, palette))
+  for (const arrow of painted) if (!only || only.has(arrow.key)) addArrow(items, arrow, palette)
+  for (const gap of gaps) if (!only || only.has(gap.key)) items.push(gapItem(gap, palette))
+}
+
+/** The axis through the origin, and one through every other point about which an angle is drawn. */
+function axisItems(
+  { origin, arrows }: Placement,
+  { arcs }: Picture,
+  frame: Box,
+  palette: Palette,
+): Item[] {
+  const centres = [origin, ...arcs.map(({ centre }) => centre)]
+  const distinct = new Map(centres.map((centre) => [`${centre.x} ${centre.y}`, centre]))
+  return [...distinct.values()].flatMap((centre) => {
+    const item = axisItem(centre, reachFrom(arrows, centre), frame, palette)
+    return item ? [item] : []
+  })
+}
+
+/** How far the arrows that start at a point reach, with the figures that they belong to. */
+function reachFrom(arrows: readonly PlacedArrow[], { x, y }: { x: number; y: number }): Box {
+  const figures = new Set<string | undefined>()
+  for (const { from, sum } of arrows) if (sum && from.x === x && from.y === y) figures.add(sum)
+  return arrows.reduce((box, { from, to, sum }) => {
+    const belongs = (sum !== undefined && figures.has(sum)) || (from.x === x && from.y === y)
+    return belongs ? joinBoxes(box, boxOfPoints([from.x, from.y, to.x, to.y])) : box
+  }, NO_BOX)
+}

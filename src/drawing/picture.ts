@@ -1,0 +1,34 @@
+import type { Sheet } from '../sheet'
+import { type AngleArc, angleArcsOf } from './items/angles'
+import { type Gap, gapOf } from './items/gaps'
+import { closingKeys, type SumFigure, sumFiguresOf } from './items/sum-figures'
+import type { PlacedArrow } from './scene'
+
+/** What is to be drawn of the placed arrows, before it is drawn. */
+export interface Picture {
+  readonly figures: readonly SumFigure[]
+  /** The arrows in painting order: heavy ones first, so that others show on them. */
+  readonly painted: readonly PlacedArrow[]
+  readonly arcs: readonly AngleArc[]
+  readonly gaps: readonly Gap[]
+}
+
+/** Decides what is drawn of a sheet's arrows. A sum that must close shows its gap, no resultant. */
+export function createPicture(sheet: Sheet, arrows: readonly PlacedArrow[]): Picture {
+  const figures = sumFiguresOf(sheet, arrows)
+  const closing = closingKeys(figures)
+  const byRole: { [role in PlacedArrow['role']]: PlacedArrow[] } = {
+    resultant: [],
+    measured: [],
+    term: [],
+    loose: [],
+  }
+  for (const arrow of arrows) if (!closing.has(arrow.key)) byRole[arrow.role].push(arrow)
+  const { resultant, measured, term, loose } = byRole
+  return {
+    figures,
+    painted: [...resultant, ...measured, ...term, ...loose],
+    arcs: angleArcsOf(figures),
+    gaps: figures.flatMap((figure) => gapOf(figure) ?? []),
+  }
+}

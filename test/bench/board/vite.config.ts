@@ -1,0 +1,11 @@
+import { resolve } from 'node:path'
+import react from '@vitejs/plugin-react'
+import { defineConfig } from 'vite'
+
+export default defineConfig({
+  root: import.meta.dirname,
+  publicDir: resolve(import.meta.dirname, '../../../public'),
+  plugins: [react()],
+  base: './',
+  build: { assetsInlineLimit: 0, modulePreload: { polyfill: false } },
+})

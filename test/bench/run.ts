@@ -1,0 +1,36 @@
+import type { Measure } from './measure'
+import { dragFirstOf100, dragLooseAmong1000, redraw1000 } from './measures/board'
+import { bytesOfFirstLoad, firstShaftsOnScreen } from './measures/first-load'
+import { charactersOfLink, linkAgainstDeflate } from './measures/link'
+import { resultantAgainstLoop, resultantAgainstMathjs } from './measures/resultant'
+import { svgAgainstJoining } from './measures/svg'
+
+// `npm run bench`: each measure in turn, a line each. It never fails on a clock: a goal that is
+// missed is said.
+const measures: readonly Measure[] = [
+  resultantAgainstLoop,
+  resultantAgainstMathjs,
+  svgAgainstJoining,
+  linkAgainstDeflate,
+  charactersOfLink,
+  bytesOfFirstLoad,
+  firstShaftsOnScreen,
+  dragFirstOf100,
+  dragLooseAmong1000,
+  redraw1000,
+]
+
+const width = Math.max(...measures.map(({ name }) => name.length))
+
+/** A line of the table; the columns keep their width. */
+function row(name: string, figure: string, goal: string, verdict: string): string {
+  return `${name.padEnd(width)}  ${figure.padStart(8)}  ${goal.padStart(8)}  ${verdict}`
+}
+
+console.log(row('measure', 'ratio', 'goal', ''))
+for (const { name, goal, unit, measure } of measures) {
+  const figure = await measure()
+  const shown = unit === undefined ? figure.toFixed(3) : String(figure)
+  const verdict = figure <= goal ? 'met' : 'missed'
+  console.log(row(name, shown, `≤ ${goal}`, unit === undefined ? verdict : `${verdict} (${unit})`))
+}
