@@ -52,7 +52,11 @@ function partsOf(
   return { real: re, imaginary: im }
 }
 
-function evaluateSum(sum: Sum, phasors: ReadonlyMap<PhasorId, PhasorEvaluation>): SumEvaluation {
+/** A sum's resultant of its terms, and how far it is from what it must equal. */
+export function evaluateSum(
+  sum: Sum,
+  phasors: ReadonlyMap<PhasorId, PhasorEvaluation>,
+): SumEvaluation {
   const terms = sum.terms.map(({ phasor, sign = 1 }) => ({
     value: complexOf(phasors.get(phasor)),
     sign,

@@ -21,6 +21,7 @@ export {
   type PhasorEstimate,
   type Wanted,
 } from './estimate'
+export { type Layout, layoutOf } from './layout'
 export {
   type LeastSquaresSolution,
   type SolverOptions,
@@ -46,3 +47,4 @@ export type {
 } from './phasor-problem'
 export { type Equations, type LeastSquaresProblem, NO_EQUATIONS } from './problem'
 export { createRandom, normalDeviate, type Random, rectangularDeviate } from './random'
+export { type ProblemPart, splitProblem } from './split'
