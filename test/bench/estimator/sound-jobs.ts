@@ -11,9 +11,12 @@ import type { Random } from '../../../src/core/estimate'
 import type { CircuitElement, Phasor, Quantity, Reading, Sheet, Sum } from '../../../src/sheet'
 
 /** How the readings of a job were taken. */
-export type Metering = 'own meter for each' | 'one meter for all' | 'with drift'
+export type Metering = (typeof METERINGS)[number]
 /** How its elements are connected. */
-export type Circuit = 'series' | 'parallel' | 'mixed'
+export type Circuit = (typeof CIRCUITS)[number]
+
+const METERINGS = ['own meter for each', 'one meter for all', 'with drift'] as const
+const CIRCUITS = ['series', 'parallel', 'mixed'] as const
 
 /** A job whose readings are all within their limits, and what is true of it. */
 export interface SoundJob {
@@ -253,8 +256,8 @@ function readingsOf(
 
 /** A random sound job: a circuit, its true values, and readings within their limits. */
 export function soundJob(random: Random): SoundJob {
-  const metering = oneOf(random, ['own meter for each', 'one meter for all', 'with drift'])
-  const circuit = oneOf(random, ['series', 'parallel', 'mixed'])
+  const metering = oneOf(random, METERINGS)
+  const circuit = oneOf(random, CIRCUITS)
   const truth = circuitOf(random, circuit)
   const [reference = ''] = truth.phasors.keys()
   const phasors: Phasor[] = [...truth.phasors].map(([id, { quantity }]) => ({
