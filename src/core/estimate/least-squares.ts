@@ -22,6 +22,8 @@ export interface LeastSquaresSolution {
 export interface SolverOptions {
   /** Steps that lower the sum of squares; 200 where omitted. */
   readonly iterations?: number
+  /** The start meets the conditions. */
+  readonly isOnConditions?: boolean
   /**
    * How freely each unknown moves, 0 … 1, when the start is first brought onto the conditions: little
    * for one that is known, so that those that were guessed give way. 1 where omitted.
@@ -242,7 +244,7 @@ export function solveLeastSquares(
   start: Float64Array,
   options: SolverOptions = {},
 ): LeastSquaresSolution {
-  const found = feasible(problem, start, options.mobility)
+  const found = options.isOnConditions ? start : feasible(problem, start, options.mobility)
   const first = placeAt(problem, found ?? start)
   if (found === undefined || !Number.isFinite(first.chiSquare)) {
     return { ...first, iterations: 0, converged: false, conditionsMet: false }

@@ -79,9 +79,17 @@ class Collection {
       if (found.solution.chiSquare > this.#worthwhile) continue
       if (needsNegativeResistance(found, this.#problem)) continue
       const mirrors = mirrorsOf(this.#problem, this.#equations, found.solution.x, MOST_MIRRORS)
-      this.add(mirrors, found.solution.chiSquare + MIRRORS * this.#equations.residuals.count)
+      const likely = found.solution.chiSquare + MIRRORS * this.#equations.residuals.count
+      this.add(
+        mirrors.filter((mirror) => this.#chiSquareAt(mirror) <= likely),
+        likely,
+      )
     }
     return isNew
+  }
+
+  #chiSquareAt(x: Float64Array): number {
+    return sumOfSquares(this.#equations.residuals.evaluate(x))
   }
 
   /** The starts brought onto the conditions, those that are likely, the best first. */
@@ -90,7 +98,7 @@ class Collection {
       .flatMap((start) => {
         const x = feasible(this.#equations, start, this.#mobility)
         if (x === undefined) return []
-        const chiSquare = sumOfSquares(this.#equations.residuals.evaluate(x))
+        const chiSquare = this.#chiSquareAt(x)
         return chiSquare <= likely ? [{ x, chiSquare }] : []
       })
       .sort((a, b) => a.chiSquare - b.chiSquare)
@@ -104,7 +112,7 @@ class Collection {
 
   #lookFrom(place: Float64Array): Candidate | undefined {
     if (this.#leadsToKnown(place)) return undefined
-    const options = { worthwhile: this.#worthwhile }
+    const options = { worthwhile: this.#worthwhile, isOnConditions: true }
     const solution = solveLeastSquares(this.#equations, place, options)
     if (!solution.conditionsMet || !Number.isFinite(solution.chiSquare)) return undefined
     if (solution.chiSquare > options.worthwhile) return undefined

@@ -86,6 +86,20 @@ function guess(draft: Draft, { problem, random }: Guesser): boolean {
   return true
 }
 
+/** Beyond this share of an impedance a value is on the wrong side of nothing, whatever the limits. */
+const CLEARLY = 0.1
+
+/** Whether no resistor, coil or capacitor of a draft clearly feeds power, or has the other's reactance. */
+function isPassive(draft: Draft, problem: PhasorProblem): boolean {
+  return problem.elements.every(({ kind }, each) => {
+    if (kind === 'impedance') return true
+    const [resistance, reactance] = [draft.resistances[each] ?? 0, draft.reactances[each] ?? 0]
+    const least = -CLEARLY * Math.hypot(resistance, reactance)
+    const inductive = kind === 'capacitor' ? -reactance : reactance
+    return resistance >= least && inductive >= least
+  })
+}
+
 /** Completes a draft in every way that its choices offer, guessing where there is none. */
 function complete(draft: Draft, guesser: Guesser, most: number, guesses = 0): readonly Leaf[] {
   draft.follow()
@@ -95,12 +109,17 @@ function complete(draft: Draft, guesser: Guesser, most: number, guesses = 0): re
       ? complete(draft, guesser, most, guesses + 1)
       : [{ draft, guesses }]
   }
-  const leaves: Leaf[] = []
-  for (const take of choice) {
-    if (leaves.length >= most) break
+  const ways = choice.map((take) => {
     const copy = draft.copy()
     take(copy)
-    leaves.push(...complete(copy, guesser, most - leaves.length, guesses))
+    copy.follow()
+    return copy
+  })
+  const possible = ways.filter((way) => isPassive(way, guesser.problem))
+  const leaves: Leaf[] = []
+  for (const way of possible.length > 0 ? possible : ways) {
+    if (leaves.length >= most) break
+    leaves.push(...complete(way, guesser, most - leaves.length, guesses))
   }
   return leaves
 }
