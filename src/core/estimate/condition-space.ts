@@ -25,15 +25,23 @@ function rankOf(singularValues: readonly number[]): number {
  * The triangular decomposition of columns with the orthogonal factor whole: a column of zeros is left
  * as it is by the library's Householder steps.
  */
-function wholeDecomposition(columns: Matrix): QrDecomposition {
-  const padded = new Matrix(columns.rows, columns.rows)
-  padded.setSubMatrix(columns, 0, 0)
+function wholeDecomposition(
+  columns: number,
+  rows: number,
+  at: (row: number, column: number) => number,
+) {
+  const padded = new Matrix(rows, rows)
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) padded.set(row, column, at(row, column))
+  }
   return new QrDecomposition(padded)
 }
 
 /** Orthonormal columns that complete orthonormal columns to a whole basis. */
 function complementOf(basis: Matrix): Matrix {
-  const { orthogonalMatrix } = wholeDecomposition(basis)
+  const { orthogonalMatrix } = wholeDecomposition(basis.columns, basis.rows, (row, column) =>
+    basis.get(row, column),
+  )
   return someColumns(orthogonalMatrix, basis.columns, basis.rows - basis.columns)
 }
 
@@ -42,7 +50,11 @@ function spaceOfIndependent(derivatives: Matrix): ConditionSpace | undefined {
   const rank = derivatives.rows
   const unknowns = derivatives.columns
   if (rank > unknowns) return undefined
-  const { orthogonalMatrix, upperTriangularMatrix } = wholeDecomposition(derivatives.transpose())
+  const { orthogonalMatrix, upperTriangularMatrix } = wholeDecomposition(
+    rank,
+    unknowns,
+    (row, column) => derivatives.get(column, row),
+  )
   for (let k = 0; k < rank; k++) {
     if (Math.abs(upperTriangularMatrix.get(k, k)) < PLAINLY_INDEPENDENT) return undefined
   }

@@ -64,8 +64,9 @@ export function feasible(
   for (let step = 0; step < FEASIBLE_START_STEPS; step++) {
     const sizes = problem.sizes(x).map((size, each) => size * (mobility?.[each] ?? 1))
     const conditions = new ConditionsAt(problem.conditions, x, sizes)
-    const worst = largestOf(conditions.values)
-    if (worst <= CONDITIONS_MET) return conditions.restored(x)
+    // Near the conditions, the slopes at the start serve for all the way.
+    const near = conditions.restored(x)
+    if (near !== undefined || largestOf(conditions.values) <= CONDITIONS_MET) return near
     const full = conditions.space.stepFor(conditions.values)
     let next: Float64Array | undefined
     for (let share = 1; share > 1e-4 && next === undefined; share /= 2) {

@@ -39,7 +39,7 @@ function magnitude(of: string, shown: number): Reading {
 }
 
 /** A resistor, a coil and a capacitor in series: six phasors, eight readings. */
-const sixPhasors: Sheet = {
+export const sixPhasors: Sheet = {
   format: 'phasogon-sheet',
   version: 1,
   title: 'Six phasors',
