@@ -100,14 +100,24 @@ function plus(share: Share, isHit: boolean): Share {
 
 const NONE: Share = { hits: 0, of: 0 }
 
+/** What is left out to be quicker. */
+export interface CalibrationOptions {
+  readonly withSpoiled?: boolean
+  readonly draws?: number
+}
+
 /** Evaluates so many random sound jobs from a seed, and each once more with one reading spoiled. */
-export function calibrate(jobs: number, seed: number, withSpoiled = true): Calibration {
+export function calibrate(
+  jobs: number,
+  seed: number,
+  { withSpoiled = true, draws = DRAWS }: CalibrationOptions = {},
+): Calibration {
   const random = createRandom(seed)
   let [falseAlarms, coverage, coverageOfAll] = [NONE, NONE, NONE]
   let [noticed, pointedAt, byDraws] = [NONE, NONE, NONE]
   for (let each = 0; each < jobs; each++) {
     const job = soundJob(random)
-    const evaluation = evaluate(job.sheet, { draws: DRAWS, seed: each })
+    const evaluation = evaluate(job.sheet, { draws, seed: each })
     const values = judged(job, evaluation)
     for (const { isCovered } of values) coverageOfAll = plus(coverageOfAll, isCovered)
     const drawn = values[Math.floor(random() * values.length)]

@@ -39,7 +39,7 @@ function magnitude(of: string, shown: number): Reading {
 }
 
 /** A resistor, a coil and a capacitor in series: six phasors, eight readings. */
-export const sixPhasors: Sheet = {
+const sixPhasors: Sheet = {
   format: 'phasogon-sheet',
   version: 1,
   title: 'Six phasors',
@@ -72,7 +72,7 @@ export const sixPhasors: Sheet = {
 }
 
 /** Branches of a resistor and a coil beside each other, four phasors each, with two for the supply. */
-export function branches(count: number): Sheet {
+function branches(count: number): Sheet {
   const phasors: Phasor[] = [phasor('V', 'voltage'), phasor('I', 'current')]
   const sums: Sum[] = []
   const elements: CircuitElement[] = []
