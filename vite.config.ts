@@ -1,12 +1,14 @@
 import react from '@vitejs/plugin-react'
 import { defineConfig } from 'vitest/config'
+import { iconPlugin } from './.config/icon-plugin.ts'
+import { offlinePlugin } from './.config/offline-plugin.ts'
 import { policyPlugin } from './.config/policy-plugin.ts'
 
 /** What every page needs and a new release seldom changes: a chunk that browsers keep. */
 const frame = /\/node_modules\/(react|react-dom|react-reconciler|scheduler|konva|react-konva)\//
 
 export default defineConfig({
-  plugins: [react(), policyPlugin()],
+  plugins: [react(), policyPlugin(), iconPlugin(), offlinePlugin()],
   // Relative addresses, so that the page works from any sub-path.
   base: './',
   build: {

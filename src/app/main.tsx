@@ -2,7 +2,9 @@ import { StrictMode } from 'react'
 import { createRoot } from 'react-dom/client'
 import { loadFonts } from './fonts'
 import { KeepingContext, openKeeping } from './keep'
+import { fetchLater } from './later'
 import { acceptDrops, acceptLaunches, browserAddress, keepAddress, openLink } from './link'
+import { createOfflineStore, OfflineContext, watchVersions } from './offline'
 import { App } from './shell/App'
 import { StoreContext } from './store'
 import './style.css'
@@ -22,15 +24,27 @@ async function start(): Promise<void> {
   store.subscribe(showTitle)
   const root = document.getElementById('root')
   if (!root) throw new Error('The page has no element called root.')
+  const offline = createOfflineStore()
   createRoot(root).render(
     <StrictMode>
       <StoreContext value={store}>
         <KeepingContext value={keeping}>
-          <App />
+          <OfflineContext value={offline}>
+            <App />
+          </OfflineContext>
         </KeepingContext>
       </StoreContext>
     </StrictMode>,
   )
+  // The development server has no service worker.
+  const workers = import.meta.env.PROD ? navigator.serviceWorker : undefined
+  await watchVersions(offline, workers, {
+    settled: keeping.keeper.settled,
+    reload: () => window.location.reload(),
+  })
+  await fetchLater()
+  // From here on the page asks for nothing any more.
+  document.documentElement.dataset.settled = 'true'
 }
 
 void start()

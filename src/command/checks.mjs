@@ -1,6 +1,7 @@
 import { join } from 'node:path'
 import { prepareBrowser } from './browser.mjs'
 import { countsOfPlaywright, countsOfVitest } from './counts.mjs'
+import { prepareEngines } from './engines.mjs'
 import { preparePackages } from './prepare.mjs'
 import { commandFile, run } from './run.mjs'
 
@@ -26,6 +27,7 @@ export function createChecks(reports) {
   return [
     { name: 'packages installed', isWell: preparePackages },
     { name: 'browser found', isWell: prepareBrowser },
+    { name: 'other engines', isWell: prepareEngines },
     { name: 'types', isWell: () => installed('typescript', 'tsc', ['-b']) },
     {
       name: 'lint and format',

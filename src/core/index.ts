@@ -42,6 +42,7 @@ export {
   tiltOfDegrees,
   type Wave,
 } from './conversions'
+export { type DrawingTolerance, tipErrorAllowed, USUAL_TOLERANCE } from './drawing-tolerance'
 export { formatLimit } from './format-limit'
 export { decimalPlacesOf, formatNumber } from './format-number'
 export { formatAngle, formatPolar, formatRectangular } from './format-phasor'

@@ -10,6 +10,7 @@ import { createScaleBars } from './items/scale-bars'
 import { createTitleBlock } from './items/title-block'
 import { createLabels } from './labels'
 import { createRegister } from './labels/register'
+import { createOpenDrawing, NOTHING_OPEN, scalesWithOpen } from './open'
 import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
@@ -38,23 +39,34 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
-  const placement = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen)
+  const placed = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen)
+  const placement = {
+    ...placed,
+    unitsPerCentimetre: only
+      ? placed.unitsPerCentimetre
+      : scalesWithOpen(sheet, evaluation, placed.unitsPerCentimetre),
+  }
   const picture = createPicture(sheet, placement.arrows)
   const items: Item[] = []
-  const fences = only ? [] : addSheet(items, sheet, placement, picture, palette)
+  const edges = only ? [] : addSheet(items, sheet, placement, picture, palette)
+  const open = only
+    ? NOTHING_OPEN
+    : createOpenDrawing(sheet, evaluation, placement, { frame, edges, hasLabels: labels }, palette)
+  items.push(...open.arcs)
+  const fences = [...edges, ...open.boxes]
   addDrawing(items, picture, palette, only)
   const labelling =
     labels && !only
       ? createLabels(items, picture, createRegister(sheet, evaluation), frame, fences, palette)
       : { items: [], leftOut: 0 }
-  items.push(...labelling.items)
+  items.push(...open.labels, ...labelling.items)
   return {
     ...size,
     ...placement,
     items,
     title: sheet.title,
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
-    labelsLeftOut: labelling.leftOut,
+    labelsLeftOut: labelling.leftOut + open.leftOut,
   }
 }
 

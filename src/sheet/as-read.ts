@@ -1,8 +1,19 @@
 import { angleOf, differenceDegrees, magnitudeOf, wrapDegrees } from '../core'
-import { leadOfReading } from './readings/angle'
+import { type Lead, leadOf } from './readings/lead'
 import { magnitudeOfReading } from './readings/magnitude'
 import { referenceOf } from './reference'
-import type { AngleReading, Id, MagnitudeReading, Phasor, PhasorId, Sheet } from './types'
+import { indexOf } from './sheet-index'
+import type {
+  AngleReading,
+  EllipseReading,
+  MagnitudeReading,
+  Phasor,
+  PhasorId,
+  PowerFactorReading,
+  Reading,
+  Sheet,
+  ShiftReading,
+} from './types'
 
 /** The values of the phasors as typed and read, before anything is solved or adjusted. */
 export interface AsRead {
@@ -17,28 +28,36 @@ export interface KnownParts {
   readonly angle?: number
 }
 
+/** A reading that may settle an angle by itself. */
+export type AngleLikeReading = AngleReading | ShiftReading | EllipseReading | PowerFactorReading
+
 /** The readings of one phasor that are used: struck ones are not. */
 export interface ReadingsOfPhasor {
   readonly magnitude: readonly MagnitudeReading[]
-  readonly angle: readonly AngleReading[]
+  /** Those that settle its angle: each alone says how far it leads another. */
+  readonly angle: readonly AngleLikeReading[]
 }
 
 const NO_READINGS: ReadingsOfPhasor = { magnitude: [], angle: [] }
 
 /** The readings in use of a magnitude and of an angle, by phasor. */
 export function readingsByPhasor(sheet: Sheet): ReadonlyMap<PhasorId, ReadingsOfPhasor> {
-  const found = new Map<PhasorId, { magnitude: MagnitudeReading[]; angle: AngleReading[] }>()
+  const found = new Map<PhasorId, { magnitude: MagnitudeReading[]; angle: AngleLikeReading[] }>()
   for (const reading of sheet.readings ?? []) {
-    if (reading.struck || (reading.kind !== 'magnitude' && reading.kind !== 'angle')) continue
+    if (reading.struck || !isOfOnePhasor(reading)) continue
     let entry = found.get(reading.of)
     if (entry === undefined) {
       entry = { magnitude: [], angle: [] }
       found.set(reading.of, entry)
     }
     if (reading.kind === 'magnitude') entry.magnitude.push(reading)
-    else entry.angle.push(reading)
+    else if (reading.kind === 'angle' || leadOf(sheet, reading)) entry.angle.push(reading)
   }
   return found
+}
+
+function isOfOnePhasor(reading: Reading): reading is MagnitudeReading | AngleLikeReading {
+  return reading.kind !== 'power' && reading.kind !== 'reactive-power'
 }
 
 /** The readings in use of one phasor. */
@@ -46,41 +65,76 @@ export function readingsOf(sheet: Sheet, id: PhasorId): ReadingsOfPhasor {
   return readingsByPhasor(sheet).get(id) ?? NO_READINGS
 }
 
+const answers = new WeakMap<Sheet, AsRead>()
+
 /**
  * What is known of each phasor as it was typed and read. A reading wins over a typed value of the same
  * part; several readings of a part count with their mean. Angles count from the phasor that they were
  * measured against, from the reference where none is named. The angle of the reference is what was
  * typed for it, else 0; one that nobody named as the reference may also be read against another
- * phasor. Where angles were measured in a circle, the first phasor of the circle is as typed.
+ * phasor. Where angles were measured in a circle, the first phasor of the circle is as typed. A phasor
+ * that nothing was read of, but which another was measured against, is as far behind as that one leads.
  */
 export function asReadOf(sheet: Sheet): AsRead {
-  const reference = referenceOf(sheet)
-  const phasors = byId(sheet.phasors)
-  const instruments = byId(sheet.instruments)
-  const channels = byId(sheet.channels)
-  const readings = readingsByPhasor(sheet)
-  const angles = new Map<PhasorId, number | undefined>()
-  const pending = new Set<PhasorId>()
+  const known = answers.get(sheet)
+  if (known !== undefined) return known
+  const answer = computeAsRead(sheet)
+  answers.set(sheet, answer)
+  return answer
+}
 
-  const readMagnitude = ({ id, quantity }: Phasor): number | undefined =>
-    mean(
-      (readings.get(id)?.magnitude ?? []).map((reading) =>
+function computeAsRead(sheet: Sheet): AsRead {
+  const reference = referenceOf(sheet)
+  const { phasors, channels } = indexOf(sheet)
+  const readings = readingsByPhasor(sheet)
+  const angles = anglesOf(sheet, reference, readings)
+  const readMagnitude = ({ id, quantity }: Phasor): number | undefined => {
+    const own = readings.get(id)?.magnitude ?? []
+    if (own.length === 0) return undefined
+    return mean(
+      own.map((reading) =>
         magnitudeOfReading(reading, quantity, channels.get(reading.channel ?? '')),
       ),
     )
+  }
+  const values = new Map<PhasorId, KnownParts>()
+  for (const phasor of phasors.values()) {
+    const magnitude = readMagnitude(phasor) ?? typedMagnitude(phasor)
+    const angle = angles.get(phasor.id)
+    values.set(phasor.id, {
+      ...(magnitude === undefined ? {} : { magnitude }),
+      ...(angle === undefined ? {} : { angle: wrapDegrees(angle) }),
+    })
+  }
+  return { reference, values }
+}
 
-  const readAngle = ({ id }: Phasor): number | undefined =>
-    meanAngle(
-      (readings.get(id)?.angle ?? []).map((reading) => {
-        const from = angleOfPhasor(reading.against ?? reference)
-        const lead = leadOfReading(
-          reading,
-          instruments.get(reading.instrument ?? ''),
-          channels.get(reading.channel ?? ''),
-        )
-        return from === undefined || lead === undefined ? undefined : from + lead
+function anglesOf(
+  sheet: Sheet,
+  reference: PhasorId | undefined,
+  readings: ReadonlyMap<PhasorId, ReadingsOfPhasor>,
+): ReadonlyMap<PhasorId, number | undefined> {
+  const { phasors } = indexOf(sheet)
+  const angles = new Map<PhasorId, number | undefined>()
+  const pending = new Set<PhasorId>()
+  const leads: Lead[] = []
+
+  const leadsOf = (id: PhasorId): readonly Lead[] => {
+    const own = readings.get(id)?.angle ?? []
+    return own.length === 0 ? [] : own.flatMap((reading) => leadOf(sheet, reading) ?? [])
+  }
+
+  const readAngle = ({ id }: Phasor): number | undefined => {
+    const own = leadsOf(id)
+    if (own.length === 0) return undefined
+    leads.push(...own)
+    return meanAngle(
+      own.map(({ against, degrees }) => {
+        const from = angleOfPhasor(against ?? reference)
+        return from === undefined ? undefined : from + degrees
       }),
     )
+  }
 
   const angleOfPhasor = (id: PhasorId | undefined): number | undefined => {
     const phasor = phasors.get(id ?? '')
@@ -98,24 +152,31 @@ export function asReadOf(sheet: Sheet): AsRead {
     const named = sheet.reference !== undefined
     const angle = typedAngle(origin) ?? (named ? undefined : angleOfPhasor(origin.id)) ?? 0
     angles.clear()
+    leads.length = 0
+    leads.push(...leadsOf(origin.id))
     angles.set(origin.id, angle)
   }
-  const values = new Map<PhasorId, KnownParts>()
-  for (const phasor of sheet.phasors) {
-    const magnitude = readMagnitude(phasor) ?? typedMagnitude(phasor)
-    const angle = angleOfPhasor(phasor.id)
-    values.set(phasor.id, {
-      ...(magnitude === undefined ? {} : { magnitude }),
-      ...(angle === undefined ? {} : { angle: wrapDegrees(angle) }),
-    })
-  }
-  return { reference, values }
+  for (const id of phasors.keys()) angleOfPhasor(id)
+  followBackwards(angles, leads, reference)
+  return angles
 }
 
-function byId<Part extends { readonly id: Id }>(
-  parts: readonly Part[] = [],
-): ReadonlyMap<Id, Part> {
-  return new Map(parts.map((part) => [part.id, part]))
+/** Settles phasors from what was measured against them, one after the other, until nothing is left. */
+function followBackwards(
+  angles: Map<PhasorId, number | undefined>,
+  leads: readonly Lead[],
+  reference: PhasorId | undefined,
+): void {
+  for (let settled = true; settled; ) {
+    settled = false
+    for (const { of, against = reference ?? '', degrees } of leads) {
+      const [own, other] = [angles.get(of), angles.get(against)]
+      if ((own === undefined) === (other === undefined) || !angles.has(against)) continue
+      if (own !== undefined) angles.set(against, wrapDegrees(own - degrees))
+      else angles.set(of, wrapDegrees((other ?? 0) + degrees))
+      settled = true
+    }
+  }
 }
 
 /** The magnitude as typed, in polar or rectangular form. */
@@ -135,15 +196,23 @@ export function typedAngle({ angle, real, imaginary }: Phasor): number | undefin
 }
 
 function mean(values: readonly (number | undefined)[]): number | undefined {
-  const known = values.filter((value) => value !== undefined)
-  if (known.length === 0) return undefined
-  return known.reduce((sum, value) => sum + value / known.length, 0)
+  let sum = 0
+  let count = 0
+  for (const value of values) {
+    if (value === undefined) continue
+    sum += value
+    count += 1
+  }
+  if (count < 2) return count === 0 ? undefined : sum
+  return Number.isFinite(sum) ? sum / count : undefined
 }
 
 /** The mean of angles that lie on both sides of ±180°: that of their differences from the first. */
 function meanAngle(values: readonly (number | undefined)[]): number | undefined {
-  const [first, ...others] = values.filter((value) => value !== undefined)
-  if (first === undefined) return undefined
-  const differences = others.map((value) => differenceDegrees(value, first))
-  return first + (mean([0, ...differences]) ?? 0)
+  const first = values.find((value) => value !== undefined)
+  if (first === undefined || values.length === 1) return first
+  const apart = values.map((value) =>
+    value === undefined ? undefined : differenceDegrees(value, first),
+  )
+  return first + (mean(apart) ?? 0)
 }

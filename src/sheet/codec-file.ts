@@ -9,11 +9,6 @@ export function serializeSheet(sheet: Sheet): string {
   return `${escapeUnsafe(JSON.stringify(toCanonical(sheet), null, 2))}\n`
 }
 
-/** The sheet on one line without spaces, otherwise as `serializeSheet` writes it. */
-export function serializeSheetLine(sheet: Sheet): string {
-  return escapeUnsafe(JSON.stringify(toCanonical(sheet)))
-}
-
 /** What is written as an escape, so that XML can hold it and no editor turns the figures around it. */
 const UNSAFE = /\p{Bidi_Control}|\p{Noncharacter_Code_Point}|(?!\n)\p{Cc}|\p{Zl}|\p{Zp}/gu
 

@@ -1,12 +1,13 @@
 import { deflateSync, inflateSync, strFromU8, strToU8 } from 'fflate'
 import { failure, type Result, success } from '../core'
-import { serializeSheetLine } from './codec-file'
+import { toCanonical } from './canonical'
 import { MAXIMUM_INFLATED_BYTES, MAXIMUM_LINK_LENGTH } from './limits'
 import { fromBase64Url, toBase64Url } from './link/base64url'
 import { DICTIONARY_1 } from './link/dictionary-1'
 import { seal, unseal } from './link/envelope'
 import { findLink } from './link/find-link'
-import { parseSheetText } from './parse-sheet'
+import { pack, unpack } from './link/pack'
+import { parseSheet } from './parse-sheet'
 import { type SheetResult, sheetFailure } from './sheet-result'
 import type { Sheet } from './types'
 
@@ -15,12 +16,13 @@ const dictionary = strToU8(DICTIONARY_1)
 
 /**
  * The fragment of an address that carries the whole sheet: `#sheet=1.` and base64url of its JSON,
- * deflated against a dictionary that never changes for this version. It may be longer than a link that
- * can be read: compare its length with `MAXIMUM_LINK_LENGTH`, or ask `toLink`.
+ * packed and deflated against a dictionary that never changes for this version. One that is longer
+ * than `MAXIMUM_LINK_LENGTH` cannot be read again: such a sheet goes as a file.
  */
 export function serializeLink(sheet: Sheet): string {
-  const json = strToU8(serializeSheetLine(sheet))
-  return `#sheet=${VERSION}.${toBase64Url(seal(deflateSync(json, { level: 9, mem: 12, dictionary })))}`
+  const json = strToU8(JSON.stringify(pack(toCanonical(sheet))))
+  const content = deflateSync(json, { level: 9, mem: 12, dictionary })
+  return `#sheet=${VERSION}.${toBase64Url(seal(content))}`
 }
 
 const NO_LINK =
@@ -34,7 +36,7 @@ const NEWER =
 const UNKNOWN = 'This link has a form that no version of the program has made. Copy it again.'
 const TOO_LONG = 'This link is too long to be one of a sheet. Ask for the sheet as a file.'
 const TOO_LARGE = 'What this link holds is too large for a sheet, so it was not opened.'
-const NOT_DEFLATED = 'This link does not hold a sheet. Ask for the sheet as a file.'
+const NOT_A_SHEET = 'This link does not hold a sheet. Ask for the sheet as a file.'
 
 /**
  * The sheet that a link carries, wherever the link stands in a text and whatever host it names: only
@@ -49,8 +51,8 @@ export function parseLink(text: string): SheetResult {
   if (found.payload.length > MAXIMUM_LINK_LENGTH) return sheetFailure('', TOO_LONG)
   const content = contentOf(found.payload, found.joined)
   if (!content.ok) return sheetFailure('', content.problem)
-  const json = inflate(content.value)
-  return json.ok ? parseSheetText(json.value) : sheetFailure('', json.problem)
+  const sheet = open(content.value)
+  return sheet.ok ? parseSheet(sheet.value) : sheetFailure('', sheet.problem)
 }
 
 function contentOf(payload: string, joined: string): Result<Uint8Array> {
@@ -61,6 +63,16 @@ function contentOf(payload: string, joined: string): Result<Uint8Array> {
   return failure(direct.problem === 'cut' ? CUT : ALTERED)
 }
 
+function open(content: Uint8Array): Result<unknown> {
+  const json = inflate(content)
+  if (!json.ok) return json
+  try {
+    return success(unpack(JSON.parse(json.value)))
+  } catch {
+    return failure(NOT_A_SHEET)
+  }
+}
+
 /** Inflates into a space of fixed size, so that a few bytes cannot claim gigabytes. */
 function inflate(content: Uint8Array): Result<string> {
   const space = new Uint8Array(MAXIMUM_INFLATED_BYTES + 1)
@@ -68,6 +80,6 @@ function inflate(content: Uint8Array): Result<string> {
     const bytes = inflateSync(content, { dictionary, out: space })
     return bytes.length > MAXIMUM_INFLATED_BYTES ? failure(TOO_LARGE) : success(strFromU8(bytes))
   } catch (error) {
-    return failure(error instanceof RangeError ? TOO_LARGE : NOT_DEFLATED)
+    return failure(error instanceof RangeError ? TOO_LARGE : NOT_A_SHEET)
   }
 }

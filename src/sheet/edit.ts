@@ -1,6 +1,15 @@
 import { failure, type Result, success } from '../core'
 import { toCanonical } from './canonical'
 import {
+  type AddChannel,
+  addChannel,
+  type RemoveChannel,
+  removeChannel,
+  type SetChannel,
+  setChannel,
+} from './edits/channels'
+import { type ClearLimits, clearLimits } from './edits/clear-limits'
+import {
   type SetDetails,
   type SetDrawing,
   type SetJob,
@@ -10,6 +19,22 @@ import {
 } from './edits/details'
 import { type DragTip, dragTip } from './edits/drag-tip'
 import type { EditKind } from './edits/edit-kind'
+import {
+  type ClearHand,
+  clearHand,
+  type RemoveHandArrow,
+  removeHandArrow,
+  type SetHandArrow,
+  setHandArrow,
+} from './edits/hand'
+import {
+  type AddInstrument,
+  addInstrument,
+  type RemoveInstrument,
+  removeInstrument,
+  type SetInstrument,
+  setInstrument,
+} from './edits/instruments'
 import {
   type AddPhasor,
   type AddRows,
@@ -30,6 +55,7 @@ import {
   setReading,
 } from './edits/readings'
 import { type RemovePhasor, removePhasor } from './edits/remove-phasor'
+import { type ReversePhasor, reversePhasor } from './edits/reverse-phasor'
 import { type SetKnown, setKnown } from './edits/set-known'
 import { type SetPhasor, setPhasor } from './edits/set-phasor'
 import { type SetValue, setValue } from './edits/set-value'
@@ -60,8 +86,10 @@ interface EditByKind {
   readonly 'remove-phasor': RemovePhasor
   readonly 'duplicate-phasor': DuplicatePhasor
   readonly 'move-phasor': MovePhasor
+  readonly 'reverse-phasor': ReversePhasor
   readonly 'set-phasor': SetPhasor
   readonly 'set-value': SetValue
+  readonly 'clear-limits': ClearLimits
   readonly 'set-known': SetKnown
   readonly 'drag-tip': DragTip
   readonly 'place-phasor': PlacePhasor
@@ -73,6 +101,15 @@ interface EditByKind {
   readonly 'remove-reading': RemoveReading
   readonly 'set-reading': SetReading
   readonly 'add-rows': AddRows
+  readonly 'add-instrument': AddInstrument
+  readonly 'remove-instrument': RemoveInstrument
+  readonly 'set-instrument': SetInstrument
+  readonly 'add-channel': AddChannel
+  readonly 'remove-channel': RemoveChannel
+  readonly 'set-channel': SetChannel
+  readonly 'set-hand-arrow': SetHandArrow
+  readonly 'remove-hand-arrow': RemoveHandArrow
+  readonly 'clear-hand': ClearHand
   readonly several: Several
 }
 
@@ -89,7 +126,9 @@ const several: EditKind<Several> = {
     return changed
   },
   describe: (sheet, { edits }) => {
-    const [first, ...others] = edits
+    // Where the drawing is pinned together with an edit, the edit is what was done.
+    const told = edits.filter(({ kind }) => kind !== 'set-drawing')
+    const [first, ...others] = told.length > 0 ? told : edits
     if (first === undefined) return 'Change nothing'
     const description = describeEdit(sheet, first)
     return others.length === 0 ? description : `${description}, and ${others.length} more`
@@ -104,8 +143,10 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'remove-phasor': removePhasor,
   'duplicate-phasor': duplicatePhasor,
   'move-phasor': movePhasor,
+  'reverse-phasor': reversePhasor,
   'set-phasor': setPhasor,
   'set-value': setValue,
+  'clear-limits': clearLimits,
   'set-known': setKnown,
   'drag-tip': dragTip,
   'place-phasor': placePhasor,
@@ -117,6 +158,15 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'remove-reading': removeReading,
   'set-reading': setReading,
   'add-rows': addRows,
+  'add-instrument': addInstrument,
+  'remove-instrument': removeInstrument,
+  'set-instrument': setInstrument,
+  'add-channel': addChannel,
+  'remove-channel': removeChannel,
+  'set-channel': setChannel,
+  'set-hand-arrow': setHandArrow,
+  'remove-hand-arrow': removeHandArrow,
+  'clear-hand': clearHand,
   several,
 }
 

@@ -1,7 +1,8 @@
-import { type Complex, fromPolar, isFiniteComplex, resultant, toPolar } from '../core'
+import { type Complex, fromPolar, magnitudeOf, resultant, toPolar, ZERO } from '../core'
 import { type AsRead, asReadOf, type KnownParts } from './as-read'
 import type { Evaluation, PhasorEvaluation, PolarValue, SumEvaluation } from './evaluation'
-import type { Phasor, PhasorId, Sheet, Sum } from './types'
+import { evaluateHand } from './hand/evaluate-hand'
+import type { Id, Phasor, PhasorId, Sheet, Sum } from './types'
 
 /** What the program says of a sheet. */
 export function evaluate(sheet: Sheet): Evaluation {
@@ -10,46 +11,78 @@ export function evaluate(sheet: Sheet): Evaluation {
 
 /**
  * The half of the evaluation that keeps up with a drag: the phasors as typed and read, and of each sum
- * the exact resultant and how far it is from what was measured. Nothing is solved or adjusted.
+ * the exact resultant and how far it is from what was measured, and what a hand drew beside what it
+ * stands for. Nothing is solved or adjusted.
  */
 export function quick(sheet: Sheet): Evaluation {
   const asRead = asReadOf(sheet)
   const phasors = sheet.phasors.map((phasor) => evaluatePhasor(phasor, asRead))
   const values = new Map<PhasorId, PhasorEvaluation>()
   for (const phasor of phasors) values.set(phasor.id, phasor)
-  return { phasors, sums: (sheet.sums ?? []).map((sum) => evaluateSum(sum, values)) }
+  const sums = (sheet.sums ?? []).map((sum) => evaluateSum(sum, values))
+  const hand = evaluateHand(sheet, {
+    phasor: (id) => complexOf(values.get(id)),
+    resultant: (id) => resultantIn(sums, id),
+  })
+  return { phasors, sums, hand }
 }
 
+function resultantIn(sums: readonly SumEvaluation[], id: Id): Complex | undefined {
+  const found = sums.find((sum) => sum.id === id)?.resultant
+  return found && { re: found.real, im: found.imaginary }
+}
+
+/** What is known is written down part by part; spreading objects would take longer than the sums. */
+type Writable<Part> = { -readonly [field in keyof Part]: Part[field] }
+
+const evaluations = new WeakMap<Phasor, PhasorEvaluation>()
+
+/** A phasor that neither changed itself nor by its readings keeps its evaluation, the object itself. */
 function evaluatePhasor(phasor: Phasor, { values }: AsRead): PhasorEvaluation {
   const asRead = values.get(phasor.id) ?? {}
+  const before = evaluations.get(phasor)
+  if (before && isSame(before.asRead, asRead)) return before
+  const evaluation = evaluateAnew(phasor, asRead)
+  evaluations.set(phasor, evaluation)
+  return evaluation
+}
+
+function isSame(one: KnownParts, other: KnownParts): boolean {
+  return one === other || (one.magnitude === other.magnitude && one.angle === other.angle)
+}
+
+function evaluateAnew(phasor: Phasor, asRead: KnownParts): PhasorEvaluation {
   const { magnitude, angle } = asRead
+  const value = complexOfPhasor(phasor, asRead)
   const isAngleOpen = angle === undefined || magnitude === 0
-  return {
+  const evaluation: Writable<PhasorEvaluation> = {
     id: phasor.id,
-    ...(magnitude === undefined ? {} : { magnitude }),
-    ...(isAngleOpen ? {} : { angle }),
-    ...partsOf(phasor, asRead),
     asRead,
     magnitudeState: magnitude === undefined ? 'open' : 'given',
     angleState: isAngleOpen ? 'open' : 'given',
   }
+  if (magnitude !== undefined) evaluation.magnitude = magnitude
+  if (!isAngleOpen) evaluation.angle = angle
+  if (value !== undefined) {
+    evaluation.real = value.re
+    evaluation.imaginary = value.im
+  }
+  return evaluation
 }
 
-/** Real and imaginary part where both are settled: those of a phasor typed so are not computed anew. */
-function partsOf(
+/** The value where both parts are settled: that of a phasor typed rectangular is not computed anew. */
+function complexOfPhasor(
   { real, imaginary }: Phasor,
   { magnitude, angle }: KnownParts,
-): { readonly real?: number; readonly imaginary?: number } {
-  if (magnitude === 0) return { real: 0, imaginary: 0 }
-  if (magnitude === undefined || angle === undefined) return {}
+): Complex | undefined {
+  if (magnitude === 0) return ZERO
+  if (magnitude === undefined || angle === undefined) return undefined
   if (real !== undefined && imaginary !== undefined) {
-    const typed = toPolar({ re: real.value, im: imaginary.value })
-    if (typed.magnitude === magnitude && typed.angle === angle) {
-      return { real: real.value, imaginary: imaginary.value }
-    }
+    const typed = { re: real.value, im: imaginary.value }
+    const polar = toPolar(typed)
+    if (polar.magnitude === magnitude && polar.angle === angle) return typed
   }
-  const { re, im } = fromPolar(magnitude, angle)
-  return { real: re, imaginary: im }
+  return fromPolar(magnitude, angle)
 }
 
 /** A sum's resultant of its terms, and how far it is from what it must equal. */
@@ -63,17 +96,19 @@ export function evaluateSum(
   }))
   const known = terms.flatMap(({ value, sign }) => (value === undefined ? [] : [{ value, sign }]))
   const total = resultant(known)
-  const isKnown = terms.length > 0 && known.length === terms.length && isFiniteComplex(total)
+  const isKnown =
+    terms.length > 0 && known.length === terms.length && Number.isFinite(magnitudeOf(total))
   const measured = typeof sum.equals === 'string' ? phasors.get(sum.equals) : undefined
-  const target = sum.equals === 0 ? { re: 0, im: 0 } : complexOf(measured)
-  const percentOf = measured?.magnitude || largestMagnitude(sum, phasors)
+  const target = sum.equals === 0 ? ZERO : complexOf(measured)
+  const gap =
+    isKnown && target !== undefined
+      ? gapBetween(target, known, [measured?.magnitude ?? 0, largestMagnitude(sum, phasors)])
+      : undefined
   return {
     id: sum.id,
     ...(isKnown ? { resultant: toPolarValue(total) } : {}),
     ...(measured === undefined ? {} : { measured: measured.asRead }),
-    ...(isKnown && target !== undefined
-      ? { closingError: gapBetween(target, known, percentOf) }
-      : {}),
+    ...(gap === undefined ? {} : { closingError: gap }),
   }
 }
 
@@ -86,12 +121,16 @@ function toPolarValue(value: Complex): PolarValue {
   return { ...toPolar(value), real: value.re, imaginary: value.im }
 }
 
-/** What is missing from the sum: measured − resultant, added up in one go so that little is rounded. */
+/**
+ * What is missing from the sum: measured − resultant, added up in one go so that little is rounded. Its
+ * percentage is of the first size that is more than nothing; without one there is no gap either.
+ * Undefined where the gap is too large to be a figure.
+ */
 function gapBetween(
   target: Complex,
   terms: readonly { readonly value: Complex; readonly sign: 1 | -1 }[],
-  percentOf: number,
-): NonNullable<SumEvaluation['closingError']> {
+  sizes: readonly number[],
+): SumEvaluation['closingError'] {
   const { magnitude, angle } = toPolar(
     resultant([
       { value: target },
@@ -101,7 +140,9 @@ function gapBetween(
       })),
     ]),
   )
-  return { magnitude, angle, percent: percentOf === 0 ? 0 : (100 * magnitude) / percentOf }
+  if (!Number.isFinite(magnitude)) return undefined
+  const percents = sizes.map((size) => (magnitude / size) * 100)
+  return { magnitude, angle, percent: percents.find(Number.isFinite) ?? 0 }
 }
 
 function largestMagnitude(

@@ -93,6 +93,38 @@ export interface Caution {
   readonly text: string
 }
 
+/**
+ * What a hand drew, read off through the scale, beside what it stands for: a phasor, or for the closing
+ * arrow the exact resultant. Errors are drawn − exact. Values are those of the phasor, so an arrow that
+ * was drawn reversed for a negative term counts turned round; the error vectors are as they lie on the
+ * paper. What is open is left out: all of it where no scale is stated, the errors where what the arrow
+ * stands for has no value yet.
+ */
+export interface HandEvaluation {
+  readonly id: Id
+  readonly magnitude?: number
+  /** Left out of an arrow without length. */
+  readonly angle?: number
+  /** In the unit; positive: drawn too long. */
+  readonly magnitudeError?: number
+  /** Degrees in (−180°, 180°]; positive: drawn too far anticlockwise. */
+  readonly angleError?: number
+  /** How far the vector as drawn is from the exact one, in the unit. */
+  readonly vectorError?: number
+  /** What the hand did wrong in this arrow alone: of a closing arrow, how it misses what it joins. */
+  readonly ownError?: PolarValue
+  /**
+   * How far its tail is off because of the arrows before it; of a closing arrow, how far what it joins
+   * is off. Own and inherited error add up to that of its tip (of a closing arrow, of its vector).
+   */
+  readonly inheritedError?: PolarValue
+  /** The vector error on the paper. */
+  readonly millimetres?: number
+  /** The most that the vector error may be on the paper, in millimetres, by the drawing's tolerance. */
+  readonly allowed?: number
+  readonly within?: boolean
+}
+
 /** What the program says of a sheet. A part that the program cannot compute is left out altogether. */
 export interface Evaluation {
   readonly phasors: readonly PhasorEvaluation[]
@@ -104,4 +136,5 @@ export interface Evaluation {
   readonly suspects?: readonly { readonly reading: Id; readonly score: number }[]
   readonly elements?: readonly ElementEvaluation[]
   readonly cautions?: readonly Caution[]
+  readonly hand: readonly HandEvaluation[]
 }

@@ -1,4 +1,5 @@
 import { asReadOf, readingsOf } from './as-read'
+import { referenceOf } from './reference'
 import type { PhasorId, Sheet } from './types'
 
 /** Which parts of a phasor cannot be dragged, and a sentence that says why. */
@@ -36,6 +37,5 @@ export function heldBy(sheet: Sheet, id: PhasorId): Held {
 
 /** Whether a phasor is the reference, named so or by being at 0°. */
 export function isReferenceAtZero(sheet: Sheet, id: PhasorId): boolean {
-  const { reference, values } = asReadOf(sheet)
-  return reference === id && values.get(id)?.angle === 0
+  return referenceOf(sheet) === id && asReadOf(sheet).values.get(id)?.angle === 0
 }

@@ -1,13 +1,12 @@
-import * as v from 'valibot'
 import { toCanonical } from './canonical'
 import { checkFigures } from './checks/figures'
 import { checkIds } from './checks/ids'
 import { findUnplain } from './checks/plain'
 import { checkReferences } from './checks/references'
 import { checkRelations } from './checks/relations'
+import { findMisshapen, isShapedSheet } from './checks/shape'
 import { MAXIMUM_ERRORS, MAXIMUM_FILE_BYTES } from './limits'
-import { sheetSchema } from './schema/sheet'
-import { joinPath, type SheetError, type SheetResult, sheetFailure } from './sheet-result'
+import { type SheetError, type SheetResult, sheetFailure } from './sheet-result'
 import type { Sheet } from './types'
 
 /**
@@ -17,9 +16,9 @@ import type { Sheet } from './types'
 export function parseSheet(input: unknown): SheetResult {
   const unplain = firstOf(findUnplain(input))
   if (unplain.length > 0) return { ok: false, errors: unplain }
-  const newer = versionAbove(input)
-  if (newer !== undefined) return sheetFailure('version', newer)
-  if (!isShapedRight(input)) return { ok: false, errors: findMisshapen(input) }
+  const foreign = whyForeign(input)
+  if (foreign !== undefined) return { ok: false, errors: [foreign] }
+  if (!isShapedSheet(input)) return { ok: false, errors: firstOf(findMisshapen(input)) }
   const errors = findContradictions(input)
   return errors.length === 0 ? { ok: true, sheet: toCanonical(input) } : { ok: false, errors }
 }
@@ -40,17 +39,8 @@ export function parseSheetText(text: string): SheetResult {
 
 /** Everything that is wrong with a sheet that an edit made; empty where nothing is. */
 export function findErrors(sheet: Sheet): readonly SheetError[] {
-  const unplain = firstOf(findUnplain(sheet))
-  if (unplain.length > 0) return unplain
-  return isShapedRight(sheet) ? findContradictions(sheet) : findMisshapen(sheet)
-}
-
-function isShapedRight(input: unknown): input is Sheet {
-  return v.is(sheetSchema, input)
-}
-
-function findMisshapen(input: unknown): readonly SheetError[] {
-  return firstOf((v.safeParse(sheetSchema, input).issues ?? []).map(toError))
+  const errors = firstOf(both(findUnplain(sheet), findMisshapen(sheet)))
+  return errors.length > 0 ? errors : findContradictions(sheet)
 }
 
 function findContradictions(sheet: Sheet): readonly SheetError[] {
@@ -72,19 +62,20 @@ function firstOf(errors: Iterable<SheetError>): readonly SheetError[] {
   return first
 }
 
-function toError(issue: v.BaseIssue<unknown>): SheetError {
-  let path = ''
-  for (const { key } of issue.path ?? []) {
-    path = joinPath(path, typeof key === 'number' ? key : String(key))
+/** Why a value is no sheet of this version at all, so that its parts need not be looked at. */
+function whyForeign(input: unknown): SheetError | undefined {
+  if (typeof input !== 'object' || input === null || Array.isArray(input)) {
+    return { path: '', message: 'This is not a sheet: a sheet is an object, in braces.' }
   }
-  return { path, message: issue.message }
-}
-
-function versionAbove(input: unknown): string | undefined {
-  if (typeof input !== 'object' || input === null || !('version' in input)) return undefined
-  const { version } = input
-  if (typeof version !== 'number' || version <= 1) return undefined
-  return `This sheet was made by a newer version of the program (${version}): open it there, or bring this one up to date.`
+  if (!('format' in input) || input.format !== 'phasogon-sheet') {
+    const message = 'This is not a sheet: its format must be "phasogon-sheet".'
+    return { path: 'format', message }
+  }
+  if ('version' in input && typeof input.version === 'number' && input.version > 1) {
+    const message = `This sheet was made by a newer version of the program (${input.version}): open it there, or bring this one up to date.`
+    return { path: 'version', message }
+  }
+  return undefined
 }
 
 function utf8Length(text: string): number {

@@ -49,6 +49,8 @@ const names: { readonly [name: string]: Column } = {
 
 const usualOrder: readonly Column[] = ['label', 'magnitude', 'angle', 'quantity', 'limit', 'known']
 
+const QUANTITIES: readonly Quantity[] = ['voltage', 'current', 'impedance', 'power', 'other']
+
 const quantityOfSymbol: { readonly [symbol: string]: Quantity } = {
   I: 'current',
   i: 'current',
@@ -114,18 +116,24 @@ function readRow(
 }
 
 function quantityOf(named: string, magnitude: string, label: string): Result<Quantity> {
-  const all: readonly Quantity[] = ['voltage', 'current', 'impedance', 'power', 'other']
   if (named !== '') {
-    const found = all.find((quantity) => quantity === named.toLowerCase())
-    return found ? success(found) : failure(`“${named}” is no quantity. Use ${all.join(', ')}.`)
+    const found = QUANTITIES.find((quantity) => quantity === named.toLowerCase())
+    return found
+      ? success(found)
+      : failure(`“${named}” is no quantity. Use ${QUANTITIES.join(', ')}.`)
   }
-  const fits = all.find(
+  return success(quantityOfCell(magnitude, label))
+}
+
+/** The quantity of the unit in a cell, else that of a label's first letter, else voltage. */
+export function quantityOfCell(magnitude: string, label: string): Quantity {
+  const fits = QUANTITIES.find(
     (quantity) =>
       unitOf(quantity) !== '' &&
       magnitude.includes(unitOf(quantity)) &&
       parseCell(magnitude, { unit: unitOf(quantity) }).ok,
   )
-  return success(fits ?? quantityOfSymbol[label[0] ?? ''] ?? 'voltage')
+  return fits ?? quantityOfSymbol[label[0] ?? ''] ?? 'voltage'
 }
 
 interface Values {

@@ -6,51 +6,53 @@ const ENTITIES: Readonly<Record<string, string>> = {
   apos: "'",
 }
 
+/** What opens with "<", the longer openings first; only the text of sections counts. */
+const MARKUP = [
+  { opens: '<![CDATA[', closes: ']]>', isText: true },
+  { opens: '<!--', closes: '-->', isText: false },
+  { opens: '<', closes: '>', isText: false },
+] as const
+
+const START = '<metadata'
+const END = '</metadata'
+
 /**
  * The text of the sheet that an SVG drawing carries in its metadata; undefined where it carries none.
  * The drawing is read as plain text, so nothing in it is run, and `parseSheetText` has yet to judge
  * what is found.
  */
 export function extractSheetText(svg: string): string | undefined {
-  for (let end = 0; ; ) {
-    const start = svg.indexOf('<metadata', end)
+  for (let at = 0; ; ) {
+    const start = svg.indexOf(START, at)
     const open = start < 0 ? -1 : svg.indexOf('>', start)
-    const close = open < 0 ? -1 : svg.indexOf('</metadata', open)
-    if (close < 0) return undefined
-    const text = toPlainText(svg.slice(open + 1, close))
+    const found = open < 0 ? undefined : textUntil(svg, open + 1, END)
+    if (found === undefined) return undefined
+    const { text, end } = found
     const [from, to] = [text.indexOf('{'), text.lastIndexOf('}')]
-    if (from >= 0 && to > from && text.includes('phasogon-sheet')) return text.slice(from, to + 1)
-    end = close
+    if (text.includes('phasogon-sheet') && from >= 0 && to > from) return text.slice(from, to + 1)
+    at = end
   }
 }
 
-/** What is left of markup when its tags and comments are taken out and its entities are read. */
-function toPlainText(markup: string): string {
+/** The text in markup from a place up to a tag, other tags and comments left out; undefined where that tag never comes. */
+function textUntil(
+  markup: string,
+  start: number,
+  tag: string,
+): { readonly text: string; readonly end: number } | undefined {
   const pieces: string[] = []
-  for (let at = 0; at < markup.length; ) {
-    const special = SPECIAL.find(({ opens }) => markup.startsWith(opens, at))
-    if (special !== undefined) {
-      const from = at + special.opens.length
-      const end = markup.indexOf(special.closes, from)
-      const to = end < 0 ? markup.length : end
-      if (special.isKept) pieces.push(markup.slice(from, to))
-      at = to + special.closes.length
-    } else {
-      const next = markup.indexOf('<', at)
-      const to = next < 0 ? markup.length : next
-      pieces.push(readEntities(markup.slice(at, to)))
-      at = to
-    }
+  for (let at = start; at < markup.length; ) {
+    if (markup.startsWith(tag, at)) return { text: pieces.join(''), end: at }
+    const found = MARKUP.find(({ opens }) => markup.startsWith(opens, at))
+    const from = at + (found?.opens.length ?? 0)
+    const end = markup.indexOf(found?.closes ?? '<', from)
+    const to = end < 0 ? markup.length : end
+    if (found === undefined) pieces.push(readEntities(markup.slice(from, to)))
+    else if (found.isText) pieces.push(markup.slice(from, to))
+    at = to + (found?.closes.length ?? 0)
   }
-  return pieces.join('')
+  return undefined
 }
-
-/** What opens with "<", the longer openings first. */
-const SPECIAL = [
-  { opens: '<![CDATA[', closes: ']]>', isKept: true },
-  { opens: '<!--', closes: '-->', isKept: false },
-  { opens: '<', closes: '>', isKept: false },
-] as const
 
 function readEntities(text: string): string {
   return text.replace(/&(?:#(\d{1,7})|#[xX]([0-9a-fA-F]{1,6})|(\w{1,6}));/g, (whole, ...groups) => {

@@ -186,17 +186,22 @@ function digitsOfSum(sheet: Sheet, sum: Sum): { magnitude: Digits; angle: Digits
   const all = sheet.phasors
     .filter(({ id }) => ids.has(id))
     .map((phasor) => digitsOf(phasor, readings))
+  const sizes = all.map((each) => each.magnitude)
   return {
-    magnitude: all.map((each) => each.magnitude).reduce(finer, {}),
+    magnitude: sizes.length === 0 ? {} : sizes.reduce(finer),
     angle: { resolution: Math.min(0.1, ...all.flatMap(({ angle }) => angle.resolution ?? [])) },
   }
 }
 
+/** The finer of two digits; a plain figure is kept in its unit where both are plain. */
 function finer(one: Digits, other: Digits): Digits {
-  const { resolution: first } = one
-  const { resolution: second } = other
-  if (first === undefined) return other
-  return second === undefined ? one : { resolution: Math.min(first, second) }
+  const { resolution: first = Number.POSITIVE_INFINITY } = one
+  const { resolution: second = Number.POSITIVE_INFINITY } = other
+  const resolution = Math.min(first, second)
+  return {
+    ...(Number.isFinite(resolution) && { resolution }),
+    ...(one.like !== undefined && other.like !== undefined && { like: 1 }),
+  }
 }
 
 function signed(text: string): string {

@@ -1,32 +1,36 @@
 import { useState } from 'react'
-import { emptySheet, serializeLink } from '../../sheet'
-import { MySheetsVerb } from '../keep'
+import { emptySheet } from '../../sheet'
+import { MySheetsVerb, useSaveToFile } from '../keep'
+import { linkTo, ShareMenu, warnedLength } from '../share'
 import { usePageStore } from '../store'
 import { CopyLinkDialog } from './CopyLinkDialog'
 import { OpenDialog } from './OpenDialog'
 
-const warnedLength = 2_000
-
 /** New sheet, open, and copy link: the ways in and out that need no file. */
 export function LinkVerbs() {
   const store = usePageStore()
+  const save = useSaveToFile()
   const [opening, setOpening] = useState(false)
   const [refusedLink, setRefusedLink] = useState<string>()
 
   const copy = async () => {
     const { history, notify } = store.getState()
-    const link = new URL(serializeLink(history.sheet), window.location.href).href
+    const link = linkTo(history.sheet)
     try {
       await navigator.clipboard.writeText(link)
     } catch {
       setRefusedLink(link)
       return
     }
-    const long =
-      link.length > warnedLength
-        ? ` It has ${link.length} characters, and some mail programs cut links above ${warnedLength}: send the saved drawing instead, which carries the sheet too.`
-        : ''
-    notify({ tone: 'news', text: `Link copied. Whoever opens it sees this sheet.${long}` })
+    const isLong = link.length > warnedLength
+    const warning = isLong
+      ? ` It has ${link.length} characters, and some mail programs cut links above ${warnedLength}: save the sheet to a file and send that instead.`
+      : ''
+    notify({
+      tone: 'news',
+      text: `Link copied. Whoever opens it sees this sheet.${warning}`,
+      ...(isLong && { verbs: [{ verb: 'Save to a file', act: save }] }),
+    })
   }
 
   return (
@@ -45,6 +49,7 @@ export function LinkVerbs() {
       <button type="button" className="verb" onClick={copy}>
         Copy link
       </button>
+      <ShareMenu />
       {opening && <OpenDialog onClose={() => setOpening(false)} />}
       {refusedLink !== undefined && (
         <CopyLinkDialog link={refusedLink} onClose={() => setRefusedLink(undefined)} />

@@ -1,4 +1,11 @@
-import { type KeyboardEvent, useId, useRef, useState } from 'react'
+import {
+  type KeyboardEvent,
+  type MouseEvent,
+  useId,
+  useLayoutEffect,
+  useRef,
+  useState,
+} from 'react'
 
 /** What a cell needs: what it shows at rest, what is edited, and what to do with the new text. */
 export interface CellProperties {
@@ -32,22 +39,35 @@ export function Cell(properties: CellProperties) {
   const [entry, setEntry] = useState<Entry>()
   const [problem, setProblem] = useState<string>()
   const input = useRef<HTMLInputElement>(null)
+  const entering = useRef(false)
   const problemId = useId()
+
+  // At once, before the next key: a selection that came later would swallow what was typed by then.
+  useLayoutEffect(() => {
+    if (!entering.current || entry === undefined) return
+    entering.current = false
+    input.current?.select()
+  }, [entry])
 
   const changed = entry !== undefined && entry.text !== entry.opened
   if (entry && !changed && entry.opened !== typed) setEntry({ text: typed, opened: typed })
 
+  // Enter commits and then leaves the cell, which commits too, before the cell is rendered anew.
+  const open = useRef(entry)
+  open.current = entry
+
   const close = () => {
+    open.current = undefined
     setEntry(undefined)
     setProblem(undefined)
   }
 
   const commit = (): boolean => {
-    if (!entry || !changed) {
+    if (!open.current || open.current.text === open.current.opened) {
       close()
       return true
     }
-    const found = onCommit(entry.text.trim())
+    const found = onCommit(open.current.text.trim())
     if (found === undefined) close()
     else setProblem(found)
     return found === undefined
@@ -84,9 +104,10 @@ export function Cell(properties: CellProperties) {
         spellCheck={false}
         onFocus={() => {
           if (readOnly || entry !== undefined) return
+          entering.current = true
           setEntry({ text: typed, opened: typed })
-          requestAnimationFrame(() => input.current?.select())
         }}
+        onMouseDown={focusWhole}
         onChange={(event) => {
           setEntry({ text: event.target.value, opened: entry?.opened ?? typed })
           setProblem(undefined)
@@ -101,6 +122,13 @@ export function Cell(properties: CellProperties) {
       )}
     </div>
   )
+}
+
+/** Enters a cell by a click without putting the caret into it, so that the whole text stays selected. */
+function focusWhole(event: MouseEvent<HTMLInputElement>): void {
+  if (document.activeElement === event.currentTarget) return
+  event.preventDefault()
+  event.currentTarget.focus()
 }
 
 /** Moves the focus to the same column of the next row, or of the one before. */

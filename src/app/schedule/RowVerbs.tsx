@@ -1,4 +1,5 @@
 import { describeRemoval, type Id, newId, type Sheet } from '../../sheet'
+import { Direction } from '../readings'
 import { labelOf, usePageStore } from '../store'
 
 /** What can be done to the picked row as a whole. */
@@ -51,6 +52,7 @@ export function RowVerbs({ sheet, id }: { readonly sheet: Sheet; readonly id: Id
           Delete
         </button>
       </div>
+      <Direction phasor={phasor} />
       {along.length > 0 && <p>{`Deleting it takes along: ${along.join(', ')}.`}</p>}
     </fieldset>
   )

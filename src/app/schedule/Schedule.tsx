@@ -1,4 +1,5 @@
 import { type ClipboardEvent, useMemo, useState } from 'react'
+import { flushSync } from 'react-dom'
 import { readingsByPhasor } from '../../drawing'
 import { newId, type Phasor, referenceOf, type Sheet } from '../../sheet'
 import { shownEvaluation, shownSheet, usePage, usePageStore } from '../store'
@@ -105,9 +106,8 @@ function addPhasor(
   const quantity = last?.quantity ?? 'voltage'
   const letter = { voltage: 'V', current: 'I', impedance: 'Z', power: 'S', other: 'X' }[quantity]
   const id = newId(sheet, letter)
-  if (!edit({ kind: 'add-phasor', phasor: { id, label: id, quantity } })) return
-  requestAnimationFrame(() => {
-    const row = document.querySelector(`[data-row="${id}"]`)
-    row?.querySelector<HTMLInputElement>('[data-column="label"]')?.focus()
-  })
+  // The row must stand before the next key, which is the first letter of its label.
+  flushSync(() => edit({ kind: 'add-phasor', phasor: { id, label: id, quantity } }))
+  const row = document.querySelector(`[data-row="${id}"]`)
+  row?.querySelector<HTMLInputElement>('[data-column="label"]')?.focus()
 }

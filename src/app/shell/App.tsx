@@ -1,7 +1,10 @@
+import { Suspense } from 'react'
 import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
 import { CopyBanner, KeepNotes } from '../keep'
+import { VersionNote } from '../offline'
+import { Readings } from '../readings'
 import { Schedule } from '../schedule'
 import { Sums } from '../sums'
 import { Announcer } from './Announcer'
@@ -19,11 +22,15 @@ export function App() {
       <Board />
       <div className="side">
         <KeepNotes />
+        <VersionNote />
         <Notice />
         <CopyBanner />
         <FirstVisit />
         <Schedule />
         <Sums />
+        <Suspense>
+          <Readings />
+        </Suspense>
         <section aria-label="Sheet">
           <TitleBlock />
           <DrawingSettings />

@@ -26,6 +26,8 @@ export interface SineClue {
   readonly against: PhasorIndex
   readonly sine: number
   readonly either: boolean
+  /** The angle was larger by this, as the meter saw it. */
+  readonly turn: number
 }
 
 /** What the observations say outright, before anything is solved: the best one of each kind. */
@@ -116,7 +118,7 @@ export function cluesOf(problem: PhasorProblem): Clues {
         else angles.push({ phasor: of.phasor, against: of.against, degrees: value })
         break
       case 'sine':
-        sines.push({ ...of, sine: value, either: of.either === true })
+        sines.push({ ...of, sine: value, either: of.either === true, turn: of.turn ?? 0 })
         break
       case 'power':
         findPower(powers, of.voltage, of.current).power ??= value

@@ -299,11 +299,15 @@ export class Draft {
   }
 
   #choiceOfSines(): Choice | undefined {
-    for (const { phasor, against, sine, either } of this.#clues.sines) {
+    for (const { phasor, against, sine, either, turn } of this.#clues.sines) {
       if (this.#isRelated(phasor, against)) continue
       const lead = clampedArc(Math.asin, sine)
       const angles = either ? [lead, -lead, 180 - lead, lead - 180] : [lead, 180 - lead]
-      return this.#eitherAngle(phasor, against, angles)
+      return this.#eitherAngle(
+        phasor,
+        against,
+        angles.map((angle) => angle - turn),
+      )
     }
     return undefined
   }

@@ -1,4 +1,4 @@
-import { degreesFromRadians } from '..'
+import { cosDegrees, degreesFromRadians, radiansFromDegrees, sinDegrees } from '..'
 import { type Layout, valueAt } from './layout'
 import type { ElementIndex, Observable, PhasorIndex, PhasorProblem } from './phasor-problem'
 
@@ -29,9 +29,8 @@ export class Observables {
       case 'sine':
         return this.#sine(observable, x, slope)
       case 'power':
-        return this.#power(observable.voltage, observable.current, x, slope)
       case 'reactive-power':
-        return this.#reactivePower(observable.voltage, observable.current, x, slope)
+        return this.#turnedPower(observable, x, slope)
       case 'power-factor':
         return this.#powerFactor(observable, x, slope)
       case 'resistance':
@@ -99,11 +98,28 @@ export class Observables {
   }
 
   #sine(of: Observable & { kind: 'sine' }, x: Float64Array, slope: AddSlope): number {
-    const phi = this.#radians(of.phasor, of.against, x, () => undefined)
+    const turn = radiansFromDegrees(of.turn ?? 0)
+    const phi = this.#radians(of.phasor, of.against, x, () => undefined) + turn
     const sign = of.either === true && Math.sin(phi) < 0 ? -1 : 1
     const byAngle = sign * Math.cos(phi)
     this.#radians(of.phasor, of.against, x, (column, value) => slope(column, byAngle * value))
     return sign * Math.sin(phi)
+  }
+
+  /** Real or imaginary part of V · I* turned: the meter's channels may add an angle. */
+  #turnedPower(
+    of: Observable & { kind: 'power' | 'reactive-power' },
+    x: Float64Array,
+    slope: AddSlope,
+  ): number {
+    const { voltage, current, turn = 0 } = of
+    const [cosine, sine] = [cosDegrees(turn), sinDegrees(turn)]
+    const [p, q] = of.kind === 'power' ? [cosine, -sine] : [sine, cosine]
+    const power = this.#power(voltage, current, x, (column, value) => slope(column, p * value))
+    const reactive = this.#reactivePower(voltage, current, x, (column, value) =>
+      slope(column, q * value),
+    )
+    return p * power + q * reactive
   }
 
   #power(voltage: PhasorIndex, current: PhasorIndex, x: Float64Array, slope: AddSlope): number {
@@ -141,7 +157,8 @@ export class Observables {
     x: Float64Array,
     slope: AddSlope,
   ): number {
-    const phi = this.#radians(of.voltage, of.current, x, () => undefined)
+    const turn = radiansFromDegrees(of.turn ?? 0)
+    const phi = this.#radians(of.voltage, of.current, x, () => undefined) + turn
     const lags = Math.sin(phi) >= 0
     const isWrong = of.sense !== undefined && (of.sense === 'lags') !== lags
     const byAngle = (isWrong ? 1 : -1) * Math.sin(phi)

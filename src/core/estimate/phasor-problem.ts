@@ -7,7 +7,10 @@ export type ElementIndex = number
 /** The place of a shared error in `PhasorProblem.sharedErrors`. */
 export type SharedErrorIndex = number
 
-/** What kind of thing was observed. Angles are in degrees, anticlockwise positive; the rest in SI units. */
+/**
+ * What kind of thing was observed. Angles are in degrees, anticlockwise positive; the rest in SI units.
+ * `turn`: by how many degrees the angle between the two was larger as the meter saw it.
+ */
 export type Observable =
   | { readonly kind: 'magnitude' | 'real' | 'imaginary'; readonly phasor: PhasorIndex }
   /** How far a phasor is ahead of another, or of the real axis where there is no other. */
@@ -18,12 +21,14 @@ export type Observable =
       readonly phasor: PhasorIndex
       readonly against: PhasorIndex
       readonly either?: boolean
+      readonly turn?: number
     }
   /** Real and imaginary part of V · I*: positive reactive power where the current lags. */
   | {
       readonly kind: 'power' | 'reactive-power'
       readonly voltage: PhasorIndex
       readonly current: PhasorIndex
+      readonly turn?: number
     }
   /** cos φ between the two; `sense` is the current's, where it was noted. */
   | {
@@ -31,6 +36,7 @@ export type Observable =
       readonly voltage: PhasorIndex
       readonly current: PhasorIndex
       readonly sense?: 'leads' | 'lags'
+      readonly turn?: number
     }
   | {
       readonly kind: 'resistance' | 'reactance' | 'inductance' | 'capacitance'

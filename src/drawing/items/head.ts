@@ -56,11 +56,11 @@ function outlineOf(
       const notch = notchOf(back, reach, width)
       return [
         [0, 0],
-        [back, reach],
-        [back + notch / 4, reach - width * 0.8],
+        [back - notch / 4, reach],
+        [back, reach - width * 0.8],
         [notch, 0],
-        [back + notch / 4, width * 0.8 - reach],
-        [back, -reach],
+        [back, width * 0.8 - reach],
+        [back - notch / 4, -reach],
       ]
     }
     case 'hollow':

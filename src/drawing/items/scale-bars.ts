@@ -1,8 +1,8 @@
 import type { Quantity, UnitsPerCentimetre } from '../../sheet'
 import { measureText } from '../font/measure'
 import { type Box, joinBoxes, NO_BOX } from '../geometry'
-import { QUANTITIES } from '../placement/place'
 import type { Item, TextRun } from '../scene'
+import { QUANTITIES } from '../text/quantities'
 import { formatScale } from '../text/quantity-text'
 import type { Palette } from '../theme'
 

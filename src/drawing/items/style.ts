@@ -36,10 +36,10 @@ export const HEAD_SHAPES: { readonly [quantity in Quantity]: HeadShape } = {
   other: 'barb',
 }
 
-/** Length and half breadth of a head on a shaft of 0.5 mm. */
-const HEADS: { readonly [shape in HeadShape]: readonly [number, number] } = {
+/** Length and half breadth of each head on a shaft of 0.5 mm, in millimetres. */
+export const HEADS: { readonly [shape in HeadShape]: readonly [number, number] } = {
   closed: [4.4, 1.15],
-  open: [3.8, 1.5],
+  open: [4.2, 1.5],
   hollow: [4.8, 1.5],
   double: [5.6, 1.15],
   barb: [4.6, 1.7],

@@ -4,23 +4,18 @@ import { shorten } from '../font/shorten'
 import type { Box } from '../geometry'
 import type { Item, TextRun } from '../scene'
 import { isolate } from '../text/label-runs'
-import { formatFrequency } from '../text/quantity-text'
 import type { Palette } from '../theme'
+import { shareOut } from './share-out'
 import { WIDTHS } from './style'
+import { type Field, fieldRowsOf } from './title-fields'
 
 const WIDTH = 110
 const TITLE_HEIGHT = 9.5
 const ROW_HEIGHT = 8.6
 const PADDING = 1.8
-const COLUMNS = 3
 const CAPTION = { face: 'sans', size: 2.2 } as const
 const VALUE = { face: 'sans', size: 3.5 } as const
 const TITLE_SIZE = 4.4
-
-interface Cell {
-  readonly caption: string
-  readonly value: string
-}
 
 /** The title block: its outline in the lower right corner of the frame, and its items. */
 export interface TitleBlock {
@@ -30,15 +25,12 @@ export interface TitleBlock {
 
 /** How high the title block of a sheet stands above the frame, in millimetres. */
 export function titleBlockHeight(sheet: Sheet): number {
-  return TITLE_HEIGHT + rowsOf(sheet).length * ROW_HEIGHT
+  return TITLE_HEIGHT + fieldRowsOf(sheet).length * ROW_HEIGHT
 }
 
-/**
- * The title block, its fields named as ISO 7200 names them (from memory). Only what the sheet fills
- * is there, and always title, revision index, frequency with "rms", and sheet number.
- */
+/** The title block of a sheet. What is too long for its cell is shortened. */
 export function createTitleBlock(sheet: Sheet, frame: Box, palette: Palette): TitleBlock {
-  const rows = rowsOf(sheet)
+  const rows = fieldRowsOf(sheet)
   const box = {
     left: frame.right - WIDTH,
     right: frame.right,
@@ -47,72 +39,26 @@ export function createTitleBlock(sheet: Sheet, frame: Box, palette: Palette): Ti
   }
   const rules: number[] = []
   const texts: Item[] = [...titleItems(sheet, box, palette)]
-  rows.forEach((cells, row) => {
+  rows.forEach((fields, row) => {
     const top = box.top - TITLE_HEIGHT - row * ROW_HEIGHT
     let left = box.left
     rules.push(left, top, box.right, top)
-    widthsOf(cells).forEach((width, column) => {
+    shareOut(WIDTH, fields.map(widthOf)).forEach((width, column) => {
       if (column > 0) rules.push(left, top, left, top - ROW_HEIGHT)
-      texts.push(...cellItems(cells[column] as Cell, { left, top, width }, palette))
+      texts.push(...cellItems(fields[column] as Field, { left, top, width }, palette))
       left += width
     })
   })
   return { box, items: [outline(box, palette), ruleItem(rules, palette), ...texts] }
 }
 
-function rowsOf(sheet: Sheet): Cell[][] {
-  const job = sheet.job ?? {}
-  const place = [job.circuit, job.site].map((part) => part?.trim()).filter(Boolean)
-  const optional: [string, string | undefined][] = [
-    ['Identification number', job.number],
-    ['Supplementary title', place.join(' · ')],
-    ['Date of issue', job.date],
-    ['Creator', job.testedBy],
-    ['Checked by', job.checkedBy],
-    ['Approval person', job.approvedBy],
+/** The width that a field needs for all of its text, in millimetres. */
+function widthOf({ caption, value }: Field): number {
+  const texts = [
+    { ...CAPTION, text: caption },
+    { ...VALUE, text: oneLine(value) },
   ]
-  const filled = optional.flatMap(([caption, value = '']) =>
-    value.trim() === '' ? [] : [{ caption, value: value.trim() }],
-  )
-  const rows: Cell[][] = []
-  const columns = Math.ceil(filled.length / Math.ceil(filled.length / COLUMNS))
-  for (let first = 0; first < filled.length; first += columns) {
-    rows.push(filled.slice(first, first + columns))
-  }
-  const frequency = sheet.frequency && formatFrequency(sheet.frequency)
-  rows.push([
-    { caption: 'Revision index', value: sheet.revision?.trim() || '0' },
-    { caption: 'Frequency and values', value: frequency ? `${frequency} · rms` : 'rms' },
-    { caption: 'Sheet number', value: 'Sheet 1 of 1' },
-  ])
-  return rows
-}
-
-/** Each cell as wide as its text, what is left shared out; where it is short, the widest give way. */
-function widthsOf(cells: readonly Cell[]): number[] {
-  const needs = cells.map(({ caption, value }) => {
-    const texts = [
-      { ...CAPTION, text: caption },
-      { ...VALUE, text: oneLine(value) },
-    ]
-    return Math.max(...texts.map((text) => measureText([text]))) + 2 * PADDING
-  })
-  const largest = widestThatFits(needs)
-  const widths = needs.map((need) => Math.min(need, largest))
-  const left = WIDTH - widths.reduce((sum, width) => sum + width, 0)
-  return widths.map((width) => width + left / cells.length)
-}
-
-/** The width to which the widest are cut so that all fit: the narrow ones keep theirs. */
-function widestThatFits(needs: readonly number[]): number {
-  const rising = needs.toSorted((one, other) => one - other)
-  let room = WIDTH
-  for (const [index, need] of rising.entries()) {
-    const share = room / (rising.length - index)
-    if (need > share) return share
-    room -= need
-  }
-  return WIDTH
+  return Math.max(...texts.map((text) => measureText([text]))) + 2 * PADDING
 }
 
 function titleItems({ title }: Sheet, { left, top }: Box, palette: Palette): Item[] {
@@ -123,7 +69,7 @@ function titleItems({ title }: Sheet, { left, top }: Box, palette: Palette): Ite
 }
 
 function cellItems(
-  { caption, value }: Cell,
+  { caption, value }: Field,
   { left, top, width }: { left: number; top: number; width: number },
   palette: Palette,
 ): Item[] {

@@ -24,10 +24,13 @@ const FAR = [30, 40, 52, 66, 82]
 const SMALLER = 0.75
 /** A leader of 30 mm across nothing, or of 10 mm across two arrows. */
 const FAIR = 18
+/** Beside an arrow, not on its best side, and no other arrow much nearer. */
+const CLEAR = 12
 
-const near = (wish: Wish, runs: readonly TextRun[]): Trial => ({
+const near = (wish: Wish, runs: readonly TextRun[], most = Number.POSITIVE_INFINITY): Trial => ({
   runs,
   spots: (size) => nearSpots(wish, size),
+  most,
 })
 
 const led = (
@@ -44,11 +47,12 @@ const anywhere = (wish: Wish, runs: readonly TextRun[], room: Room, region: Box)
 
 /** Beside what is named as long as there is room; a value is dropped before its label stands far off. */
 const generous: Manner = (wish, room, region) => [
-  near(wish, wish.full),
+  near(wish, wish.full, CLEAR),
   led(wish, wish.full, NEAR, FAIR),
-  near(wish, wish.short),
+  near(wish, wish.short, CLEAR),
   led(wish, wish.short, NEAR, FAIR),
   led(wish, wish.full, FAR, FAIR),
+  near(wish, wish.short),
   led(wish, wish.short, NEAR),
   anywhere(wish, wish.short, room, region),
 ]

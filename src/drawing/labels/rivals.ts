@@ -7,7 +7,7 @@ import type { Wish } from './wish'
 const CROSSING_COST = 3
 /** A label nearer to another arrow than to its own, by less than this, may be taken for the other's. */
 const MARGIN = 2.5
-const COST = 5
+const MISTAKABLE_COST = 9
 
 /** What speaks against a place because the label would seem to belong to something else. */
 export function mistakableCost(box: Box, wish: Wish, wishes: readonly Wish[]): number {
@@ -16,7 +16,7 @@ export function mistakableCost(box: Box, wish: Wish, wishes: readonly Wish[]): n
   for (const other of wishes) {
     if (other.arrow !== wish.arrow) nearest = Math.min(nearest, distanceFrom(box, other))
   }
-  return COST * Math.min(1, Math.max(0, (own + MARGIN - nearest) / MARGIN))
+  return MISTAKABLE_COST * Math.min(1, Math.max(0, (own + MARGIN - nearest) / MARGIN))
 }
 
 /** What speaks against a leader because it crosses what other labels name. */

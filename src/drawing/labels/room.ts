@@ -1,18 +1,15 @@
-import { type Box, growBox, isOverlapping } from '../geometry'
-import { clipToBox } from './clip'
+import { type Box, distanceToBox, growBox, isOverlapping } from '../geometry'
+import { isCrossingBox } from './clip'
 import type { Occupancy } from './occupancy'
 import type { Leader, Stand } from './spot'
 
-/** The side of the cells in which placed labels are looked up, in millimetres. */
-const CELL = 20
 /** What stays free between two labels, and between a leader and a label that is not its own. */
 const BETWEEN = 0.8
 const BESIDE_LEADER = 0.5
 
 /** The free room of a drawing: what arrows leave, less the labels placed so far and their leaders. */
 export class Room {
-  private readonly cells = new Map<number, Box[]>()
-  private readonly boxes: Box[] = []
+  private readonly boxes = new BoxIndex()
   private readonly leaders: Leader[] = []
 
   /**
@@ -26,14 +23,14 @@ export class Room {
 
   /** Whether a box is clear of all that is drawn and of the labels placed so far, leaders apart. */
   isClear(box: Box): boolean {
-    return this.occupancy.isFree(box) && !this.isOnLabel(box)
+    return this.occupancy.isFree(box) && !this.boxes.isOverlapping(growBox(box, BETWEEN))
   }
 
   /** Whether a label can stand there. */
   isFree({ box, leader }: Stand): boolean {
     return (
       this.isClear(box) &&
-      !this.leaders.some((other) => isCrossing(other, box)) &&
+      !this.isOnLeader(growBox(box, BESIDE_LEADER)) &&
       (leader === undefined || this.isFreeLeader(leader))
     )
   }
@@ -45,37 +42,62 @@ export class Room {
 
   /** Takes a place: no other label will stand on it or on its leader. */
   take({ box, leader }: Stand): void {
-    this.boxes.push(box)
-    for (const cell of cellsOf(box)) {
-      const known = this.cells.get(cell)
-      if (known) known.push(box)
-      else this.cells.set(cell, [box])
-    }
+    this.boxes.add(box)
     if (leader) this.leaders.push(leader)
   }
 
-  private isOnLabel(box: Box): boolean {
-    const wide = growBox(box, BETWEEN)
-    for (const cell of cellsOf(wide)) {
-      for (const other of this.cells.get(cell) ?? []) if (isOverlapping(wide, other)) return true
-    }
+  private isOnLeader(box: Box): boolean {
+    for (const { from, to } of this.leaders) if (isCrossingBox(from, to, box)) return true
     return false
   }
 
-  private isFreeLeader(leader: Leader): boolean {
-    const isBlocked = (box: Box) => isCrossing(leader, box)
-    return !this.boxes.some(isBlocked) && !this.fences.some(isBlocked)
-  }
-}
-
-function* cellsOf({ left, bottom, right, top }: Box): Generator<number> {
-  for (let row = Math.floor(bottom / CELL); row <= Math.floor(top / CELL); row += 1) {
-    for (let column = Math.floor(left / CELL); column <= Math.floor(right / CELL); column += 1) {
-      yield row * 4096 + column
+  private isFreeLeader({ from, to }: Leader): boolean {
+    for (const box of this.boxes.all) {
+      if (isCrossingBox(from, to, growBox(box, BESIDE_LEADER))) return false
     }
+    for (const fence of this.fences) {
+      // What starts behind a fence has to cross it.
+      const isAhead = distanceToBox(from, fence) > BESIDE_LEADER
+      if (isAhead && isCrossingBox(from, to, growBox(fence, BESIDE_LEADER))) return false
+    }
+    return true
   }
 }
 
-function isCrossing({ from, to }: Leader, box: Box): boolean {
-  return clipToBox(from, to, growBox(box, BESIDE_LEADER)) !== undefined
+/** The side of the cells in which boxes are looked up, in millimetres. */
+const CELL = 20
+const CELLS_IN_ROW = 4096
+
+/** Boxes by the cells that they reach into. */
+class BoxIndex {
+  readonly all: Box[] = []
+  private readonly cells = new Map<number, Box[]>()
+
+  add(box: Box): void {
+    this.all.push(box)
+    this.visit(box, (cell) => {
+      const known = this.cells.get(cell)
+      if (known) known.push(box)
+      else this.cells.set(cell, [box])
+      return false
+    })
+  }
+
+  isOverlapping(box: Box): boolean {
+    return this.visit(box, (cell) => {
+      for (const other of this.cells.get(cell) ?? []) if (isOverlapping(box, other)) return true
+      return false
+    })
+  }
+
+  /** Goes through the cells of a box until one of them gives true. */
+  private visit({ left, bottom, right, top }: Box, isEnough: (cell: number) => boolean): boolean {
+    const [first, last] = [Math.floor(left / CELL), Math.floor(right / CELL)]
+    for (let row = Math.floor(bottom / CELL); row <= Math.floor(top / CELL); row += 1) {
+      for (let column = first; column <= last; column += 1) {
+        if (isEnough(row * CELLS_IN_ROW + column)) return true
+      }
+    }
+    return false
+  }
 }

@@ -9,6 +9,10 @@ import { vectorOf } from './vectors'
 export function hangLoose(workshop: Workshop, phasors: readonly Phasor[]): void {
   for (const phasor of phasors) {
     if (workshop.summed.has(phasor.id) || workshop.homes.has(phasor.id)) continue
+    if (hangsOn(phasor) === undefined) {
+      addLoose(workshop, phasor)
+      continue
+    }
     // The chain is walked by a loop: thousands may hang one on another.
     for (const link of chainOf(workshop, phasor).reverse()) addLoose(workshop, link)
   }
@@ -55,13 +59,10 @@ function homeOf({ homes }: Workshop, phasor: Phasor): Home | undefined {
 
 function createFigure({ figures }: Workshop, { id, quantity, tail }: Phasor): Figure {
   const place: Place | undefined = tail && 'x' in tail ? tail : undefined
-  const figure: Figure = {
-    key: `loose:${id}`,
-    isSum: false,
-    quantity,
-    members: [],
-    ...(place && { start: place }),
-  }
+  const key = `loose:${id}`
+  const figure: Figure = place
+    ? { key, isSum: false, quantity, members: [], start: place }
+    : { key, isSum: false, quantity, members: [] }
   figures.push(figure)
   return figure
 }

@@ -5,7 +5,8 @@ import type { Figure, Member } from './figure'
 
 /** A tip that is nearer than this to another arrow makes the two look like one. */
 const ALONG_MILLIMETRES = 2
-const WIDEST_STEP = 8
+/** A step on the grid, with room for a line of text between. */
+const WIDEST_STEP = 10
 const NARROWEST_STEP = 2.5
 /** How far the last of many may be set off. */
 const FURTHEST = 80

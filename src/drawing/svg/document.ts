@@ -22,7 +22,7 @@ export function svg(scene: Scene, sheetText: string): string {
     '<?xml version="1.0" encoding="UTF-8"?>\n',
     `<svg xmlns="http://www.w3.org/2000/svg" ${size} ${named} font-family="${FAMILY}"`,
     ' xml:space="preserve">',
-    `<title id="phasogon-title">${escapeText(scene.title)}</title>`,
+    `<title id="phasogon-title">${escapeText(scene.title.trim() || 'Untitled')}</title>`,
     `<desc id="phasogon-description">${escapeText(scene.description)}</desc>`,
     `<metadata><sheet xmlns="${SHEET_NAMESPACE}">${escapeJson(sheetText)}</sheet></metadata>`,
   ]

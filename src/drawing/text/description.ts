@@ -1,6 +1,6 @@
 import { formatAngle, formatQuantity, unitOf } from '../../core'
 import type { Evaluation, Sheet, Sum, UnitsPerCentimetre } from '../../sheet'
-import { QUANTITIES } from '../placement/place'
+import { QUANTITIES } from './quantities'
 import { formatScale } from './quantity-text'
 
 /** The drawing in words: its scales, and what each sum comes to. */

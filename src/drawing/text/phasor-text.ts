@@ -21,10 +21,12 @@ export function formatPhasor(
 }
 
 /** The digits of what was worked out from figures of these digits: a small result still shows `least`. */
-export function digitsOfResult(magnitude: number, { resolution }: Digits, least: number): Digits {
-  if (resolution === undefined) return {}
-  if (magnitude === 0 || magnitude >= resolution * 10 ** (least - 1)) return { resolution }
-  return { resolution: 10 ** (Math.floor(Math.log10(magnitude)) - least + 1) }
+export function digitsOfResult(magnitude: number, digits: Digits, least: number): Digits {
+  const { resolution, like } = digits
+  const unit = like === undefined ? {} : { like }
+  if (resolution === undefined) return unit
+  if (magnitude === 0 || magnitude >= resolution * 10 ** (least - 1)) return { resolution, ...unit }
+  return { resolution: 10 ** (Math.floor(Math.log10(magnitude)) - least + 1), ...unit }
 }
 
 /** A length on the paper: `1.2 mm`. */

@@ -5,6 +5,8 @@ import type { Phasor, Reading, Sheet, Typed } from '../../sheet'
 export interface Digits {
   readonly resolution?: number
   readonly limit?: number
+  /** A size whose prefix it is printed with: 1 where it was given as a plain figure in its unit. */
+  readonly like?: number
 }
 
 /** How finely a phasor is known, in its unit and in degrees. */
@@ -48,10 +50,18 @@ export function coarser(one: Digits | undefined, other: Digits | undefined): Dig
 
 function ofTyped(typed: Typed | undefined): Digits | undefined {
   if (!typed) return undefined
-  const resolution = resolutionOf(typed.text ?? String(typed.value))
+  return {
+    ...digitsIn(typed.text ?? String(typed.value)),
+    ...(typed.limit !== undefined && { limit: typed.limit }),
+  }
+}
+
+/** A plain figure keeps the unit that it was given in: 0.750 stays 0.750 A. */
+function digitsIn(text: string): Digits {
+  const resolution = resolutionOf(text)
   return {
     ...(resolution !== undefined && { resolution }),
-    ...(typed.limit !== undefined && { limit: typed.limit }),
+    ...(/^[\d.,\s]+$/.test(text) && { like: 1 }),
   }
 }
 
@@ -60,9 +70,8 @@ function ofReadings(readings: readonly Reading[], kind: 'magnitude' | 'angle'): 
   const [reading, second] = readings.filter((each) => each.kind === kind)
   if (reading?.kind !== kind) return undefined
   if (second || isConverted(reading)) return {}
-  const resolution = resolutionOf(String(reading.shown))
   return {
-    ...(resolution !== undefined && { resolution }),
+    ...digitsIn(String(reading.shown)),
     ...(reading.limit !== undefined && { limit: reading.limit }),
   }
 }

@@ -3,7 +3,7 @@ import { asReadOf, readingsOf } from '../as-read'
 import type { Phasor, PhasorId, Sheet } from '../types'
 import { entryOf, withReplaced } from './lists'
 import { isRead } from './parts'
-import { onlyReading, type PolarPart, withReadLimit } from './read-parts'
+import { isDirect, onlyReading, type PolarPart, refuseIndirect, withReadLimit } from './read-parts'
 
 /**
  * The sheet with another limit for a part of a phasor, `whole` meaning its magnitude: of the reading
@@ -24,6 +24,7 @@ export function withLimit(
   }
   const reading = onlyReading(readingsOf(sheet, id), named, phasor)
   if (!reading.ok) return reading
+  if (!isDirect(reading.value)) return refuseIndirect(sheet, reading.value)
   const value = asReadOf(sheet).values.get(id)?.[named] ?? 0
   return success(withReadLimit(sheet, reading.value, absoluteLimit(limit, value)))
 }

@@ -3,13 +3,15 @@ import type { Id, Sheet } from '../types'
 import { type Change, withChange } from './change'
 
 /** The lists that edits add to, take from and reorder. */
-export type ListName = 'phasors' | 'readings' | 'sums'
+export type ListName = 'phasors' | 'readings' | 'instruments' | 'channels' | 'sums'
 
 type Entry<Name extends ListName> = NonNullable<Sheet[Name]>[number]
 
 const NAMES: { readonly [name in ListName]: string } = {
   phasors: 'phasor',
   readings: 'reading',
+  instruments: 'instrument',
+  channels: 'channel',
   sums: 'sum',
 }
 

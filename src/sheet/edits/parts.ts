@@ -2,7 +2,14 @@ import { failure, type Result, success, type Typed, toPolar, wrapDegrees } from 
 import { readingsOf } from '../as-read'
 import type { Phasor, PhasorId, Sheet } from '../types'
 import { entryOf, withReplaced } from './lists'
-import { onlyReading, type PolarPart, withShownAngle, withShownMagnitude } from './read-parts'
+import {
+  isDirect,
+  onlyReading,
+  type PolarPart,
+  refuseIndirect,
+  withShownAngle,
+  withShownMagnitude,
+} from './read-parts'
 import { withoutReadings } from './readings'
 import { withTypedPolar, withTypedRectangular } from './typed-parts'
 
@@ -75,6 +82,7 @@ function withReadPart(
   const reading = onlyReading(readingsOf(sheet, phasor.id), part, phasor)
   if (!reading.ok) return reading
   if (typed === null) return success(withoutReadings(sheet, new Set([reading.value.id])))
+  if (!isDirect(reading.value)) return refuseIndirect(sheet, reading.value)
   if (reading.value.repeats !== undefined && reading.value.repeats.length > 0) {
     return failure(`The ${part} of ${phasor.label} is the mean of repeated readings: change those.`)
   }

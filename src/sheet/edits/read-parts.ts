@@ -1,5 +1,5 @@
 import { failure, type Result, success, type Typed, unitOf, wrapDegrees } from '../../core'
-import { asReadOf, type ReadingsOfPhasor } from '../as-read'
+import { type AngleLikeReading, asReadOf, type ReadingsOfPhasor } from '../as-read'
 import { type FigureUnit, parseShown } from '../digits'
 import { unitOfMagnitude } from '../figures'
 import { channelTurn, signOfReading } from '../readings/angle'
@@ -26,7 +26,7 @@ export function onlyReading(
   readings: ReadingsOfPhasor,
   part: PolarPart,
   { label }: Phasor,
-): Result<MagnitudeReading | AngleReading> {
+): Result<MagnitudeReading | AngleLikeReading> {
   const [reading, ...others] = readings[part]
   if (reading === undefined) return failure(`The ${part} of ${label} was not read.`)
   if (others.length > 0) {
@@ -60,6 +60,24 @@ export function withReadLimit(
   const factor =
     reading.kind === 'magnitude' ? magnitudeFactor(reading, channelOf(sheet, reading)) : 1
   return withReplaced(sheet, 'readings', { ...reading, limit: limit / factor })
+}
+
+/** Whether a display showed the part itself; otherwise it was worked out from what was shown. */
+export function isDirect(
+  reading: MagnitudeReading | AngleLikeReading,
+): reading is MagnitudeReading | AngleReading {
+  return reading.kind === 'magnitude' || reading.kind === 'angle'
+}
+
+/** Why a part cannot be typed that was worked out from what a display showed. */
+export function refuseIndirect(
+  sheet: Sheet,
+  { of, kind }: Exclude<AngleLikeReading, AngleReading>,
+): Result<never> {
+  const words = { shift: 'a time shift', ellipse: 'an ellipse', 'power-factor': 'a power factor' }
+  return failure(
+    `The angle of ${labelOf(sheet, of)} was read as ${words[kind]}: change that reading.`,
+  )
 }
 
 /** The sheet in which an angle reading shows what makes the phasor's angle the typed one. */

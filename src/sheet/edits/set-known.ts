@@ -8,7 +8,7 @@ import type { EditKind } from './edit-kind'
 import { labelOf } from './labels'
 import { entryOf, withAdded, withReplaced } from './lists'
 import { isRead } from './parts'
-import { onlyReading, type PolarPart, toTyped } from './read-parts'
+import { isDirect, onlyReading, type PolarPart, refuseIndirect, toTyped } from './read-parts'
 import { withoutReadings } from './readings'
 import { asTypedPolar } from './typed-parts'
 
@@ -78,6 +78,7 @@ function withTyped(sheet: Sheet, phasor: Phasor): Result<Sheet> {
   for (const part of parts) {
     const reading = onlyReading(readingsOf(sheet, phasor.id), part, phasor)
     if (!reading.ok) return reading
+    if (!isDirect(reading.value)) return refuseIndirect(sheet, reading.value)
     const value = values[part]
     if (value === undefined) {
       return failure(

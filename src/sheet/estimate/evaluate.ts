@@ -1,5 +1,7 @@
+import type { Complex } from '../../core'
 import type { EstimateOptions } from '../../core/estimate'
 import type { Evaluation } from '../evaluation'
+import { evaluateHand } from '../hand/evaluate-hand'
 import type { Sheet } from '../types'
 import { agreementOf, outcomesOf } from './agreement'
 import { alternativesOf } from './alternatives'
@@ -8,7 +10,14 @@ import { evaluateElements } from './elements'
 import { evaluatePhasor } from './phasors'
 import { problemOfSheet } from './sheet-problem'
 import { SolvedSheet } from './solved-sheet'
-import { evaluateSums } from './sums'
+import { asReadElseBest, evaluateSums } from './sums'
+
+function complexOf(
+  value: { readonly real?: number; readonly imaginary?: number } | undefined,
+): Complex | undefined {
+  if (value?.real === undefined || value.imaginary === undefined) return undefined
+  return { re: value.real, im: value.imaginary }
+}
 
 /**
  * What the program says of a sheet, everything solved and adjusted: best values with their limits,
@@ -22,11 +31,17 @@ export function evaluate(
   const problem = problemOfSheet(sheet)
   const solved = new SolvedSheet(sheet, problem, options)
   const phasors = sheet.phasors.map((phasor) => evaluatePhasor(phasor, problem, solved))
+  const sums = evaluateSums(sheet, phasors, problem, solved)
+  const mixed = new Map(phasors.map((phasor) => [phasor.id, asReadElseBest(phasor)]))
   const outcomes = outcomesOf(problem, solved)
   return {
     phasors,
     alternatives: alternativesOf(problem, solved),
-    sums: evaluateSums(sheet, phasors, problem, solved),
+    sums,
+    hand: evaluateHand(sheet, {
+      phasor: (id) => complexOf(mixed.get(id)),
+      resultant: (id) => complexOf(sums.find((sum) => sum.id === id)?.resultant),
+    }),
     agreement: agreementOf(phasors, outcomes, solved),
     suspects: outcomes
       .filter(({ isChecked }) => isChecked)

@@ -1,18 +1,12 @@
-import type { Channel, CircuitElement, Id, Instrument, Phasor, PhasorId, Sheet } from '../types'
+import type { CircuitElement, Id, Phasor, PhasorId, Sheet } from '../types'
 
-/** What a sheet names, by its id, and the place of each phasor and element in the estimator's problem. */
+/** The place of each phasor and element of a sheet in the estimator's problem. */
 export interface Names {
   readonly sheet: Sheet
   readonly phasor: ReadonlyMap<PhasorId, number>
   readonly element: ReadonlyMap<Id, number>
   readonly phasors: readonly Phasor[]
   readonly elements: readonly CircuitElement[]
-  readonly instruments: ReadonlyMap<Id, Instrument>
-  readonly channels: ReadonlyMap<Id, Channel>
-}
-
-function byId<Part extends { readonly id: Id }>(parts: readonly Part[] = []): Map<Id, Part> {
-  return new Map(parts.map((part) => [part.id, part]))
 }
 
 function placeById(parts: readonly { readonly id: Id }[]): Map<Id, number> {
@@ -25,13 +19,5 @@ export function namesOf(sheet: Sheet): Names {
   const elements = (sheet.elements ?? []).filter(
     ({ voltage, current }) => phasor.has(voltage) && phasor.has(current),
   )
-  return {
-    sheet,
-    phasor,
-    element: placeById(elements),
-    phasors: sheet.phasors,
-    elements,
-    instruments: byId(sheet.instruments),
-    channels: byId(sheet.channels),
-  }
+  return { sheet, phasor, element: placeById(elements), phasors: sheet.phasors, elements }
 }

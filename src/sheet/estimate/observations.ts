@@ -1,79 +1,75 @@
-import type { Observation, SharedError, UncertaintyPart } from '../../core/estimate'
+import type { Observation, SharedError } from '../../core/estimate'
+import type { SharedLimitPart } from '../readings/limit-part'
 import type { PendingObservation } from './pending'
-import { correlatedSets, standardErrorOfMean } from './repeats'
 
-/** Observations with their standard uncertainties, and the errors that they share. */
+/** Observations with the errors that they share. */
 export interface CountedObservations {
   readonly observations: readonly Observation[]
   readonly sharedErrors: readonly SharedError[]
-  /** The place of a shared error by its key. */
+  /** The place of a shared error by its name. */
   readonly errorOf: ReadonlyMap<string, number>
 }
 
-/** The standard uncertainty of a limit that holds for certain: limit / √3 (GUM 4.3.7). */
-export function standardOfLimit(limit: number): number {
-  return limit / Math.sqrt(3)
+/** How many observations each error, or each group of errors, moves. */
+function countUses(pending: readonly PendingObservation[]): ReadonlyMap<string, number> {
+  const uses = new Map<string, number>()
+  for (const { shared } of pending) {
+    const names = new Set(
+      shared.flatMap(({ error, group, sensitivity }) =>
+        sensitivity === 0 ? [] : [group ?? error],
+      ),
+    )
+    for (const name of names) uses.set(name, (uses.get(name) ?? 0) + 1)
+  }
+  return uses
 }
 
-function rectangle(limit: number): readonly UncertaintyPart[] {
-  return limit > 0 ? [{ uncertainty: standardOfLimit(limit), shape: 'rectangular' }] : []
+/** Errors of one group, of one observation alone, are one cause. */
+function asOwn(parts: readonly SharedLimitPart[]): PendingObservation['own'] {
+  const causes = new Map<string, PendingObservation['own'][number]>()
+  for (const { error, group, uncertainty, shape, freedom } of parts) {
+    const before = causes.get(group ?? error)?.uncertainty ?? 0
+    const own = { uncertainty: Math.hypot(before, uncertainty), shape }
+    causes.set(group ?? error, freedom === undefined ? own : { ...own, freedom })
+  }
+  return [...causes.values()]
 }
 
 /**
- * Turns limits into standard uncertainties and counts who shares what. An error that only one
- * observation has is that observation's own: what a maker gives "of reading" then adds to its other
- * half-width, anything else is an independent part. `alwaysShared` names errors that something besides
- * the observations depends on.
+ * Counts who shares what: an error that only one observation has is that observation's own.
+ * `alwaysShared` names errors that something besides the observations depends on.
  */
 export function countObservations(
   pending: readonly PendingObservation[],
-  alwaysShared: ReadonlySet<string> = new Set(),
+  alwaysShared: readonly string[] = [],
 ): CountedObservations {
-  const uses = new Map<string, number>()
-  for (const { common } of pending) {
-    for (const { key, halfWidth } of common) {
-      if (halfWidth !== 0) uses.set(key, (uses.get(key) ?? 0) + 1)
-    }
-  }
-  const isShared = (key: string) => alwaysShared.has(key) || (uses.get(key) ?? 0) > 1
+  const uses = countUses(pending)
+  const isShared = ({ error, group }: SharedLimitPart) => (uses.get(group ?? error) ?? 0) > 1
   const sharedErrors: SharedError[] = []
   const errorOf = new Map<string, number>()
-  const place = (key: string, error: SharedError): number => {
-    const known = errorOf.get(key)
+  const place = (name: string, error: SharedError): number => {
+    const known = errorOf.get(name)
     if (known !== undefined) return known
-    errorOf.set(key, sharedErrors.length)
+    errorOf.set(name, sharedErrors.length)
     sharedErrors.push(error)
     return sharedErrors.length - 1
   }
-  for (const key of alwaysShared) place(key, { shape: 'rectangular' })
-  const sets = correlatedSets(pending)
-  const observations = pending.map((each): Observation => {
-    const apart = each.common.filter(({ key }) => !isShared(key))
-    const joined = apart.filter(({ isOfReading }) => isOfReading === true)
-    const limit = joined.reduce((sum, { halfWidth }) => sum + Math.abs(halfWidth), each.limit)
-    const set = sets.get(each)
-    const shared = each.common
-      .filter(({ key, halfWidth }) => isShared(key) && halfWidth !== 0)
-      .map(({ key, halfWidth }) => ({
-        error: place(key, { shape: 'rectangular' }),
-        sensitivity: standardOfLimit(halfWidth),
-      }))
-    const together = (set?.factors ?? []).map((sensitivity, k) => ({
-      error: place(`${set?.name}#${k}`, {
-        shape: 'normal',
-        freedom: set?.freedom ?? 1,
-        group: set?.name ?? '',
-      }),
-      sensitivity,
-    }))
-    const parts = [
-      ...rectangle(limit),
-      ...apart
-        .filter(({ isOfReading }) => isOfReading !== true)
-        .flatMap(({ halfWidth }) => rectangle(Math.abs(halfWidth))),
-      ...(set === undefined ? standardErrorOfMean(each) : []),
-    ]
-    return { of: each.of, value: each.value, parts, shared: [...shared, ...together] }
+  for (const name of alwaysShared) place(name, { shape: 'rectangular' })
+  const observations = pending.map(({ of, value, own, shared }): Observation => {
+    const moving = shared.filter(({ sensitivity }) => sensitivity !== 0)
+    return {
+      of,
+      value,
+      parts: [...own, ...asOwn(moving.filter((part) => !isShared(part)))],
+      shared: moving.filter(isShared).map(({ error, sensitivity, shape, freedom, group }) => ({
+        error: place(error, {
+          shape,
+          ...(freedom === undefined ? {} : { freedom }),
+          ...(group === undefined ? {} : { group }),
+        }),
+        sensitivity,
+      })),
+    }
   })
   return { observations, sharedErrors, errorOf }
 }

@@ -1,12 +1,14 @@
 import { magnitudeOf, type Typed } from '../../core'
+import { assumedOf } from '../assumed'
+import { withinLimit } from '../readings/limit-part'
 import type { CircuitElement, Phasor } from '../types'
-import { assumedLimits } from './limit-of-reading'
 import type { Names } from './names'
 import type { PendingObservation } from './pending'
 
-/** The limit as stated, else the one that is assumed. */
-function limitOf({ limit }: Typed, assumed: number): number {
-  return limit ?? assumed
+/** The error of a typed value: within its limit as stated, else within the one that is assumed; none at 0. */
+function ownOf({ limit }: Typed, assumed: number): PendingObservation['own'] {
+  const width = limit ?? assumed
+  return width > 0 ? [withinLimit('as typed', width)] : []
 }
 
 /**
@@ -19,30 +21,37 @@ export function observePhasor(
   isReference: boolean,
 ): readonly PendingObservation[] {
   const place = names.phasor.get(phasor.id) ?? 0
-  const { percent, degrees } = assumedLimits(names.sheet)
+  const { percent, degrees } = assumedOf(names.sheet)
   const common = {
     source: { kind: 'typed', phasor: phasor.id },
-    common: [],
+    shared: [],
   } as const
   const { magnitude, angle, real, imaginary } = phasor
   const observations: PendingObservation[] = []
   if (real !== undefined && imaginary !== undefined) {
     const size = magnitudeOf({ re: real.value, im: imaginary.value })
     const assumed = (size * percent) / 100
-    const limits = [limitOf(real, assumed), limitOf(imaginary, assumed)] as const
+    const limits = [real.limit ?? assumed, imaginary.limit ?? assumed]
     if (isReference) {
       // Its direction is given: only its size is left to be observed.
       const limit = Math.max(...limits)
       const of = { kind: 'magnitude', phasor: place } as const
-      return [{ ...common, of, value: size, limit, gives: 'magnitude' }]
+      return [
+        { ...common, of, value: size, own: ownOf({ value: size, limit }, 0), gives: 'magnitude' },
+      ]
     }
     return [
-      { ...common, of: { kind: 'real', phasor: place }, value: real.value, limit: limits[0] },
+      {
+        ...common,
+        of: { kind: 'real', phasor: place },
+        value: real.value,
+        own: ownOf(real, assumed),
+      },
       {
         ...common,
         of: { kind: 'imaginary', phasor: place },
         value: imaginary.value,
-        limit: limits[1],
+        own: ownOf(imaginary, assumed),
       },
     ]
   }
@@ -51,7 +60,7 @@ export function observePhasor(
       ...common,
       of: { kind: 'magnitude', phasor: place },
       value: magnitude.value,
-      limit: limitOf(magnitude, (Math.abs(magnitude.value) * percent) / 100),
+      own: ownOf(magnitude, (Math.abs(magnitude.value) * percent) / 100),
       gives: 'magnitude',
     })
   }
@@ -60,7 +69,7 @@ export function observePhasor(
       ...common,
       of: { kind: 'angle', phasor: place },
       value: angle.value,
-      limit: limitOf(angle, degrees),
+      own: ownOf(angle, degrees),
       gives: 'angle',
     })
   }
@@ -95,7 +104,7 @@ export function observeElement(
   names: Names,
 ): readonly PendingObservation[] {
   const place = names.element.get(element.id) ?? 0
-  const { elementPercent } = assumedLimits(names.sheet)
+  const { elementPercent } = assumedOf(names.sheet)
   return valuesOfKind(element.kind).flatMap((name) => {
     const typed = typedValue(element, name)
     const needsFrequency = name === 'inductance' || name === 'capacitance'
@@ -105,8 +114,8 @@ export function observeElement(
       {
         of: { kind: name, element: place },
         value: typed.value,
-        limit: limitOf(typed, (Math.abs(typed.value) * elementPercent) / 100),
-        common: [],
+        own: ownOf(typed, (Math.abs(typed.value) * elementPercent) / 100),
+        shared: [],
         source: { kind: 'element', element: element.id },
       } satisfies PendingObservation,
     ]

@@ -1,7 +1,6 @@
 import type { ClosedSum, ElementModel, PhasorProblem } from '../../core/estimate'
 import { type AsRead, asReadOf } from '../as-read'
 import type { CircuitElement, Sheet, Sum, ThreePhase } from '../types'
-import { completeAsRead } from './complete-as-read'
 import { type Names, namesOf } from './names'
 import { countObservations } from './observations'
 import { observeReading } from './observe-reading'
@@ -79,7 +78,7 @@ export function problemOfSheet(sheet: Sheet): SheetProblem {
       observePhasor(phasor, names, phasor.id === asRead.reference),
     ),
     ...(sheet.readings ?? [])
-      .map((reading) => observeReading(reading, names, asRead))
+      .map((reading) => observeReading(reading, names, asRead.reference))
       .filter(isThere),
     ...names.elements.flatMap((element) => observeElement(element, names)),
   ]
@@ -87,7 +86,7 @@ export function problemOfSheet(sheet: Sheet): SheetProblem {
   const isFrequencyUncertain = frequency !== undefined && !!sheet.frequency?.limit
   const counted = countObservations(
     sources,
-    new Set(isFrequencyUncertain && names.elements.length > 0 ? [FREQUENCY] : []),
+    isFrequencyUncertain && names.elements.length > 0 ? [FREQUENCY] : [],
   )
   const frequencyError = counted.errorOf.get(FREQUENCY)
   const problem: PhasorProblem = {
@@ -117,5 +116,5 @@ export function problemOfSheet(sheet: Sheet): SheetProblem {
           },
         }),
   }
-  return { problem, names, asRead: completeAsRead(asRead, sources, names), sources }
+  return { problem, names, asRead, sources }
 }

@@ -10,7 +10,7 @@ import type { SolvedSheet } from './solved-sheet'
 const ROUNDING = 1e-9
 
 /** A phasor as it was read, with its best value for what was not read. */
-function mixed(best: PhasorEvaluation): PhasorEvaluation {
+export function asReadElseBest(best: PhasorEvaluation): PhasorEvaluation {
   const magnitude = best.asRead.magnitude ?? best.magnitude
   const angle = best.asRead.angle ?? best.angle
   const { real: _real, imaginary: _imaginary, ...rest } = best
@@ -62,7 +62,7 @@ export function evaluateSums(
   problem: SheetProblem,
   solved: SolvedSheet,
 ): readonly SumEvaluation[] {
-  const phasors = new Map(best.map((each) => [each.id, mixed(each)]))
+  const phasors = new Map(best.map((each) => [each.id, asReadElseBest(each)]))
   return (sheet.sums ?? []).map((sum) =>
     withLimit(sum, evaluateSum(sum, phasors), phasors, problem, solved),
   )

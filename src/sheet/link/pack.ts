@@ -1,6 +1,14 @@
-/** How an array is packed: item by item, or, where it lists objects, field by field. */
+/** How a list is packed. */
 const ITEMS = 0
+/** A list of objects: the list of their fields, then a list of values for each. */
 const COLUMNS = 1
+/** A list of numbers, in one text. */
+const NUMBERS = 2
+/** A list of words, in one text. Within columns, which are lists, the text stands alone. */
+const WORDS = 3
+
+/** Stands between words and numbers; where there is nothing between two of them, that one is null. */
+const SEPARATOR = '|'
 
 /** The most fields that are worth a column each, so that lists of odd objects do not grow. */
 const MAXIMUM_COLUMNS = 40
@@ -9,13 +17,13 @@ const MAXIMUM_COLUMNS = 40
 const MAXIMUM_LEVELS = 200
 
 /**
- * A JSON value turned so that like stands beside like, which deflate then says in far fewer bits: a
- * list of objects becomes a list of their fields and a column of values for each, null where an object
- * lacks the field. A mark before every array says how it is packed, so that `unpack` gives the same
+ * A JSON value turned so that like stands beside like, which deflate then says in fewer bits: a list of
+ * objects becomes columns, one a field, null where an object lacks it; a list of words or numbers
+ * becomes one text. A mark before every list says how it is packed, so that `unpack` gives the same
  * value back, its fields in the same order.
  */
 export function pack(value: unknown): unknown {
-  if (Array.isArray(value)) return packList(value)
+  if (isList(value)) return packList(value)
   return isObject(value) ? mapFields(value, pack) : value
 }
 
@@ -23,21 +31,39 @@ export function pack(value: unknown): unknown {
 export function unpack(packed: unknown, level = 0): unknown {
   if (level > MAXIMUM_LEVELS) throw new RangeError('This is nested too deep.')
   if (isObject(packed)) return mapFields(packed, (value) => unpack(value, level + 1))
-  if (!Array.isArray(packed)) return packed
-  const [mark, ...rest]: readonly unknown[] = packed
-  const parts = rest.map((part) => unpack(part, level + 1))
-  if (mark === ITEMS) return parts
-  if (mark === COLUMNS) return toRows(parts)
+  if (!isList(packed)) return packed
+  const [mark, ...parts] = packed
+  if (mark === WORDS) return split(parts[0])
+  if (mark === NUMBERS) return split(parts[0]).map((word) => (word === null ? null : Number(word)))
+  if (mark === ITEMS) return parts.map((part) => unpack(part, level + 1))
+  if (mark === COLUMNS) return toRows(parts.map((part) => unpackColumn(part, level + 1)))
   throw new RangeError('This list has no mark.')
 }
 
 function packList(list: readonly unknown[]): unknown {
   const fields = commonFields(list)
-  if (fields === undefined) return [ITEMS, ...list.map(pack)]
-  const columns = fields.map((field) =>
-    list.map((row) => (isObject(row) && Object.hasOwn(row, field) ? row[field] : null)),
-  )
-  return [COLUMNS, ...[fields, ...columns].map(packList)]
+  if (fields !== undefined) {
+    const columns = fields.map((field) =>
+      list.map((row) => (isObject(row) && Object.hasOwn(row, field) ? row[field] : null)),
+    )
+    return [COLUMNS, ...[fields, ...columns].map(packColumn)]
+  }
+  if (list.length > 0 && list.every((item) => item === null || isWord(item))) {
+    return [WORDS, join(list)]
+  }
+  if (list.length > 0 && list.every((item) => item === null || typeof item === 'number')) {
+    return [NUMBERS, join(list)]
+  }
+  return [ITEMS, ...list.map(pack)]
+}
+
+function packColumn(column: readonly unknown[]): unknown {
+  const packed = packList(column)
+  return isList(packed) && packed[0] === WORDS ? packed[1] : packed
+}
+
+function unpackColumn(packed: unknown, level: number): unknown {
+  return unpack(isList(packed) ? packed : [WORDS, packed], level)
 }
 
 /**
@@ -75,6 +101,19 @@ function toRows([fields, ...columns]: readonly unknown[]): unknown {
     const present = cells.filter(([, value]) => value !== null)
     return present.length === 0 ? null : Object.fromEntries(present)
   })
+}
+
+function join(list: readonly unknown[]): string {
+  return list.map((item) => (item === null ? '' : String(item))).join(SEPARATOR)
+}
+
+function split(text: unknown): readonly (string | null)[] {
+  if (typeof text !== 'string') throw new RangeError('This list is not one text.')
+  return text.split(SEPARATOR).map((word) => (word === '' ? null : word))
+}
+
+function isWord(value: unknown): boolean {
+  return typeof value === 'string' && value !== '' && !value.includes(SEPARATOR)
 }
 
 function isObject(value: unknown): value is Readonly<Record<string, unknown>> {

@@ -1,6 +1,7 @@
 import { wrapDegrees } from '../../core'
-import { parseShown } from '../digits'
-import type { AngleReading, Channel, Instrument } from '../types'
+import { parseShown, resolutionOfShown } from '../digits'
+import type { AngleReading, Channel, Instrument, PhasorId } from '../types'
+import type { Indication } from './observed'
 
 /**
  * By how many degrees a phasor leads what it was measured against. `lags` turns the sign; without a
@@ -27,4 +28,31 @@ export function signOfReading(reading: AngleReading, instrument: Instrument | un
 /** The degrees that a channel makes of a lead: what must be added to a reading through it. */
 export function channelTurn(channel: Channel | undefined): number {
   return (channel?.reversed ? 180 : 0) - (channel?.phaseError?.value ?? 0)
+}
+
+/** The phasor that was measured against, where one is named. */
+export function againstOf(reading: { readonly against?: PhasorId }): {
+  readonly against?: PhasorId
+} {
+  return reading.against === undefined ? {} : { against: reading.against }
+}
+
+/** An angle reading, understood. */
+export function indicationOfAngle(
+  reading: AngleReading,
+  instrument: Instrument | undefined,
+  channel: Channel | undefined,
+): Indication | undefined {
+  const shown = parseShown(reading.shown, '°')
+  const lead = leadOfReading(reading, instrument, channel)
+  if (!shown.ok || lead === undefined || !Number.isFinite(lead)) return undefined
+  const sign = signOfReading(reading, instrument)
+  return {
+    value: shown.value,
+    ...resolutionOfShown(reading.shown),
+    moves: (error) => error * sign,
+    observed: { kind: 'angle', value: lead, ...againstOf(reading) },
+    of: 'angle',
+    assumed: 'degrees',
+  }
 }

@@ -1,9 +1,8 @@
-import type { Quantity } from '../../core'
-import { parseShown } from '../digits'
+import { type Quantity, rmsOfForm } from '../../core'
+import { parseShown, resolutionOfShown } from '../digits'
 import { unitOfMagnitude } from '../figures'
-import type { Channel, MagnitudeReading } from '../types'
-
-const RMS_OF_FORM = { rms: 1, peak: Math.SQRT1_2, 'peak-to-peak': Math.SQRT1_2 / 2 }
+import type { Accuracy, Channel, MagnitudeReading, PhasorId, Reading } from '../types'
+import type { Indication } from './observed'
 
 /**
  * How many units of the phasor one unit on the display stands for: rms of the wave's form (÷ √2 of a
@@ -13,7 +12,7 @@ const RMS_OF_FORM = { rms: 1, peak: Math.SQRT1_2, 'peak-to-peak': Math.SQRT1_2 /
 export function magnitudeFactor(reading: MagnitudeReading, channel: Channel | undefined): number {
   const ratio = (reading.ratio ?? 1) * (channel?.ratio?.value ?? 1)
   const turns = (reading.turns ?? 1) * (channel?.turns ?? 1)
-  return (RMS_OF_FORM[reading.form ?? 'rms'] * ratio) / (turns * (reading.shunt ?? 1))
+  return (rmsOfForm(reading.form ?? 'rms') * ratio) / (turns * (reading.shunt ?? 1))
 }
 
 /**
@@ -28,4 +27,38 @@ export function magnitudeOfReading(
   const shown = parseShown(reading.shown, unitOfMagnitude(reading, quantity))
   const magnitude = shown.ok ? shown.value * magnitudeFactor(reading, channel) : Number.NaN
   return Number.isFinite(magnitude) ? magnitude : undefined
+}
+
+const FUNCTIONS: { readonly [quantity in Quantity]: Accuracy['of'] | undefined } = {
+  voltage: 'voltage',
+  current: 'current',
+  impedance: 'resistance',
+  power: 'power',
+  other: undefined,
+}
+
+/** A magnitude reading, understood. */
+export function indicationOfMagnitude(
+  reading: MagnitudeReading,
+  quantity: Quantity,
+  channel: Channel | undefined,
+): Indication | undefined {
+  const shown = parseShown(reading.shown, unitOfMagnitude(reading, quantity))
+  const value = magnitudeOfReading(reading, quantity, channel)
+  if (!shown.ok || value === undefined) return undefined
+  const factor = magnitudeFactor(reading, channel)
+  const of = reading.shunt === undefined ? FUNCTIONS[quantity] : 'voltage'
+  return {
+    value: shown.value,
+    ...resolutionOfShown(reading.shown),
+    moves: (error) => error * factor,
+    observed: { kind: 'magnitude', value },
+    ...(of === undefined ? {} : { of }),
+    assumed: 'percent',
+  }
+}
+
+/** Whether a reading in use is one of this phasor's magnitude. */
+export function isMagnitudeOf(reading: Reading, id: PhasorId): reading is MagnitudeReading {
+  return reading.kind === 'magnitude' && reading.of === id && reading.struck !== true
 }

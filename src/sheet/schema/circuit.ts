@@ -57,12 +57,14 @@ export const elementSchema: v.GenericSchema<unknown, CircuitElement> = kinds<Cir
 
 /** The builder's tree: an element, or nodes in series or in parallel. */
 export const circuitSchema: v.GenericSchema<unknown, CircuitNode> = v.lazy((input) => {
-  if (typeof input === 'object' && input !== null) {
-    if ('series' in input) return fields({ series: list(circuitSchema) })
-    if ('parallel' in input) return fields({ parallel: list(circuitSchema) })
-  }
-  return fields({ element: idSchema })
+  if (typeof input !== 'object' || input === null) return leafSchema
+  if ('series' in input) return seriesSchema
+  return 'parallel' in input ? parallelSchema : leafSchema
 })
+
+const leafSchema = fields({ element: idSchema })
+const seriesSchema = fields({ series: list(circuitSchema) })
+const parallelSchema = fields({ parallel: list(circuitSchema) })
 
 const three = <const Item extends v.GenericSchema>(item: Item) =>
   v.strictTuple([item, item, item], 'This must be a list of exactly three.')

@@ -23,11 +23,13 @@ export const drawingSchema: v.GenericSchema<unknown, Drawing> = fields({
   tolerance: v.exactOptional(fields({ millimetres: maybeTolerance, degrees: maybeTolerance })),
 })
 
+const closingSchema = v.literal('closing')
+
 /** An arrow that a hand drew. */
 export const handArrowSchema: v.GenericSchema<unknown, HandArrow> = fields({
   id: idSchema,
   sum: v.exactOptional(idSchema),
-  stands: v.lazy((input) => (input === 'closing' ? v.literal('closing') : idSchema)),
+  stands: v.lazy((input) => (input === 'closing' ? closingSchema : idSchema)),
   from: placeSchema,
   to: placeSchema,
 })

@@ -34,11 +34,12 @@ function isFields(input: unknown): input is object {
   return typeof input === 'object' && input !== null && !Array.isArray(input)
 }
 
-/** A list of at most so many entries. */
+/** A list of at most so many entries; they are looked at only where there are no more. */
 export function list<const Item extends v.GenericSchema>(item: Item, longest = MAXIMUM_ENTRIES) {
   return v.pipe(
-    v.array(item, 'This must be a list, in square brackets.'),
+    v.custom<unknown[]>(Array.isArray, 'This must be a list, in square brackets.'),
     v.maxLength(longest, `There are too many entries here: at most ${longest} are read.`),
+    v.array(item),
   )
 }
 
@@ -97,16 +98,14 @@ export const typedMagnitudeSchema = typed(
   ),
 )
 
+const shownNumberSchema = v.pipe(
+  v.number('This must be what the display showed: a number, or its digits in quotation marks.'),
+  v.finite('This must be a finite number.'),
+)
+
 /** What a display showed: a number, or its digits. */
 export const shownSchema = v.lazy((input) =>
-  typeof input === 'string'
-    ? digitsSchema
-    : v.pipe(
-        v.number(
-          'This must be what the display showed: a number, or its digits in quotation marks.',
-        ),
-        v.finite('This must be a finite number.'),
-      ),
+  typeof input === 'string' ? digitsSchema : shownNumberSchema,
 )
 
 /** Free text that may be left out. */

@@ -6,11 +6,11 @@ import { idSchema, labelSchema } from './text'
 /** What kind of quantity a phasor is. */
 export const quantitySchema = oneOf(['voltage', 'current', 'impedance', 'power', 'other'])
 
+const hangingSchema = fields({ tipOf: idSchema })
+
 /** A place, or another phasor's tip. */
 export const tailSchema: v.GenericSchema<unknown, Tail> = v.lazy((input) =>
-  typeof input === 'object' && input !== null && 'tipOf' in input
-    ? fields({ tipOf: idSchema })
-    : placeSchema,
+  typeof input === 'object' && input !== null && 'tipOf' in input ? hangingSchema : placeSchema,
 )
 
 /** A phasor: typed polar or rectangular, or not typed. */

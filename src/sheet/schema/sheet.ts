@@ -1,7 +1,7 @@
 import * as v from 'valibot'
 import { MAXIMUM_PHASORS } from '../limits'
 import type { Job, Sheet } from '../types'
-import { circuitSchema, elementSchema, threePhaseSchema } from './circuit'
+import { elementSchema, threePhaseSchema } from './circuit'
 import { channelSchema, instrumentSchema } from './instrument'
 import { drawingSchema, handArrowSchema, hazardSchema } from './paper'
 import {
@@ -39,11 +39,37 @@ const chosenSchema = fields({
   angle: numberSchema,
 })
 
-/**
- * The shape of a whole sheet: types, ranges and lengths. What one part says of another (ids, terms,
- * texts) is checked beside it.
- */
-export const sheetSchema: v.GenericSchema<unknown, Sheet> = fields({
+/** The lists of a sheet whose entries are checked one by one. */
+type ListName =
+  | 'phasors'
+  | 'readings'
+  | 'instruments'
+  | 'channels'
+  | 'sums'
+  | 'elements'
+  | 'threePhase'
+  | 'chosen'
+  | 'hand'
+
+/** The shapes of the entries of the lists of a sheet. */
+export const entrySchemas: {
+  readonly [name in ListName]: v.GenericSchema<unknown, NonNullable<Sheet[name]>[number]>
+} = {
+  phasors: phasorSchema,
+  readings: readingSchema,
+  instruments: instrumentSchema,
+  channels: channelSchema,
+  sums: sumSchema,
+  elements: elementSchema,
+  threePhase: threePhaseSchema,
+  chosen: chosenSchema,
+  hand: handArrowSchema,
+}
+
+const maybeList = v.exactOptional(list(v.unknown()))
+
+/** The shape of a sheet, but for the entries of its lists and the nodes of its circuit. */
+export const sheetSchema: v.GenericSchema<unknown, Omit<Sheet, ListName | 'circuit'>> = fields({
   format: v.literal('phasogon-sheet', 'This is not a sheet: its format must be "phasogon-sheet".'),
   version: v.literal(1, 'The version must be 1.'),
   title: textSchema,
@@ -56,16 +82,15 @@ export const sheetSchema: v.GenericSchema<unknown, Sheet> = fields({
     fields({ percent: maybeLimit, degrees: maybeLimit, elementPercent: maybeLimit }),
   ),
   drift: maybeLimit,
-  phasors: list(phasorSchema, MAXIMUM_PHASORS),
-  readings: v.exactOptional(list(readingSchema)),
-  instruments: v.exactOptional(list(instrumentSchema)),
-  channels: v.exactOptional(list(channelSchema)),
-  sums: v.exactOptional(list(sumSchema)),
-  elements: v.exactOptional(list(elementSchema)),
-  circuit: v.exactOptional(circuitSchema),
-  threePhase: v.exactOptional(list(threePhaseSchema)),
-  chosen: v.exactOptional(list(chosenSchema)),
-  hand: v.exactOptional(list(handArrowSchema)),
+  phasors: list(v.unknown(), MAXIMUM_PHASORS),
+  readings: maybeList,
+  instruments: maybeList,
+  channels: maybeList,
+  sums: maybeList,
+  elements: maybeList,
+  threePhase: maybeList,
+  chosen: maybeList,
+  hand: maybeList,
   drawing: v.exactOptional(drawingSchema),
   report: v.exactOptional(
     fields({

@@ -4,10 +4,12 @@ import type { PhasorId, Sum } from '../types'
 import { fields, list, oneOf, placeSchema } from './parts'
 import { idSchema, labelSchema } from './text'
 
+const closedSchema = v.literal(
+  0,
+  'This must be the id of a phasor, or 0 where the sum closes on itself.',
+)
 const equalsSchema: v.GenericSchema<unknown, PhasorId | 0> = v.lazy((input) =>
-  typeof input === 'number'
-    ? v.literal(0, 'This must be the id of a phasor, or 0 where the sum closes on itself.')
-    : idSchema,
+  typeof input === 'number' ? closedSchema : idSchema,
 )
 
 /** Phasors that add up, in drawing order. */

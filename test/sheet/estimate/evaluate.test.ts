@@ -231,7 +231,7 @@ describe('limits', () => {
     expect(found(evaluated(coarse), 'V').angleLimit).toBeCloseTo((1.65 * 3) / Math.sqrt(3), 12)
   })
 
-  test('by an accuracy statement add up, "of reading" and digits', () => {
+  test('by an accuracy statement come from what is "of reading" and from digits, each a cause of its own', () => {
     const sheet = sheetWith({
       phasors: [phasor('V')],
       instruments: [
@@ -239,7 +239,7 @@ describe('limits', () => {
       ],
       readings: [{ id: 'r1', of: 'V', kind: 'magnitude', shown: '230.0', instrument: 'dmm' }],
     })
-    const limit = 0.007 * 230 + 3 * 0.1
+    const limit = Math.hypot(0.007 * 230, 3 * 0.1)
     expect(found(evaluated(sheet), 'V').magnitudeLimit).toBeCloseTo(
       (1.65 * limit) / Math.sqrt(3),
       12,
@@ -415,10 +415,10 @@ describe('repeats', () => {
           id: 'i',
           of: 'I',
           kind: 'magnitude',
-          shown: '19.661 mA',
+          shown: 0.019661,
           limit: 0,
           pass: 'set',
-          repeats: [19.663, 19.639, 19.64, 19.685, 19.678],
+          repeats: [0.019663, 0.019639, 0.01964, 0.019685, 0.019678],
         },
         {
           id: 'phi',

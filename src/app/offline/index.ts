@@ -1,0 +1,3 @@
+export { createOfflineStore } from './state'
+export { OfflineContext, VersionNote } from './VersionNote'
+export { type Workers, watchVersions } from './versions'

@@ -1,0 +1,2 @@
+export { ShareMenu } from './ShareMenu'
+export { linkTo, warnedLength } from './system-share'

@@ -1,0 +1,195 @@
+import fc from 'fast-check'
+import { type Edit, newId, type Phasor, type Reading, type Sheet, type Sum } from '../../src/sheet'
+import {
+  anyNumber,
+  notNegative,
+  place,
+  shown,
+  typed,
+  typedAngle,
+  typedNotNegative,
+} from './arbitrary-figure'
+import { date, label, text } from './arbitrary-text'
+
+/** An edit that waits for the sheet it is made on; undefined where that sheet has nothing to edit so. */
+export type EditOf = (sheet: Sheet) => Edit | undefined
+
+/** Which of several: the same number picks from a list of any length. */
+const which = fc.nat({ max: 999 })
+
+function pick<Item>(items: readonly Item[] | undefined, at: number): Item | undefined {
+  return items === undefined || items.length === 0 ? undefined : items[at % items.length]
+}
+
+type OnPhasor = (phasor: Phasor, sheet: Sheet) => Edit | undefined
+type OnSum = (sum: Sum, sheet: Sheet) => Edit | undefined
+type OnReading = (reading: Reading, sheet: Sheet) => Edit | undefined
+
+const onPhasor =
+  (make: OnPhasor) =>
+  (at: number): EditOf =>
+  (sheet) => {
+    const phasor = pick(sheet.phasors, at)
+    return phasor && make(phasor, sheet)
+  }
+const onSum =
+  (make: OnSum) =>
+  (at: number): EditOf =>
+  (sheet) => {
+    const sum = pick(sheet.sums, at)
+    return sum && make(sum, sheet)
+  }
+const onReading =
+  (make: OnReading) =>
+  (at: number): EditOf =>
+  (sheet) => {
+    const reading = pick(sheet.readings, at)
+    return reading && make(reading, sheet)
+  }
+
+const part = fc.constantFrom(
+  'magnitude' as const,
+  'angle' as const,
+  'real' as const,
+  'imaginary' as const,
+  'whole' as const,
+)
+const cell = fc.oneof(
+  fc.record({ form: fc.constant('number' as const), number: typed }),
+  fc.record({
+    form: fc.constant('limit' as const),
+    limit: fc.oneof(fc.record({ absolute: notNegative }), fc.record({ percent: notNegative })),
+  }),
+  fc.record({
+    form: fc.constant('polar' as const),
+    magnitude: typedNotNegative,
+    angle: typedAngle,
+  }),
+  fc.record({ form: fc.constant('rectangular' as const), real: typed, imaginary: typed }),
+  fc.constant(null),
+)
+
+const values: fc.Arbitrary<EditOf> = fc.oneof(
+  fc
+    .tuple(which, part, cell)
+    .map(([at, of, value]) =>
+      onPhasor(({ id }) => ({ kind: 'set-value', id, part: of, value }))(at),
+    ),
+  fc
+    .tuple(which, fc.constantFrom('typed' as const, 'read' as const))
+    .map(([at, as]) => onPhasor(({ id }) => ({ kind: 'set-known', id, as }))(at)),
+  fc
+    .tuple(which, notNegative, anyNumber)
+    .map(([at, magnitude, angle]) =>
+      onPhasor(({ id }) => ({ kind: 'drag-tip', id, magnitude, angle }))(at),
+    ),
+)
+
+const phasors: fc.Arbitrary<EditOf> = fc.oneof(
+  fc.tuple(label, fc.constantFrom('voltage' as const, 'current' as const)).map(
+    ([name, quantity]): EditOf =>
+      (sheet) => ({
+        kind: 'add-phasor',
+        phasor: { id: newId(sheet, name), label: name, quantity },
+      }),
+  ),
+  which.map(onPhasor(({ id }) => ({ kind: 'remove-phasor', id }))),
+  which.map(onPhasor(({ id }, sheet) => ({ kind: 'duplicate-phasor', id, as: newId(sheet, id) }))),
+  fc
+    .tuple(which, which)
+    .map(([at, to]) => onPhasor(({ id }) => ({ kind: 'move-phasor', id, to: to % 9 }))(at)),
+  fc
+    .tuple(which, label, fc.constantFrom('voltage' as const, 'current' as const, 'other' as const))
+    .map(([at, name, quantity]) =>
+      onPhasor(({ id }) => ({ kind: 'set-phasor', id, change: { label: name, quantity } }))(at),
+    ),
+  fc
+    .tuple(which, place)
+    .map(([at, tail]) => onPhasor(({ id }) => ({ kind: 'place-phasor', id, tail }))(at)),
+  fc.tuple(which, which).map(([at, on]) =>
+    onPhasor(({ id }, sheet) => ({
+      kind: 'place-phasor',
+      id,
+      tail: { tipOf: pick(sheet.phasors, on)?.id ?? id },
+    }))(at),
+  ),
+)
+
+const sums: fc.Arbitrary<EditOf> = fc.oneof(
+  which.map(
+    onPhasor(({ id }, sheet) => ({
+      kind: 'add-sum',
+      sum: { id: newId(sheet, 's1'), terms: [{ phasor: id }], equals: 0 },
+    })),
+  ),
+  which.map(onSum(({ id }) => ({ kind: 'remove-sum', id }))),
+  fc
+    .tuple(which, which)
+    .map(([at, to]) => onSum(({ id }) => ({ kind: 'move-sum', id, to: to % 3 }))(at)),
+  fc.tuple(which, which, fc.constantFrom(1 as const, -1 as const)).map(([at, on, sign]) =>
+    onSum(({ id, terms }, sheet) => {
+      const phasor = pick(sheet.phasors, on)?.id ?? ''
+      return { kind: 'set-sum', id, change: { terms: [...terms, { phasor, sign }] } }
+    })(at),
+  ),
+)
+
+const others: fc.Arbitrary<EditOf> = fc.oneof(
+  fc.tuple(which, shown).map(([at, figure]) =>
+    onPhasor(({ id }, sheet) => ({
+      kind: 'add-reading',
+      reading: { id: newId(sheet, 'r1'), of: id, kind: 'magnitude', shown: figure },
+    }))(at),
+  ),
+  which.map(onReading(({ id }) => ({ kind: 'remove-reading', id }))),
+  fc
+    .tuple(which, fc.boolean())
+    .map(([at, struck]) =>
+      onReading(({ id }) => ({ kind: 'set-reading', id, change: { struck, limit: null } }))(at),
+    ),
+  text.map(
+    (title): EditOf =>
+      () => ({ kind: 'set-details', title, drift: null }),
+  ),
+  date.map(
+    (day): EditOf =>
+      () => ({ kind: 'set-job', job: { date: day, notes: null } }),
+  ),
+  place.map(
+    (origin): EditOf =>
+      () => ({ kind: 'set-drawing', drawing: { origin } }),
+  ),
+)
+
+const drawn: fc.Arbitrary<EditOf> = fc.oneof(
+  fc.tuple(which, fc.boolean(), place, place).map(([at, closes, from, to]) =>
+    onPhasor(({ id }, sheet) => {
+      const [sum] = sheet.sums ?? []
+      return {
+        kind: 'set-hand-arrow',
+        id: sheet.hand?.[at % 3]?.id ?? newId(sheet, 'h1'),
+        stands: closes ? 'closing' : id,
+        ...(sum && { sum: sum.id }),
+        from,
+        to,
+      }
+    })(at),
+  ),
+  which.map(
+    (at): EditOf =>
+      (sheet) => {
+        const arrow = pick(sheet.hand, at)
+        return arrow && { kind: 'remove-hand-arrow', id: arrow.id }
+      },
+  ),
+  which.map(
+    (at): EditOf =>
+      (sheet) => {
+        const sum = pick(sheet.sums, at)
+        return sum ? { kind: 'clear-hand', sum: sum.id } : { kind: 'clear-hand' }
+      },
+  ),
+)
+
+/** Any edit of any kind but `several` and `add-rows`, which are made of others. */
+export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, drawn, others)
