@@ -38,6 +38,8 @@ export interface LayoutOptions {
   readonly within?: ReadonlySet<string>
   /** Sums whose exact drawing is hidden, as while they are constructed by hand. */
   readonly hidden?: ReadonlySet<Id>
+  /** The terminals of each phasor stand in its subscript (IEC 60375), where it has any. */
+  readonly terminals?: boolean
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
 }
@@ -48,6 +50,7 @@ export interface LayoutOptions {
  */
 export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
   const { theme = 'light', labels = true, frozen, only, within, hidden, construction } = options
+  const { terminals = false } = options
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
@@ -75,7 +78,14 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
   addDrawing(items, picture, palette, only)
   const labelling =
     labels && !only
-      ? createLabels(items, picture, createRegister(sheet, evaluation), frame, fences, palette)
+      ? createLabels(
+          items,
+          picture,
+          createRegister(sheet, evaluation, terminals),
+          frame,
+          fences,
+          palette,
+        )
       : { items: [], leftOut: 0 }
   items.push(...open.labels, ...labelling.items)
   return {

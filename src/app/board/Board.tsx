@@ -51,8 +51,8 @@ export function Board() {
   const chosenSum = usePage((state) => state.chosenSum)
   const hidden = hiddenSums(sheet, pen, chosenSum)
   const viewOptions = useMemo(
-    () => ({ hidden, construction: pen.construction }),
-    [hidden, pen.construction],
+    () => ({ hidden, construction: pen.construction, terminals: pen.areTerminalsShown }),
+    [hidden, pen.construction, pen.areTerminalsShown],
   )
   const scene = useMemo(
     () => base ?? drawnScene(sheet, theme, viewOptions),

@@ -18,6 +18,8 @@ export interface ViewOptions {
   /** Sums whose exact drawing is hidden. */
   readonly hidden?: ReadonlySet<Id>
   readonly construction?: ConstructionLines
+  /** The terminals of each phasor stand in its subscript. */
+  readonly terminals?: boolean
 }
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
@@ -27,8 +29,9 @@ export function isGround(item: Item): boolean {
 
 /** The whole scene of a sheet in the colours of a theme; laid out once for each sheet and view. */
 export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}): Scene {
-  const { hidden = [], construction: { parallels = false, arcs = false } = {} } = options
-  const name = [theme, parallels, arcs, ...hidden].join(' ')
+  const { hidden = [], terminals = false, construction = {} } = options
+  const { parallels = false, arcs = false } = construction
+  const name = [theme, terminals, parallels, arcs, ...hidden].join(' ')
   const own = scenes.get(sheet) ?? new Map<string, Scene>()
   scenes.set(sheet, own)
   const known = own.get(name)

@@ -1,19 +1,19 @@
-import type { ConstructionLines, Scene } from '../../drawing'
+import type { Scene } from '../../drawing'
 import type { Sheet } from '../../sheet'
-import { drawnScene, paintItems } from '../board'
+import { drawnScene, paintItems, type ViewOptions } from '../board'
 import { loadFonts } from '../fonts'
 
 const dotsPerMillimetre = 300 / 25.4
 
 /** The scene that is given out: always in the colours of paper, whatever the screen shows. */
-export function printedScene(sheet: Sheet, construction: ConstructionLines = {}): Scene {
-  return drawnScene(sheet, 'light', { construction })
+export function printedScene(sheet: Sheet, view: ViewOptions = {}): Scene {
+  return drawnScene(sheet, 'light', view)
 }
 
 /** The drawing as a PNG at 300 dots an inch; fails where the browser cannot make one. */
-export async function toPng(sheet: Sheet, construction?: ConstructionLines): Promise<Blob> {
+export async function toPng(sheet: Sheet, view?: ViewOptions): Promise<Blob> {
   await loadFonts()
-  const scene = printedScene(sheet, construction)
+  const scene = printedScene(sheet, view)
   const canvas = document.createElement('canvas')
   canvas.width = Math.round(scene.width * dotsPerMillimetre)
   canvas.height = Math.round(scene.height * dotsPerMillimetre)

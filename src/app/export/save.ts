@@ -1,5 +1,6 @@
-import { type ConstructionLines, svg } from '../../drawing'
+import { svg } from '../../drawing'
 import { serializeSheet } from '../../sheet'
+import type { ViewOptions } from '../board'
 import type { Store } from '../store'
 import { download } from './download'
 import { fileNameOf } from './file-name'
@@ -8,7 +9,7 @@ import { printedScene, toPng } from './picture'
 /** Saves the drawing as an SVG, true to scale, which carries its sheet. */
 export function saveSvg(store: Store): void {
   const { sheet } = store.getState().history
-  const text = svg(printedScene(sheet, linesToSave(store)), serializeSheet(sheet))
+  const text = svg(printedScene(sheet, viewToSave(store)), serializeSheet(sheet))
   const name = fileNameOf(sheet, 'svg')
   download(new Blob([text], { type: 'image/svg+xml' }), name)
   tell(store, `Saved “${name}”. Its millimetres are true, and it opens here again.`)
@@ -19,7 +20,7 @@ export async function savePng(store: Store): Promise<void> {
   const { sheet } = store.getState().history
   await attempt(store, 'No picture was saved', async () => {
     const name = fileNameOf(sheet, 'png')
-    download(await toPng(sheet, linesToSave(store)), name)
+    download(await toPng(sheet, viewToSave(store)), name)
     tell(store, `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.`)
   })
 }
@@ -31,16 +32,19 @@ export async function copyPicture(store: Store): Promise<void> {
     if (!('ClipboardItem' in window))
       throw new Error('this browser keeps pictures off the clipboard.')
     await navigator.clipboard.write([
-      new ClipboardItem({ 'image/png': toPng(sheet, linesToSave(store)) }),
+      new ClipboardItem({ 'image/png': toPng(sheet, viewToSave(store)) }),
     ])
     tell(store, 'Picture copied: paste it into the report.')
   })
 }
 
-/** The construction lines, where they were asked for in what is saved. */
-function linesToSave(store: Store): ConstructionLines | undefined {
-  const { pen } = store.getState()
-  return pen.isConstructionSaved ? pen.construction : undefined
+/** What of the view stands in what is saved: the terminals, and the construction lines on request. */
+function viewToSave(store: Store): ViewOptions {
+  const { areTerminalsShown, isConstructionSaved, construction } = store.getState().pen
+  return {
+    terminals: areTerminalsShown,
+    ...(isConstructionSaved && { construction }),
+  }
 }
 
 async function attempt(store: Store, refusal: string, work: () => Promise<void>): Promise<void> {
