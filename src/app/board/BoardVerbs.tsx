@@ -1,4 +1,4 @@
-import type { KeyboardEvent } from 'react'
+import { type KeyboardEvent, useMemo } from 'react'
 import { isOffPaper, type Scene } from '../../drawing'
 import { usePageStore } from '../store'
 
@@ -14,6 +14,7 @@ export function BoardVerbs(properties: {
   const store = usePageStore()
   const { drawing: pinned, hand } = store.getState().history.sheet
   const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
+  const isOff = useMemo(() => isOffPaper(scene), [scene])
   const refit = () =>
     store
       .getState()
@@ -33,7 +34,7 @@ export function BoardVerbs(properties: {
             : `${scene.labelsLeftOut} labels left out: no free place`}
         </p>
       )}
-      {isOffPaper(scene) && <p className="board-remark">The drawing reaches beyond its frame</p>}
+      {isOff && <p className="board-remark">The drawing reaches beyond its frame</p>}
       {/* What a hand drew is true to the scale that it was drawn at. */}
       {isPinned && hand === undefined && (
         <button type="button" className="verb" onClick={refit}>
