@@ -1,0 +1,90 @@
+import type { Page } from '@playwright/test'
+import { emptySheet } from '../../src/sheet'
+import { benchSheet } from './bench'
+import { fullSheet } from './full'
+import { openPage } from './page'
+import { cell } from './schedule'
+import { expect } from './test'
+
+/** The sizes of window at which every screen is looked at. */
+export const sizes = [
+  { width: 1280, height: 800 },
+  { width: 820, height: 1180 },
+  { width: 390, height: 844 },
+] as const
+
+/** A screen of the page, and how to come to it. */
+export interface Screen {
+  readonly name: string
+  /** The part of the page that it is about; all of it where nothing is said. */
+  readonly part?: string
+  readonly reach: (page: Page) => Promise<void>
+}
+
+async function afresh(page: Page, sheet?: Parameters<typeof openPage>[1]): Promise<void> {
+  await page.goto('about:blank')
+  await openPage(page, sheet)
+}
+
+async function pressVerb(page: Page, name: string): Promise<void> {
+  await page.getByRole('button', { name, exact: true }).click()
+}
+
+/** Every screen that the page has. */
+export const screens: readonly Screen[] = [
+  { name: 'a first visit', reach: (page) => afresh(page) },
+  { name: 'an empty sheet', reach: (page) => afresh(page, emptySheet()) },
+  { name: 'a full sheet', reach: (page) => afresh(page, fullSheet) },
+  {
+    name: 'a picked row, a refused cell and a notice',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await pressVerb(page, 'Delete sum Resultant')
+      await cell(page, 'Magnitude', 'V2').fill('many')
+      await cell(page, 'Magnitude', 'V2').press('Enter')
+      await expect(page.getByRole('alert')).toBeVisible()
+      await expect(page.getByRole('group', { name: 'The row of V2' })).toBeVisible()
+    },
+  },
+  {
+    name: 'the fields of the sheet',
+    part: '[aria-label="Sheet"]',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await page.getByText('Title block', { exact: true }).click()
+      await page.getByText('Paper, scale and reference', { exact: true }).click()
+      await expect(page.getByRole('textbox', { name: 'Job number' })).toBeVisible()
+    },
+  },
+  {
+    name: 'the dialog to open a sheet, with a refusal',
+    part: 'dialog',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await pressVerb(page, 'Open')
+      await page.getByRole('dialog').getByRole('textbox').fill('nothing')
+      await pressVerb(page, 'Open the link')
+      await expect(page.getByRole('dialog').getByRole('alert')).toBeVisible()
+    },
+  },
+  {
+    name: 'the dialog for rows, with a refusal',
+    part: 'dialog',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await pressVerb(page, 'Paste rows')
+      await page.getByRole('dialog').getByRole('textbox').fill('V9\tx\ty')
+      await pressVerb(page, 'Add rows')
+      await expect(page.getByRole('dialog').getByRole('alert')).toBeVisible()
+    },
+  },
+  {
+    name: 'the menu to save a drawing',
+    part: 'header',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await pressVerb(page, 'Save drawing')
+      await expect(page.getByRole('button', { name: /^SVG/ })).toBeVisible()
+    },
+  },
+]
