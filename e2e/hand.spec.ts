@@ -1,6 +1,7 @@
 import type { Page } from '@playwright/test'
 import { away, boardOf, dragOver, isInked, sheetOnScreen } from './support/board'
 import { checkLine } from './support/check-line'
+import { saveDrawing } from './support/files'
 import {
   constructionSheet,
   drawByHand,
@@ -195,4 +196,38 @@ test('a loose phasor that is dropped on the last tip of a sum becomes a term of 
   const sheet = await settledSheet(page, ({ sums }) => sums?.[0]?.terms.length === 3)
   expect(sheet.sums?.[0]?.terms[2]).toEqual({ phasor: 'VC' })
   expect(sheet.phasors[3]).not.toHaveProperty('tail')
+})
+
+test('a term is dragged to another place of its sum, and Escape leaves it where it was', async ({
+  page,
+}) => {
+  await openPage(page, constructionSheet)
+  const terms = page.locator('.term-handle')
+  await expect(terms).toHaveCount(3)
+  const middleOf = async (at: number) => {
+    const box = await terms.nth(at).boundingBox()
+    if (!box) throw new Error('The term is not there.')
+    return { x: box.x + box.width / 2, y: box.y + box.height / 2 }
+  }
+  await terms.nth(0).scrollIntoViewIfNeeded()
+  await dragOver(page, await middleOf(0), await middleOf(2))
+  await page.keyboard.press('Escape')
+  await page.mouse.up()
+  await expect(page.getByRole('button', { name: 'Undo', exact: true })).toBeDisabled()
+  await dragOver(page, await middleOf(0), await middleOf(2))
+  await page.mouse.up()
+  const sheet = await settledSheet(page, ({ sums }) => sums?.[0]?.terms[2]?.phasor === 'VR')
+  expect(sheet.sums?.[0]?.terms.map(({ phasor }) => phasor)).toEqual(['VL', 'VC', 'VR'])
+})
+
+test('construction lines are shown on request, and saved on request', async ({ page }) => {
+  await openPage(page, constructionSheet)
+  await page.locator('summary', { hasText: 'Drawn by hand' }).click()
+  await page.getByLabel('Arcs of the compasses').check()
+  await page.getByLabel('Parallels of the parallelogram').check()
+  const without = await saveDrawing(page, /^SVG/)
+  expect(without.bytes.toString()).not.toContain('phasogon-construction')
+  await page.getByLabel('Also in the saved drawing').check()
+  const withLines = await saveDrawing(page, /^SVG/)
+  expect(withLines.bytes.toString()).toContain('phasogon-construction')
 })

@@ -1,6 +1,7 @@
 import type { Edit, Sheet, Sum, Term } from '../../sheet'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
 import { labelOf, nameOfSum, quantityOfSum, usePageStore } from '../store'
+import { type TermHandle, useTermDrag } from './useTermDrag'
 
 type SumChange = Extract<Edit, { kind: 'set-sum' }>['change']
 type Equals = NonNullable<Sum['equals']>
@@ -17,6 +18,10 @@ export function SumEditor(properties: {
   const keys = keysOf(sum.terms)
   const change = (next: SumChange) =>
     store.getState().edit({ kind: 'set-sum', id: sum.id, change: next })
+
+  const { target, handleOf } = useTermDrag((from, to) => {
+    change({ terms: moved(sum.terms, from, to) })
+  })
 
   return (
     <fieldset
@@ -35,6 +40,8 @@ export function SumEditor(properties: {
             label={labelOf(sheet, term.phasor)}
             first={index === 0}
             last={index === sum.terms.length - 1}
+            isTarget={index === target}
+            handle={handleOf(index)}
             onChange={(next) =>
               change({ terms: sum.terms.map((old, at) => (at === index ? next : old)) })
             }
@@ -134,14 +141,17 @@ function TermChip(properties: {
   readonly label: string
   readonly first: boolean
   readonly last: boolean
+  /** A term that is being dragged would take this place. */
+  readonly isTarget: boolean
+  readonly handle: TermHandle
   readonly onChange: (term: Term) => void
   readonly onMove: (step: 1 | -1) => void
   readonly onRemove: () => void
 }) {
-  const { term, label, first, last, onChange, onMove, onRemove } = properties
+  const { term, label, first, last, isTarget, handle, onChange, onMove, onRemove } = properties
   const negative = term.sign === -1
   return (
-    <span className="term">
+    <span className="term" data-target={isTarget || undefined}>
       <button
         type="button"
         aria-label={`Sign of ${label}: ${negative ? 'minus' : 'plus'}`}
@@ -149,7 +159,9 @@ function TermChip(properties: {
       >
         {negative ? '−' : '+'}
       </button>
-      <PhasorSymbol label={label} />
+      <span className="term-handle" {...handle}>
+        <PhasorSymbol label={label} />
+      </span>
       <button
         type="button"
         aria-label={`Move ${label} earlier`}
