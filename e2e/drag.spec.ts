@@ -23,8 +23,8 @@ test.describe('a tip that is dragged', () => {
     const screen = await openBench(page)
     const { from } = arrowOf(screen.scene, 'term:s1:0')
     await dragOver(page, screen.tip('term:s1:0'), screen.at(away(from, 93.2, 24.3)))
-    await expect(page.locator('output')).toContainText(/^V1 93\.0 mm/)
-    await expect(page.locator('output')).toContainText(/ V ∠ /)
+    await expect(page.locator('output.readout')).toContainText(/^V1 93\.0 mm/)
+    await expect(page.locator('output.readout')).toContainText(/ V ∠ /)
     expect(await readout(page)).toEqual([93, 46.5, 24])
     await page.mouse.up()
     const { phasors } = await settledSheet(page, (sheet) => sheet.phasors[1]?.angle?.value === 24)
@@ -131,7 +131,7 @@ test.describe('a drag leaves no trace', () => {
       await dragOver(page, screen.tip('term:s1:0'), aim)
       await expect(cell(page, 'Angle', 'V1')).toHaveValue('70°')
       await end(page)
-      await expect(page.locator('output')).toHaveCount(0)
+      await expect(page.locator('output.readout')).toHaveCount(0)
       await expect(cell(page, 'Angle', 'V1')).toHaveValue('10°')
       await page.mouse.move(aim.x + 20, aim.y + 20)
       await page.mouse.up()
@@ -150,7 +150,7 @@ async function openBench(page: Page): Promise<SheetOnScreen> {
 
 /** Millimetres, units and degrees, as the readout beside the pointer gives them. */
 async function readout(page: Page): Promise<readonly number[]> {
-  const text = await textOf(page.locator('output'))
+  const text = await textOf(page.locator('output.readout'))
   return figuresIn(text.replace(/^\S+ /, '')).map(({ value }) => value)
 }
 

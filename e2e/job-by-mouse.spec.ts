@@ -53,13 +53,13 @@ test('a technician does the whole job with the mouse', async ({ page }) => {
     const length = Math.round(Math.hypot(to.x - from.x, to.y - from.y)) + 10
     await dragOver(page, screen.at(to), screen.at(away(from, length, 20)))
     const dragged = length * unitsPerMillimetre
-    await expect(page.locator('output')).toContainText(`VR ${length}.0 mm`)
+    await expect(page.locator('output.readout')).toContainText(`VR ${length}.0 mm`)
     expectFigures(await cell(page, 'Magnitude', 'VR').inputValue(), [dragged])
     await expect(cell(page, 'Angle', 'VR')).toHaveValue('20°')
     await expect(checkLine(page)).not.toHaveText(before)
     await page.mouse.up()
 
-    await expect(page.locator('output')).toHaveCount(0)
+    await expect(page.locator('output.readout')).toHaveCount(0)
     const after = await settledSheet(page, ({ phasors }) => phasors[1]?.angle?.value === 20)
     expect(after.phasors[1]?.magnitude?.value).toBeCloseTo(dragged, 9)
     await expectCheckedAs(page, after)

@@ -14,7 +14,7 @@ test('a finger drags a tip', async ({ page }) => {
   const finger = await touch(page)
   await finger.down(screen.at(to))
   await finger.move(screen.at(away(from, 93.2, 24.3)))
-  await expect(page.locator('output')).toContainText('V1 93.0 mm')
+  await expect(page.locator('output.readout')).toContainText('V1 93.0 mm')
   await expect(cell(page, 'Angle', 'V1')).toHaveValue('24°')
   await finger.lift()
   const { phasors } = await settledSheet(page, (sheet) => sheet.phasors[1]?.angle?.value === 24)
@@ -31,7 +31,7 @@ test('a second finger ends a drag without a trace, and both then zoom', async ({
   await fingers.move(aim)
   await expect(cell(page, 'Angle', 'V1')).toHaveValue('70°')
   await fingers.down(aim, other)
-  await expect(page.locator('output')).toHaveCount(0)
+  await expect(page.locator('output.readout')).toHaveCount(0)
   await expect(cell(page, 'Angle', 'V1')).toHaveValue('10°')
   await fingers.move({ x: aim.x + 50, y: aim.y }, { x: other.x - 50, y: other.y })
   await expect
@@ -49,7 +49,7 @@ test('a finger that the system takes away leaves no trace of its drag', async ({
   await finger.move(screen.at(away(from, 60, 70)))
   await expect(cell(page, 'Angle', 'V1')).toHaveValue('70°')
   await finger.lose()
-  await expect(page.locator('output')).toHaveCount(0)
+  await expect(page.locator('output.readout')).toHaveCount(0)
   await expectUntouched(page)
 })
 
