@@ -20,6 +20,7 @@ export type {
   TextItem,
   TextRun,
 } from './scene'
+export { gapText, type StampWords, stampWordsOf } from './stamp/words'
 export { svg } from './svg/document'
 export { labelRuns } from './text/label-runs'
 export { digitsOfResult } from './text/phasor-text'

@@ -15,6 +15,7 @@ import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
 import type { Item, PlacedArrow, Scene } from './scene'
+import { createStamp, NO_STAMP } from './stamp'
 import { describeDrawing } from './text/description'
 import { type Palette, paletteOf, type Theme } from './theme'
 
@@ -28,6 +29,8 @@ export interface LayoutOptions {
   readonly frozen?: Frozen
   /** Makes items for the arrows of these keys alone; `arrows` still lists all. */
   readonly only?: ReadonlySet<string>
+  /** The last whole evaluation, where this one has no verdict yet: its stamp is drawn in grey. */
+  readonly former?: Evaluation
 }
 
 /**
@@ -35,7 +38,7 @@ export interface LayoutOptions {
  * What has no value yet is not drawn.
  */
 export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
-  const { theme = 'light', labels = true, frozen, only } = options
+  const { theme = 'light', labels = true, frozen, only, former } = options
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
@@ -55,9 +58,20 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
   items.push(...open.arcs)
   const fences = [...edges, ...open.boxes]
   addDrawing(items, picture, palette, only)
+  const stamp = only
+    ? NO_STAMP
+    : createStamp(sheet, evaluation, former, { items, frame, fences }, palette)
+  items.push(...stamp.items)
   const labelling =
     labels && !only
-      ? createLabels(items, picture, createRegister(sheet, evaluation), frame, fences, palette)
+      ? createLabels(
+          items,
+          picture,
+          createRegister(sheet, evaluation),
+          frame,
+          [...fences, ...stamp.boxes],
+          palette,
+        )
       : { items: [], leftOut: 0 }
   items.push(...open.labels, ...labelling.items)
   return {
@@ -67,6 +81,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     title: sheet.title,
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
     labelsLeftOut: labelling.leftOut + open.leftOut,
+    ...(stamp.isLeftOut && { isStampLeftOut: true }),
   }
 }
 
