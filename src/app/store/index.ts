@@ -9,6 +9,7 @@ export type {
   Identity,
   Notice,
   Origin,
+  Progress,
   Selection,
   Shelved,
   State,

@@ -56,6 +56,11 @@ export interface State {
   /** The sum in the check line; the first where none was chosen. */
   readonly chosenSum: Id | undefined
   readonly notice: Notice | undefined
+  /** The last whole answer that came. It is of an older sheet while `progress` says so. */
+  readonly answer: Answer | undefined
+  readonly progress: Progress
+  /** Whether the board shows the readings as read, or the best values, which close. */
+  readonly values: 'read' | 'adjusted'
   /** What a screen reader is told after an edit. */
   readonly announcement: string
 }
@@ -64,4 +69,13 @@ export interface State {
 export interface Answer {
   readonly sheet: Sheet
   readonly evaluation: Evaluation
+  /** Everything is solved and adjusted; else the evaluation is what is known at once. */
+  readonly isWhole: boolean
+  /** Of one that is not whole: the last whole evaluation before it, shown greyed. */
+  readonly former?: Evaluation
 }
+
+/** How the whole answer comes along. */
+export type Progress =
+  | { readonly state: 'resting' | 'working' | 'slow' }
+  | { readonly state: 'failed'; readonly text: string }
