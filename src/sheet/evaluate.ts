@@ -85,7 +85,11 @@ function complexOfPhasor(
   return fromPolar(magnitude, angle)
 }
 
-function evaluateSum(sum: Sum, phasors: ReadonlyMap<PhasorId, PhasorEvaluation>): SumEvaluation {
+/** A sum's resultant of its terms, and how far it is from what it must equal. */
+export function evaluateSum(
+  sum: Sum,
+  phasors: ReadonlyMap<PhasorId, PhasorEvaluation>,
+): SumEvaluation {
   const terms = sum.terms.map(({ phasor, sign = 1 }) => ({
     value: complexOf(phasors.get(phasor)),
     sign,

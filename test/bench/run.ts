@@ -1,5 +1,7 @@
 import type { Measure } from './measure'
 import { dragFirstOf100, dragLooseAmong1000, redraw1000 } from './measures/board'
+import { falseAlarms, lostLoops, unnoticed, valuesOutside } from './measures/calibration'
+import { estimateForty, estimateSix, growthOfEstimate } from './measures/estimator'
 import { bytesOfFirstLoad, firstShaftsOnScreen } from './measures/first-load'
 import { charactersOfLink, linkAgainstDeflate } from './measures/link'
 import { resultantAgainstLoop, resultantAgainstMathjs } from './measures/resultant'
@@ -18,6 +20,12 @@ const measures: readonly Measure[] = [
   dragFirstOf100,
   dragLooseAmong1000,
   redraw1000,
+  estimateSix,
+  estimateForty,
+  lostLoops,
+  falseAlarms,
+  valuesOutside,
+  unnoticed,
 ]
 
 const width = Math.max(...measures.map(({ name }) => name.length))
@@ -33,4 +41,9 @@ for (const { name, goal, unit, measure } of measures) {
   const shown = unit === undefined ? figure.toFixed(3) : String(figure)
   const verdict = figure <= goal ? 'met' : 'missed'
   console.log(row(name, shown, `≤ ${goal}`, unit === undefined ? verdict : `${verdict} (${unit})`))
+}
+
+console.log('\nHow the time to solve a job grows with it, in this run:')
+for (const { phasors, ms } of growthOfEstimate()) {
+  console.log(`${String(phasors).padStart(4)} phasors ${ms.toFixed(1).padStart(8)} ms`)
 }

@@ -1,0 +1,2 @@
+export { evaluate } from './evaluate'
+export { problemOfSheet, type SheetProblem } from './sheet-problem'
