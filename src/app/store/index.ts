@@ -1,7 +1,14 @@
 export { StoreContext, usePage, usePageStore } from './context'
 export { describeAnswer, labelOf, nameOfSum, quantityOfSum } from './describe'
 export { createIdentity, createName } from './identity'
-export { answerOf, checkedSum, shownEvaluation, shownSheet } from './selectors'
+export {
+  answerOf,
+  checkedSum,
+  evaluationShown,
+  shownAnswer,
+  shownEvaluation,
+  shownSheet,
+} from './selectors'
 export type {
   Answer,
   Copy,

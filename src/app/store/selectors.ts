@@ -16,14 +16,15 @@ const adjusted = new WeakMap<Answer, Evaluation>()
 export function answerOf(sheet: Sheet): Answer {
   const known = answers.get(sheet)
   if (known) return known
-  const answer = { sheet, evaluation: quick(sheet), isWhole: false }
+  const answer = { sheet, evaluation: quick(sheet) }
   answers.set(sheet, answer)
   return answer
 }
 
-/** Keeps a whole answer for its sheet. */
-export function keepAnswer(sheet: Sheet, evaluation: Evaluation): Answer {
-  const answer = { sheet, evaluation, isWhole: true }
+/** Keeps the whole evaluation of a sheet. */
+export function keepAnswer(sheet: Sheet, whole: Evaluation): Answer {
+  const { phasors } = withFormerValues(sheet, quick(sheet), whole)
+  const answer = { sheet, evaluation: { ...whole, phasors }, whole }
   answers.set(sheet, answer)
   return answer
 }
@@ -32,17 +33,17 @@ export function keepAnswer(sheet: Sheet, evaluation: Evaluation): Answer {
 export function continueAnswer(from: Sheet, sheet: Sheet): void {
   if (answers.has(sheet)) return
   const before = answerOf(from)
-  const former = before.isWhole ? before.evaluation : before.former
+  const former = before.whole ?? before.former
   const evaluation = withFormerValues(sheet, quick(sheet), former)
-  answers.set(sheet, { sheet, evaluation, isWhole: false, ...(former && { former }) })
+  answers.set(sheet, { sheet, evaluation, ...(former && { former }) })
 }
 
 /** The evaluation of an answer as the board shows it: as read, or adjusted where that is known. */
 export function evaluationShown(answer: Answer, values: State['values']): Evaluation {
-  if (values === 'read' || !answer.isWhole) return answer.evaluation
+  if (values === 'read' || answer.whole === undefined) return answer.evaluation
   const known = adjusted.get(answer)
   if (known) return known
-  const evaluation = asAdjusted(answer.sheet, answer.evaluation)
+  const evaluation = asAdjusted(answer.sheet, answer.whole)
   adjusted.set(answer, evaluation)
   return evaluation
 }

@@ -68,10 +68,11 @@ export interface State {
 /** A sheet with what the program says of it. */
 export interface Answer {
   readonly sheet: Sheet
+  /** What the page shows: values as read, what is solved filled in once that is known. */
   readonly evaluation: Evaluation
-  /** Everything is solved and adjusted; else the evaluation is what is known at once. */
-  readonly isWhole: boolean
-  /** Of one that is not whole: the last whole evaluation before it, shown greyed. */
+  /** Everything solved and adjusted; undefined until it is worked out. */
+  readonly whole?: Evaluation
+  /** Until then: that of the sheet before, shown greyed. */
   readonly former?: Evaluation
 }
 
