@@ -11,7 +11,7 @@ import { viewAfterKey } from './keys'
 import { ReadoutLabel } from './ReadoutLabel'
 import { SceneShape } from './SceneShape'
 import { SelectionShape } from './SelectionShape'
-import { drawnScene, isGround } from './scene'
+import { greyed, isGround, sceneOfAnswer } from './scene'
 import { useMovingScene } from './useMovingScene'
 import { usePointers } from './usePointers'
 import { useBoardSize, usePixelRatio, useTheme } from './useScreen'
@@ -40,7 +40,12 @@ export function Board() {
   const [grip, setGrip] = useState<Grip>()
   const description = useId()
 
-  const scene = useMemo(() => base ?? drawnScene(sheet, theme), [base, sheet, theme])
+  const answer = usePage((state) => answerOf(state.history.sheet))
+  const values = usePage((state) => state.values)
+  const scene = useMemo(
+    () => base ?? sceneOfAnswer(answer, theme, values),
+    [base, answer, theme, values],
+  )
   const view = useMemo(() => chosenView ?? fitView(size, scene), [chosenView, size, scene])
   const moving = useMovingScene(base, theme)
   const ground = useMemo(
@@ -49,18 +54,23 @@ export function Board() {
   )
   const still = useMemo(
     () =>
-      scene.items.filter(
-        (item) =>
-          !isGround(item) &&
-          (hasFonts || item.kind !== 'text') &&
-          !(item.arrow !== undefined && moving.moved.has(item.arrow)),
-      ),
-    [scene, moving.moved, hasFonts],
+      scene.items
+        .filter(
+          (item) =>
+            !isGround(item) &&
+            (hasFonts || item.kind !== 'text') &&
+            !(item.arrow !== undefined && moving.moved.has(item.arrow)),
+        )
+        // While something moves, the verdict is of what was there before.
+        .map((item) =>
+          item.part === 'stamp' && moving.moved.size > 0 ? greyed(item, theme) : item,
+        ),
+    [scene, moving.moved, hasFonts, theme],
   )
 
   const words = useMemo(
-    () => describeBoard(sheet, answerOf(sheet).evaluation, scene),
-    [sheet, scene],
+    () => describeBoard(sheet, answer.evaluation, scene),
+    [sheet, answer, scene],
   )
 
   const latest = useRef({ scene, view, size })

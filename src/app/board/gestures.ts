@@ -69,6 +69,8 @@ type Gesture =
       readonly sheet: Sheet
     }
 
+const adjustedIsHeld =
+  'These are the adjusted values: show the readings as read to change the drawing.'
 const slack = 4
 const reachOfMouse = 9
 const reachOfFinger = 24
@@ -85,7 +87,8 @@ export function createGestures(host: GestureHost): Gestures {
     const reach = (input.touch ? reachOfFinger : reachOfMouse) / host.view().scale
     const { selection } = state
     const selected = selection?.kind === 'phasor' ? selection.id : undefined
-    return gripAt(state.history.sheet, scene, place, reach, selected)
+    const grip = gripAt(state.history.sheet, scene, place, reach, selected)
+    return grip && state.values === 'adjusted' ? { ...grip, held: adjustedIsHeld } : grip
   }
 
   const cancel = () => {

@@ -110,7 +110,10 @@ function finish(pen: Pen, item: LinesItem | PathItem | ArcItem): void {
 
 function paintText(pen: Pen, item: TextItem, height: number): void {
   const { turn = 0, at } = item
-  if (turn === 0) return paintLevelText(pen, item, height)
+  if (turn === 0) {
+    paintLevelText(pen, item, height)
+    return
+  }
   pen.save()
   pen.translate(at.x, height - at.y)
   pen.rotate(-turn * radiansPerDegree)

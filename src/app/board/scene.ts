@@ -1,6 +1,6 @@
-import { type Item, layout, type Scene, type Theme } from '../../drawing'
+import { type Item, layout, paletteOf, type Scene, type Theme } from '../../drawing'
 import type { Sheet } from '../../sheet'
-import { answerOf } from '../store'
+import { type Answer, answerOf, evaluationShown, type State } from '../store'
 
 const groundParts: ReadonlySet<Item['part']> = new Set([
   'paper',
@@ -11,21 +11,35 @@ const groundParts: ReadonlySet<Item['part']> = new Set([
   'title-block',
 ])
 
-const scenes = {
-  light: new WeakMap<Sheet, Scene>(),
-  dark: new WeakMap<Sheet, Scene>(),
-}
+const scenes = new WeakMap<Answer, Map<string, Scene>>()
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
 export function isGround(item: Item): boolean {
   return groundParts.has(item.part)
 }
 
-/** The whole scene of a sheet in the colours of a theme; laid out once for each sheet. */
+/** The whole scene of a sheet in the colours of a theme, with all that is known of it by now, as read. */
 export function drawnScene(sheet: Sheet, theme: Theme): Scene {
-  const known = scenes[theme].get(sheet)
+  return sceneOfAnswer(answerOf(sheet), theme, 'read')
+}
+
+/** The whole scene of an answer, as read or as adjusted; laid out once for each. */
+export function sceneOfAnswer(answer: Answer, theme: Theme, values: State['values']): Scene {
+  const own = scenes.get(answer) ?? new Map<string, Scene>()
+  scenes.set(answer, own)
+  const name = `${theme} ${values}`
+  const known = own.get(name)
   if (known) return known
-  const scene = layout(sheet, answerOf(sheet).evaluation, { theme })
-  scenes[theme].set(sheet, scene)
+  const { sheet, former } = answer
+  const evaluation = evaluationShown(answer, values)
+  const scene = layout(sheet, evaluation, { theme, ...(former && { former }) })
+  own.set(name, scene)
   return scene
+}
+
+/** An item in grey: what it says is of a sheet that is being changed. */
+export function greyed(item: Item, theme: Theme): Item {
+  const { thin } = paletteOf(theme)
+  if (item.kind === 'text') return { ...item, fill: thin }
+  return item.stroke === undefined ? item : { ...item, stroke: thin }
 }
