@@ -71,6 +71,7 @@ export function checkText(
       calculated(context),
       ...(sum.equals === 0 ? [] : [measured(context)]),
       difference(context),
+      ...allowance(context),
     ],
   }
 }
@@ -177,6 +178,19 @@ function difference(context: Context): CheckFigure {
     return { name, figure: signed(formatQuantity(by, unit, magnitude)), under: percent }
   }
   return { name, figure: '–', under: 'Nothing checks this sum yet.' }
+}
+
+/** How large a gap the limits of the readings allow, and whether this one is within; nothing unless judged. */
+function allowance({ found: { closingError, closes }, unit }: Context): readonly CheckFigure[] {
+  const allowed = closingError?.allowed
+  if (allowed === undefined || closes === undefined) return []
+  return [
+    {
+      name: 'Gap allowed',
+      figure: formatQuantity(allowed, unit, { limit: allowed }),
+      under: closes ? 'the sum closes within its limits' : 'the sum does not close',
+    },
+  ]
 }
 
 /** The digits of a sum: the finest that any of its terms, or what it must equal, was given with. */

@@ -171,3 +171,41 @@ function knownOf(
   if (!read) return typed ? 'typed' : 'open'
   return typed ? 'partly' : 'read'
 }
+
+/** The best values of a row, for its cells Limit and Known. */
+export interface BestText {
+  /** Each best value with its limit. */
+  readonly values: readonly string[]
+  /** How each part came to be: `magnitude adjusted, angle solved`. */
+  readonly state: string
+}
+
+/** What was worked out of a phasor; undefined where nothing was. */
+export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): BestText | undefined {
+  if (best === undefined) return undefined
+  const { magnitude, angle, magnitudeLimit, angleLimit, magnitudeState, angleState } = best
+  const unit = unitOf(phasor.quantity)
+  const values = [
+    ...(magnitude === undefined || magnitudeLimit === undefined
+      ? []
+      : [
+          withLimit(
+            formatQuantity(magnitude, unit, { limit: magnitudeLimit }),
+            magnitudeLimit,
+            unit,
+          ),
+        ]),
+    ...(angle === undefined || angleLimit === undefined
+      ? []
+      : [withLimit(formatAngle(angle, { limit: angleLimit }), angleLimit, '°')]),
+  ]
+  const state =
+    magnitudeState === angleState
+      ? magnitudeState
+      : `magnitude ${magnitudeState}, angle ${angleState}`
+  return { values, state }
+}
+
+function withLimit(value: string, limit: number, unit: string): string {
+  return limit === 0 ? value : `${value} ${formatLimit(limit, unit)}`
+}
