@@ -1,13 +1,13 @@
 import { readFile, stat } from 'node:fs/promises'
 import {
   type Evaluation,
-  evaluate,
   extractSheetText,
   MAXIMUM_FILE_BYTES,
   parseSheetText,
   type SheetError,
   type SheetResult,
 } from '../sheet'
+import { evaluate } from '../sheet/estimate'
 import { linesOf } from './evaluate-lines'
 
 /** Where a sheet stands: the file as it was named and, among many sheets, the line, counted from 1. */
