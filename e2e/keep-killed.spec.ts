@@ -28,14 +28,14 @@ const parts = 4
 
 test.describe.configure({ mode: 'parallel' })
 // Two hundred pages are loaded: as small as they can be, and without their service worker.
-test.use({ viewport: { width: 480, height: 360 }, trace: 'off', serviceWorkers: 'block' })
+test.use({ viewport: { width: 320, height: 240 }, trace: 'off', serviceWorkers: 'block' })
 
 for (let part = 0; part < parts; part += 1) {
   test(`the last committed edit is back after a page was killed, part ${part + 1} of ${parts}`, async ({
     context,
     faults,
   }) => {
-    test.setTimeout(900_000)
+    test.setTimeout(3_600_000)
     await addDrivers(context)
     let done = 0
     await context.exposeBinding('reportStep', (_, count: number) => {

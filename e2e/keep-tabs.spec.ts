@@ -36,7 +36,7 @@ async function openKept(page: Page, id: string): Promise<void> {
 }
 
 test('two tabs on one sheet lose none of 500 interleaved changes', async ({ context }) => {
-  test.setTimeout(600_000)
+  test.setTimeout(1_800_000)
   await addDrivers(context)
   const seed = 4_711
   const random = createRandom(seed)

@@ -34,7 +34,7 @@ function clickVerb(text: string): string {
 for (const { name, start } of engines()) {
   test(`opens and works in ${name} with the server down, after one visit`, async () => {
     test.skip(start === undefined, `${name} is not on this machine.`)
-    test.setTimeout(90_000)
+    test.setTimeout(600_000)
     const server = await serve()
     const visitor = await (start as NonNullable<typeof start>)()
     try {

@@ -13,7 +13,8 @@ const nothing = 1e-9
 
 /**
  * Sorts the arrows by what became of them between two scenes on the same paper. A resultant is live
- * where the phasor that it is compared with changed, because the gap between them did.
+ * where the phasor that it is compared with changed, because the gap between them did; so is what a
+ * hand drew for a sum in which anything changed.
  */
 export function displacementBetween(before: Scene, after: Scene): Displacement {
   const earlier = new Map(before.arrows.map((arrow) => [arrow.key, arrow]))
@@ -32,7 +33,19 @@ export function displacementBetween(before: Scene, after: Scene): Displacement {
     const group = carried.get(name) ?? new Set<string>()
     carried.set(name, group.add(arrow.key))
   }
-  return { live, carried: [...carried.values()] }
+  for (const { key, sum } of handTouched(after, live)) {
+    live.add(key)
+    if (sum !== undefined) live.add(`resultant:${sum}`)
+    for (const group of carried.values()) group.delete(key)
+  }
+  return { live, carried: [...carried.values()].filter(({ size }) => size > 0) }
+}
+
+function handTouched({ arrows }: Scene, live: ReadonlySet<string>): readonly PlacedArrow[] {
+  const drawn = arrows.filter(({ role }) => role === 'hand')
+  if (drawn.length === 0) return drawn
+  const sums = new Set(arrows.flatMap(({ key, sum }) => (live.has(key) && sum ? [sum] : [])))
+  return drawn.filter(({ sum }) => sum !== undefined && sums.has(sum))
 }
 
 function displacementOf(old: PlacedArrow, now: PlacedArrow): Place | 'still' | 'changed' {

@@ -8,6 +8,7 @@ import {
   wrapDegrees,
 } from '../core'
 import { type Edit, type Evaluation, heldBy, type Place, type Sheet } from '../sheet'
+import { measureOf, moveHandArrow, moveHandTip, tipOf } from './hand/redraw'
 import type { PlacedArrow, Scene } from './scene'
 
 /** What a drag of a tip comes to: the edit that it would make, and what the readout says. */
@@ -21,6 +22,7 @@ export interface TipDrag {
 
 /** Why a tip stays where it is: a whole sentence; undefined where it can be dragged. */
 export function whyTipIsHeld(sheet: Sheet, arrow: PlacedArrow): string | undefined {
+  if (arrow.hand !== undefined) return undefined
   if (arrow.phasor === undefined) {
     return 'The resultant is worked out from its terms: drag a term instead.'
   }
@@ -42,6 +44,7 @@ export function dragTip(
   free: boolean,
 ): Result<TipDrag> {
   const { phasor } = arrow
+  if (arrow.hand !== undefined) return dragHandTip(sheet, scene, arrow, point)
   const why = whyTipIsHeld(sheet, arrow)
   if (why !== undefined || phasor === undefined) return failure(why ?? '')
   const held = heldBy(sheet, phasor)
@@ -73,6 +76,27 @@ export function dragTip(
   })
 }
 
+/** What a hand drew goes to tenths of a millimetre and of a degree, as rule and protractor are read. */
+function dragHandTip(
+  sheet: Sheet,
+  scene: Scene,
+  arrow: PlacedArrow,
+  point: Place,
+): Result<TipDrag> {
+  const drawn = sheet.hand?.find(({ id }) => id === arrow.hand)
+  if (!drawn) return failure('This arrow was rubbed out.')
+  const aim = measureOf(drawn.from, point)
+  const millimetres = snapLength(aim.millimetres, true)
+  const degrees = snapAngle(aim.degrees, true)
+  const perMillimetre = (scene.unitsPerCentimetre[arrow.quantity] ?? 1) / 10
+  return success({
+    edit: moveHandTip(sheet, drawn, tipOf(drawn.from, { millimetres, degrees })),
+    millimetres,
+    magnitude: millimetres * perMillimetre,
+    angle: arrow.sign === 1 ? degrees : wrapDegrees(degrees + 180),
+  })
+}
+
 interface Figure {
   readonly value: number
   readonly text: string
@@ -94,7 +118,7 @@ function reachOf(aim: { re: number; im: number }, angle: number | undefined): nu
 
 /**
  * The edit that moves what an arrow belongs to by a distance on the paper, to whole millimetres
- * (`free`: tenths): the whole figure of a sum, or a loose phasor.
+ * (`free`: tenths): the whole figure of a sum, a loose phasor, or a hand arrow with what hangs on it.
  */
 export function dragBody(
   sheet: Sheet,
@@ -105,6 +129,8 @@ export function dragBody(
 ): Edit | undefined {
   const step = free ? 10 : 1
   const snap = (value: number) => Math.round(value * step) / step
+  const drawn = sheet.hand?.find(({ id }) => id === arrow.hand)
+  if (drawn) return moveHandArrow(sheet, drawn, { x: snap(by.x), y: snap(by.y) })
   if (arrow.sum !== undefined) {
     const start = startOf(scene, arrow.sum)
     if (!start) return undefined
@@ -144,7 +170,7 @@ function snapLength(millimetres: number, free: boolean): number {
 }
 
 /** Decimals that show one millimetre of paper (a tenth, where free) in the phasor's unit. */
-function decimalsOfStep(unitsPerMillimetre: number, free: boolean): number {
+export function decimalsOfStep(unitsPerMillimetre: number, free: boolean): number {
   const step = unitsPerMillimetre / (free ? 10 : 1)
   return Math.min(20, Math.max(0, -Math.floor(Math.log10(step) + 1e-9)))
 }

@@ -1,5 +1,7 @@
 import type { Id, Place, Sheet } from '../sheet'
+import { arrowIndexOf } from './arrow-index'
 import { whyTipIsHeld } from './drag'
+import { distanceToSegment } from './geometry'
 import type { PlacedArrow, Scene } from './scene'
 
 /** Where a pointer takes hold of an arrow. */
@@ -10,10 +12,18 @@ export interface Grip {
   readonly held: string | undefined
 }
 
+/** An arrow within reach: the lesser rank is picked first, then the nearer, then the earlier. */
+interface Candidate {
+  readonly arrow: PlacedArrow
+  readonly order: number
+  readonly away: number
+  readonly rank: number
+}
+
 /**
  * What a pointer takes hold of at a place on the paper, within a reach in millimetres. Tips come
- * before bodies. Where several tips meet, as they do when a sum closes, the selected phasor's comes
- * first, then one that can be dragged, then the nearest.
+ * before bodies. Where several tips meet, as they do when a sum closes, the selected phasor's (or hand
+ * arrow's) comes first, then one that can be dragged, then the nearest.
  */
 export function gripAt(
   sheet: Sheet,
@@ -32,18 +42,20 @@ function tipAt(
   reach: number,
   selected: Id | undefined,
 ): Grip | undefined {
-  const near = scene.arrows
-    .map((arrow) => ({ arrow, away: Math.hypot(arrow.to.x - place.x, arrow.to.y - place.y) }))
-    .filter(({ away }) => away <= reach)
-    .map((found) => ({ ...found, held: whyTipIsHeld(sheet, found.arrow) }))
-    .sort(
-      (one, other) =>
-        rank(one.arrow, selected) - rank(other.arrow, selected) ||
-        Number(one.held !== undefined) - Number(other.held !== undefined) ||
-        one.away - other.away,
-    )
-  const [best] = near
-  return best && { arrow: best.arrow, at: 'tip', held: best.held }
+  const near: Candidate[] = []
+  for (const { arrow, order } of arrowIndexOf(scene).tipsNear(place, reach)) {
+    const away = Math.hypot(arrow.to.x - place.x, arrow.to.y - place.y)
+    if (away <= reach) near.push({ arrow, order, away, rank: rankOf(arrow, selected) })
+  }
+  near.sort(compare)
+  const [first] = near
+  if (first === undefined) return undefined
+  // Whether a tip is held takes longer to find out than where it lies: it is asked one by one.
+  const free = near.find(
+    ({ arrow, rank }) => rank === first.rank && whyTipIsHeld(sheet, arrow) === undefined,
+  )
+  const { arrow } = free ?? first
+  return { arrow, at: 'tip', held: free ? undefined : whyTipIsHeld(sheet, arrow) }
 }
 
 function bodyAt(
@@ -52,28 +64,21 @@ function bodyAt(
   reach: number,
   selected: Id | undefined,
 ): Grip | undefined {
-  let best: { arrow: PlacedArrow; away: number } | undefined
-  for (const arrow of scene.arrows) {
-    const away = distanceToShaft(arrow, place)
+  let best: Candidate | undefined
+  for (const { arrow, order } of arrowIndexOf(scene).shaftsNear(place, reach)) {
+    const { from, to } = arrow
+    const away = distanceToSegment(place.x, place.y, from.x, from.y, to.x, to.y)
     if (away > reach) continue
-    const better =
-      best === undefined ||
-      rank(arrow, selected) < rank(best.arrow, selected) ||
-      (rank(arrow, selected) === rank(best.arrow, selected) && away < best.away)
-    if (better) best = { arrow, away }
+    const candidate = { arrow, order, away, rank: rankOf(arrow, selected) }
+    if (best === undefined || compare(candidate, best) < 0) best = candidate
   }
   return best && { arrow: best.arrow, at: 'body', held: undefined }
 }
 
-function rank(arrow: PlacedArrow, selected: Id | undefined): number {
-  return arrow.phasor !== undefined && arrow.phasor === selected ? 0 : 1
+function compare(one: Candidate, other: Candidate): number {
+  return one.rank - other.rank || one.away - other.away || one.order - other.order
 }
 
-function distanceToShaft({ from, to }: PlacedArrow, place: Place): number {
-  const dx = to.x - from.x
-  const dy = to.y - from.y
-  const squared = dx * dx + dy * dy
-  const along = squared === 0 ? 0 : ((place.x - from.x) * dx + (place.y - from.y) * dy) / squared
-  const clamped = Math.min(1, Math.max(0, along))
-  return Math.hypot(from.x + clamped * dx - place.x, from.y + clamped * dy - place.y)
+function rankOf({ phasor, hand }: PlacedArrow, selected: Id | undefined): number {
+  return selected !== undefined && (phasor ?? hand) === selected ? 0 : 1
 }

@@ -1,6 +1,9 @@
-import type { Evaluation, Sheet } from '../sheet'
+import type { Evaluation, Id, Sheet } from '../sheet'
 import { drawingAreaOf } from './area'
 import { type Box, boxOfPoints, joinBoxes, NO_BOX } from './geometry'
+import { shownArrows } from './hand/arrows'
+import { type ConstructionLines, constructionItems } from './hand/construction'
+import { missesOf } from './hand/misses'
 import { angleItem } from './items/angles'
 import { addArrow } from './items/arrows'
 import { axisItem } from './items/axis'
@@ -31,6 +34,15 @@ export interface LayoutOptions {
   readonly only?: ReadonlySet<string>
   /** The last whole evaluation, where this one has no verdict yet: its stamp is drawn in grey. */
   readonly former?: Evaluation
+  /**
+   * Places the figures of the arrows with these keys alone, and `arrows` lists no others: in a drag,
+   * what stands still need not be looked at. Only with a whole scene as `frozen`.
+   */
+  readonly within?: ReadonlySet<string>
+  /** Sums whose exact drawing is hidden, as while they are constructed by hand. */
+  readonly hidden?: ReadonlySet<Id>
+  /** Lines of the construction to be drawn; none where nothing is said. */
+  readonly construction?: ConstructionLines
 }
 
 /**
@@ -38,18 +50,20 @@ export interface LayoutOptions {
  * What has no value yet is not drawn.
  */
 export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
-  const { theme = 'light', labels = true, frozen, only, former } = options
+  const { theme = 'light', labels = true, frozen, only, within, hidden, construction } = options
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
-  const placed = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen)
+  const placed = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen, within)
   const placement = {
     ...placed,
     unitsPerCentimetre: only
       ? placed.unitsPerCentimetre
       : scalesWithOpen(sheet, evaluation, placed.unitsPerCentimetre),
+    arrows: shownArrows(sheet, placed.arrows, hidden),
   }
-  const picture = createPicture(sheet, placement.arrows)
+  const misses = missesOf(sheet, evaluation, hidden)
+  const picture = createPicture(sheet, placement.arrows, misses)
   const items: Item[] = []
   const edges = only ? [] : addSheet(items, sheet, placement, picture, palette)
   const open = only
@@ -57,10 +71,14 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     : createOpenDrawing(sheet, evaluation, placement, { frame, edges, hasLabels: labels }, palette)
   items.push(...open.arcs)
   const fences = [...edges, ...open.boxes]
+  if (construction) {
+    const lines = constructionItems(sheet, evaluation, placement.arrows, construction, palette)
+    for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
+  }
   addDrawing(items, picture, palette, only)
   const stamp = only
     ? NO_STAMP
-    : createStamp(sheet, evaluation, former, { items, frame, fences }, palette)
+    : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
   items.push(...stamp.items)
   const labelling =
     labels && !only
@@ -111,13 +129,15 @@ function addSheet(
 /** Arcs, arrows and gaps, in painting order. */
 function addDrawing(
   items: Item[],
-  { arcs, painted, gaps }: Picture,
+  { arcs, painted, gaps, misses }: Picture,
   palette: Palette,
   only: ReadonlySet<string> | undefined,
 ): void {
   for (const arc of arcs) if (!only || only.has(arc.key)) items.push(angleItem(arc, palette))
   for (const arrow of painted) if (!only || only.has(arrow.key)) addArrow(items, arrow, palette)
-  for (const gap of gaps) if (!only || only.has(gap.key)) items.push(gapItem(gap, palette))
+  for (const gap of [...gaps, ...misses]) {
+    if (!only || only.has(gap.key)) items.push(gapItem(gap, palette))
+  }
 }
 
 /** The axis through the origin, and one through every other point about which an angle is drawn. */

@@ -20,6 +20,8 @@ interface ItemCommon {
     | 'arrow'
     | 'angle'
     | 'gap'
+    | 'construction'
+    | 'aid'
     | 'label'
     | 'scale-bar'
     | 'title-block'
@@ -78,11 +80,18 @@ export type Item = LinesItem | PathItem | ArcItem | TextItem
  * and drawn as a gap alone: what it is short of its start.
  */
 export interface PlacedArrow {
-  /** Unique in the scene and stable while values change: `term:s1:0`, `measured:s1`, `resultant:s1`, `loose:V1`. */
+  /**
+   * Unique in the scene and stable while values change: `term:s1:0`, `measured:s1`, `resultant:s1`,
+   * `loose:V1`, `hand:h1`.
+   */
   readonly key: string
-  readonly role: 'term' | 'resultant' | 'measured' | 'loose'
-  /** The phasor it shows; a resultant shows none. */
+  readonly role: 'term' | 'resultant' | 'measured' | 'loose' | 'hand'
+  /** The phasor it shows; a resultant shows none, nor does what a hand drew. */
   readonly phasor?: Id
+  /** The hand arrow that it is. */
+  readonly hand?: Id
+  /** Set on the hand arrow that closes a sum. */
+  readonly isClosing?: true
   readonly sum?: Id
   readonly sign: 1 | -1
   readonly quantity: Quantity

@@ -1,6 +1,6 @@
 import { angleOf, differenceDegrees, magnitudeOf, wrapDegrees } from '../core'
+import { indicationOf } from './readings/indication'
 import { type Lead, leadOf } from './readings/lead'
-import { magnitudeOfReading } from './readings/magnitude'
 import { referenceOf } from './reference'
 import { indexOf } from './sheet-index'
 import type {
@@ -85,28 +85,49 @@ export function asReadOf(sheet: Sheet): AsRead {
 
 function computeAsRead(sheet: Sheet): AsRead {
   const reference = referenceOf(sheet)
-  const { phasors, channels } = indexOf(sheet)
+  const { phasors } = indexOf(sheet)
   const readings = readingsByPhasor(sheet)
+  if (readings.size === 0) return { reference, values: typedValues(sheet, reference) }
   const angles = anglesOf(sheet, reference, readings)
-  const readMagnitude = ({ id, quantity }: Phasor): number | undefined => {
+  const readMagnitude = ({ id }: Phasor): number | undefined => {
     const own = readings.get(id)?.magnitude ?? []
     if (own.length === 0) return undefined
-    return mean(
-      own.map((reading) =>
-        magnitudeOfReading(reading, quantity, channels.get(reading.channel ?? '')),
-      ),
-    )
+    return mean(own.map((reading) => indicationOf(sheet, reading)?.observed.value))
   }
   const values = new Map<PhasorId, KnownParts>()
   for (const phasor of phasors.values()) {
     const magnitude = readMagnitude(phasor) ?? typedMagnitude(phasor)
     const angle = angles.get(phasor.id)
-    values.set(phasor.id, {
-      ...(magnitude === undefined ? {} : { magnitude }),
-      ...(angle === undefined ? {} : { angle: wrapDegrees(angle) }),
-    })
+    values.set(phasor.id, partsOf(magnitude, angle))
   }
   return { reference, values }
+}
+
+const typedParts = new WeakMap<Phasor, KnownParts>()
+
+/** Where nothing was read, each phasor is as typed: one that did not change is not looked at again. */
+function typedValues(
+  sheet: Sheet,
+  reference: PhasorId | undefined,
+): ReadonlyMap<PhasorId, KnownParts> {
+  const values = new Map<PhasorId, KnownParts>()
+  for (const phasor of sheet.phasors) {
+    let known = typedParts.get(phasor)
+    if (known === undefined) {
+      known = partsOf(typedMagnitude(phasor), typedAngle(phasor))
+      typedParts.set(phasor, known)
+    }
+    const isOpenReference = phasor.id === reference && known.angle === undefined
+    values.set(phasor.id, isOpenReference ? { ...known, angle: 0 } : known)
+  }
+  return values
+}
+
+function partsOf(magnitude: number | undefined, angle: number | undefined): KnownParts {
+  return {
+    ...(magnitude === undefined ? {} : { magnitude }),
+    ...(angle === undefined ? {} : { angle: wrapDegrees(angle) }),
+  }
 }
 
 function anglesOf(

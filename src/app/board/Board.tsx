@@ -1,18 +1,23 @@
 import { type KeyboardEvent, useId, useMemo, useRef, useState } from 'react'
 import { Layer, Stage } from 'react-konva/lib/ReactKonvaCore'
-import type { Grip, Scene } from '../../drawing'
+import type { Grip, Scene, Stroke } from '../../drawing'
 import { useFonts } from '../fonts'
-import { answerOf, shownSheet, usePage, usePageStore } from '../store'
+import { HandVerbs, StrokeForm } from '../hand'
+import { answerOf, hiddenSums, shownSheet, usePage, usePageStore } from '../store'
 import { BoardVerbs } from './BoardVerbs'
 import { CarriedShape } from './CarriedShape'
 import { describeBoard } from './describe'
-import { createGestures, type Readout } from './gestures'
+import { createGestures, type DrawnStroke, type Readout } from './gestures'
 import { viewAfterKey } from './keys'
+import { Loupe } from './Loupe'
 import { ReadoutLabel } from './ReadoutLabel'
 import { SceneShape } from './SceneShape'
 import { SelectionShape } from './SelectionShape'
+import { StrokeReadout } from './StrokeReadout'
+import { StrokeShape } from './StrokeShape'
 import { greyed, isGround, sceneOfAnswer } from './scene'
 import { useMovingScene } from './useMovingScene'
+import { useNudgeKeys } from './useNudgeKeys'
 import { usePointers } from './usePointers'
 import { useBoardSize, usePixelRatio, useTheme } from './useScreen'
 import { fitView, type View, zoomView } from './view'
@@ -38,16 +43,25 @@ export function Board() {
   const [base, setBase] = useState<Scene>()
   const [readout, setReadout] = useState<Readout>()
   const [grip, setGrip] = useState<Grip>()
+  const [drawn, setDrawn] = useState<DrawnStroke>()
+  const [finished, setFinished] = useState<Stroke>()
   const description = useId()
 
   const answer = usePage((state) => answerOf(state.history.sheet))
   const values = usePage((state) => state.values)
+  const pen = usePage((state) => state.pen)
+  const chosenSum = usePage((state) => state.chosenSum)
+  const hidden = hiddenSums(sheet, pen, chosenSum)
+  const viewOptions = useMemo(
+    () => ({ hidden, construction: pen.construction, values }),
+    [hidden, pen.construction, values],
+  )
   const scene = useMemo(
-    () => base ?? sceneOfAnswer(answer, theme, values),
-    [base, answer, theme, values],
+    () => base ?? sceneOfAnswer(answer, theme, viewOptions),
+    [base, answer, theme, viewOptions],
   )
   const view = useMemo(() => chosenView ?? fitView(size, scene), [chosenView, size, scene])
-  const moving = useMovingScene(base, theme)
+  const moving = useMovingScene(base, theme, viewOptions)
   const ground = useMemo(
     () => scene.items.filter((item) => isGround(item) && (hasFonts || item.kind !== 'text')),
     [scene, hasFonts],
@@ -89,11 +103,14 @@ export function Board() {
         },
         setBase,
         setReadout,
-        setGrip,
+        setGrip: (next) => setGrip((old) => (isSameGrip(old, next) ? old : next)),
+        setStroke: setDrawn,
+        finishStroke: setFinished,
       }),
     [store],
   )
   usePointers(root, gestures)
+  useNudgeKeys(scene)
 
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.ctrlKey || event.metaKey || event.altKey) return
@@ -103,11 +120,15 @@ export function Board() {
     setView(next)
   }
 
+  const stroke = drawn?.stroke ?? finished
+  const touched = drawn?.touch ? drawn.at : readout?.touch ? readout.at : undefined
+
   return (
     <section
       className="board"
       ref={root}
       aria-label="Drawing"
+      data-pen={pen.mode === undefined || pen.isAdjusting ? undefined : pen.mode}
       data-grip={grip ? (grip.held === undefined ? grip.at : 'held') : undefined}
       data-busy={base ? true : undefined}
     >
@@ -137,12 +158,21 @@ export function Board() {
               />
             ))}
             <SceneShape items={moving.live} view={view} height={scene.height} />
+            {stroke && (
+              <StrokeShape stroke={stroke} view={view} height={scene.height} theme={theme} />
+            )}
           </Layer>
         </Stage>
       </div>
       <p id={description} className="visually-hidden">
         {words}
       </p>
+      {touched && <Loupe at={touched} board={root} />}
+      {drawn && <StrokeReadout drawn={drawn} scene={scene} sheet={sheet} board={size} />}
+      {finished && (
+        <StrokeForm stroke={finished} scene={scene} onDone={() => setFinished(undefined)} />
+      )}
+      <HandVerbs />
       {readout && <ReadoutLabel readout={readout} sheet={shown} board={size} />}
       <BoardVerbs
         onKeyDown={onKeyDown}
@@ -154,4 +184,8 @@ export function Board() {
       />
     </section>
   )
+}
+
+function isSameGrip(one: Grip | undefined, other: Grip | undefined): boolean {
+  return one?.arrow === other?.arrow && one?.at === other?.at && one?.held === other?.held
 }

@@ -13,7 +13,7 @@ export function BoardVerbs(properties: {
   const { scene, onKeyDown, onFit, onZoom } = properties
   const store = usePageStore()
   const isAdjusted = usePage(({ values }) => values === 'adjusted')
-  const pinned = store.getState().history.sheet.drawing
+  const { drawing: pinned, hand } = store.getState().history.sheet
   const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
   const refit = () =>
     store
@@ -37,7 +37,8 @@ export function BoardVerbs(properties: {
       {isAdjusted && <p className="board-remark">Drawn as adjusted</p>}
       {scene.isStampLeftOut && <p className="board-remark">Stamp left out: no free place</p>}
       {isOffPaper(scene) && <p className="board-remark">The drawing reaches beyond its frame</p>}
-      {isPinned && (
+      {/* What a hand drew is true to the scale that it was drawn at. */}
+      {isPinned && hand === undefined && (
         <button type="button" className="verb" onClick={refit}>
           Fit drawing to paper
         </button>

@@ -24,7 +24,9 @@ export function SelectionShape(properties: {
         const picked =
           selection?.kind === 'phasor'
             ? arrow.phasor === selection.id
-            : selection !== undefined && arrow.sum === selection.id
+            : selection?.kind === 'hand'
+              ? arrow.hand === selection.id
+              : selection !== undefined && arrow.sum === selection.id
         if (!picked) continue
         pen.beginPath()
         pen.moveTo(arrow.from.x, scene.height - arrow.from.y)

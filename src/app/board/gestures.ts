@@ -1,14 +1,20 @@
 import {
+  type Drop,
   dragBody,
   dragTip,
+  dropAt,
   type Grip,
   gripAt,
   pinDrawing,
   type Scene,
+  type Stroke,
+  snapTail,
+  strokeTo,
+  type Tail,
   type TipDrag,
 } from '../../drawing'
 import type { Place, Sheet } from '../../sheet'
-import { answerOf, type Selection, type Store } from '../store'
+import { answerOf, labelOf, nameOfSum, type Selection, type Store } from '../store'
 import { panView, type Size, toPaper, type View, zoomView } from './view'
 
 /** What the gestures read from the board and tell it. Points are CSS pixels from its corner. */
@@ -22,14 +28,27 @@ export interface GestureHost {
   setBase(scene: Scene | undefined): void
   setReadout(readout: Readout | undefined): void
   setGrip(grip: Grip | undefined): void
+  /** A new arrow is being drawn, or is not any more. */
+  setStroke(stroke: DrawnStroke | undefined): void
+  /** A new arrow was drawn and let go: what is it? */
+  finishStroke(stroke: Stroke): void
 }
 
-/** What the readout beside the pointer says while a tip is dragged. */
-export interface Readout {
+/** A new arrow that is being drawn, and where the pointer is. */
+export interface DrawnStroke {
+  readonly stroke: Stroke
   readonly at: Place
-  readonly grip: Grip
-  readonly drag: TipDrag
+  readonly touch: boolean
 }
+
+/**
+ * What the readout beside the pointer says: what a dragged tip comes to, or what letting go of a body
+ * would do.
+ */
+export type Readout = { readonly at: Place; readonly touch: boolean } & (
+  | { readonly grip: Grip; readonly drag: TipDrag }
+  | { readonly hint: string }
+)
 
 /** One pointer event, as far as the gestures need it. */
 export interface PointerInput {
@@ -67,15 +86,26 @@ type Gesture =
       readonly started: boolean
       readonly base: Scene
       readonly sheet: Sheet
+      /** What letting go would do beside moving the body. */
+      readonly drop?: Drop | undefined
+    }
+  | {
+      readonly kind: 'draw'
+      readonly pointer: number
+      readonly tail: Tail
+      readonly stroke?: Stroke
     }
 
-const adjustedIsHeld =
+/** Why nothing can be dragged while the adjusted values are drawn: they follow from the readings. */
+export const ADJUSTED_IS_HELD =
   'These are the adjusted values: show the readings as read to change the drawing.'
+/** A shorter stroke was a slip of the hand, in millimetres. */
+const shortest = 1
 const slack = 4
 const reachOfMouse = 9
 const reachOfFinger = 24
 
-/** Makes the board's gestures: one pointer drags a tip, a body or the paper, two pan and zoom. */
+/** Makes the board's gestures: one pointer drags a tip, a body or the paper, or draws; two pan and zoom. */
 export function createGestures(host: GestureHost): Gestures {
   const pointers = new Map<number, Place>()
   let gesture: Gesture | undefined
@@ -86,9 +116,9 @@ export function createGestures(host: GestureHost): Gestures {
     const place = toPaper(host.view(), input.point, scene)
     const reach = (input.touch ? reachOfFinger : reachOfMouse) / host.view().scale
     const { selection } = state
-    const selected = selection?.kind === 'phasor' ? selection.id : undefined
+    const selected = selection?.kind === 'sum' ? undefined : selection?.id
     const grip = gripAt(state.history.sheet, scene, place, reach, selected)
-    return grip && state.values === 'adjusted' ? { ...grip, held: adjustedIsHeld } : grip
+    return grip && state.values === 'adjusted' ? { ...grip, held: ADJUSTED_IS_HELD } : grip
   }
 
   const cancel = () => {
@@ -96,6 +126,26 @@ export function createGestures(host: GestureHost): Gestures {
     host.store.getState().dropDraft()
     host.setBase(undefined)
     host.setReadout(undefined)
+    host.setStroke(undefined)
+  }
+
+  const startStroke = (input: PointerInput): boolean => {
+    const { pen, history } = host.store.getState()
+    if (pen.mode === undefined || pen.isAdjusting || input.button !== 0) return false
+    const reach = (input.touch ? reachOfFinger : reachOfMouse) / host.view().scale
+    const place = toPaper(host.view(), input.point, host.scene())
+    const tail = snapTail(history.sheet, host.scene(), place, reach, pen.mode)
+    gesture = { kind: 'draw', pointer: input.pointer, tail }
+    return true
+  }
+
+  const draw = (now: Extract<Gesture, { kind: 'draw' }>, input: PointerInput) => {
+    const { pen, history } = host.store.getState()
+    if (pen.mode === undefined) return
+    const place = toPaper(host.view(), input.point, host.scene())
+    const stroke = strokeTo(history.sheet, now.tail, place, pen.mode, input.free)
+    gesture = { ...now, stroke }
+    host.setStroke({ stroke, at: input.point, touch: input.touch })
   }
 
   const startPinch = () => {
@@ -133,19 +183,26 @@ export function createGestures(host: GestureHost): Gestures {
       const result = dragTip(sheet, evaluation, base, grip.arrow, place, input.free)
       if (!result.ok) return
       host.store.getState().preview(result.value.edit)
-      host.setReadout({ at: input.point, grip, drag: result.value })
+      host.setReadout({ at: input.point, touch: input.touch, grip, drag: result.value })
       return
     }
     const from = toPaper(host.view(), now.from, base)
     const by = { x: place.x - from.x, y: place.y - from.y }
     const edit = dragBody(sheet, base, grip.arrow, by, input.free)
     if (edit) host.store.getState().preview(edit)
+    const tail = { x: grip.arrow.from.x + by.x, y: grip.arrow.from.y + by.y }
+    const reach = (input.touch ? reachOfFinger : reachOfMouse) / host.view().scale
+    const drop = dropAt(sheet, base, grip.arrow, tail, reach)
+    gesture = { ...now, started: true, drop }
+    const hint = drop && hintOf(sheet, drop)
+    host.setReadout(hint === undefined ? undefined : { at: input.point, touch: input.touch, hint })
   }
 
   return {
     down: (input) => {
       pointers.set(input.pointer, input.point)
       if (pointers.size > 1) return startPinch()
+      if (startStroke(input)) return
       const { select, history } = host.store.getState()
       const grip = input.button === 0 ? gripFor(input) : undefined
       if (!grip) {
@@ -165,12 +222,15 @@ export function createGestures(host: GestureHost): Gestures {
     },
     move: (input) => {
       if (!pointers.has(input.pointer)) {
-        host.setGrip(gripFor(input))
+        const { pen } = host.store.getState()
+        const isDrawing = pen.mode !== undefined && !pen.isAdjusting
+        host.setGrip(isDrawing ? undefined : gripFor(input))
         return
       }
       pointers.set(input.pointer, input.point)
       if (gesture?.kind === 'pinch') pinch(gesture)
       else if (gesture?.kind === 'drag') drag(gesture, input)
+      else if (gesture?.kind === 'draw') draw(gesture, input)
       else if (gesture?.kind === 'pan') {
         const dx = input.point.x - gesture.last.x
         const dy = input.point.y - gesture.last.y
@@ -190,8 +250,13 @@ export function createGestures(host: GestureHost): Gestures {
       if (ended?.kind === 'drag' && ended.started) {
         host.setReadout(undefined)
         const { draft, edit } = host.store.getState()
-        if (draft) edit(pinDrawing(ended.sheet, ended.base, draft.edit))
+        const made = ended.drop?.edit ?? draft?.edit
+        if (made) edit(pinDrawing(ended.sheet, ended.base, made))
         host.setBase(undefined)
+      } else if (ended?.kind === 'draw') {
+        host.setStroke(undefined)
+        const { stroke } = ended
+        if (stroke && stroke.millimetres >= shortest) host.finishStroke(stroke)
       } else if (ended?.kind === 'pan' && !ended.moved) {
         host.store.getState().select(undefined)
       }
@@ -204,7 +269,15 @@ export function createGestures(host: GestureHost): Gestures {
   }
 }
 
+function hintOf(sheet: Sheet, { sum, on }: Drop): string {
+  const found = sheet.sums?.find(({ id }) => id === sum)
+  return found
+    ? `Let go: a term of ${nameOfSum(sheet, found)}`
+    : `Let go: hung on the tip of ${labelOf(sheet, on)}`
+}
+
 function selectionOf({ arrow }: Grip): Selection | undefined {
+  if (arrow.hand !== undefined) return { kind: 'hand', id: arrow.hand }
   if (arrow.phasor !== undefined) return { kind: 'phasor', id: arrow.phasor }
   return arrow.sum === undefined ? undefined : { kind: 'sum', id: arrow.sum }
 }

@@ -1,3 +1,4 @@
+import type { RuleAndProtractor } from '../../drawing'
 import { fitView, panView, type Size, type View, zoomView } from './view'
 
 const step = 40
@@ -16,4 +17,28 @@ export function viewAfterKey(key: string, view: View, board: Size, paper: Size):
   const zoom = zooms[key]
   if (zoom) return zoomView(view, zoom, { x: board.width / 2, y: board.height / 2 })
   return key === '0' ? fitView(board, paper) : undefined
+}
+
+const nudges: { readonly [key: string]: RuleAndProtractor } = {
+  ArrowUp: { millimetres: 1, degrees: 0 },
+  ArrowDown: { millimetres: -1, degrees: 0 },
+  ArrowLeft: { millimetres: 0, degrees: 1 },
+  ArrowRight: { millimetres: 0, degrees: -1 },
+}
+
+/**
+ * What a key does to the arrow that is picked: up and down by 1 mm of length, left (anticlockwise) and
+ * right by 1°, a tenth of it with Shift. Undefined for other keys.
+ */
+export function nudgeOfKey(event: {
+  readonly key: string
+  readonly shiftKey: boolean
+  readonly ctrlKey: boolean
+  readonly metaKey: boolean
+  readonly altKey: boolean
+}): RuleAndProtractor | undefined {
+  const by = nudges[event.key]
+  if (!by || event.ctrlKey || event.metaKey || event.altKey) return undefined
+  const part = event.shiftKey ? 0.1 : 1
+  return { millimetres: by.millimetres * part, degrees: by.degrees * part }
 }

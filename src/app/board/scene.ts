@@ -1,5 +1,12 @@
-import { type Item, layout, paletteOf, type Scene, type Theme } from '../../drawing'
-import type { Sheet } from '../../sheet'
+import {
+  type ConstructionLines,
+  type Item,
+  layout,
+  paletteOf,
+  type Scene,
+  type Theme,
+} from '../../drawing'
+import type { Id, Sheet } from '../../sheet'
 import { type Answer, answerOf, evaluationShown, type State } from '../store'
 
 const groundParts: ReadonlySet<Item['part']> = new Set([
@@ -13,26 +20,37 @@ const groundParts: ReadonlySet<Item['part']> = new Set([
 
 const scenes = new WeakMap<Answer, Map<string, Scene>>()
 
+/** What of a scene is a matter of the view: no sheet says it. */
+export interface ViewOptions {
+  /** Sums whose exact drawing is hidden. */
+  readonly hidden?: ReadonlySet<Id>
+  readonly construction?: ConstructionLines
+  /** As read where nothing is said. */
+  readonly values?: State['values']
+}
+
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
 export function isGround(item: Item): boolean {
   return groundParts.has(item.part)
 }
 
-/** The whole scene of a sheet in the colours of a theme, with all that is known of it by now, as read. */
-export function drawnScene(sheet: Sheet, theme: Theme): Scene {
-  return sceneOfAnswer(answerOf(sheet), theme, 'read')
+/** The whole scene of a sheet in the colours of a theme, with all that is known of it by now. */
+export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}): Scene {
+  return sceneOfAnswer(answerOf(sheet), theme, options)
 }
 
-/** The whole scene of an answer, as read or as adjusted; laid out once for each. */
-export function sceneOfAnswer(answer: Answer, theme: Theme, values: State['values']): Scene {
+/** The whole scene of an answer; laid out once for each view. */
+export function sceneOfAnswer(answer: Answer, theme: Theme, options: ViewOptions): Scene {
+  const { values = 'read', ...view } = options
+  const { hidden = [], construction: { parallels = false, arcs = false } = {} } = view
+  const name = [theme, values, parallels, arcs, ...hidden].join(' ')
   const own = scenes.get(answer) ?? new Map<string, Scene>()
   scenes.set(answer, own)
-  const name = `${theme} ${values}`
   const known = own.get(name)
   if (known) return known
   const { sheet, former } = answer
   const evaluation = evaluationShown(answer, values)
-  const scene = layout(sheet, evaluation, { theme, ...(former && { former }) })
+  const scene = layout(sheet, evaluation, { theme, ...view, ...(former && { former }) })
   own.set(name, scene)
   return scene
 }

@@ -9,6 +9,7 @@ import {
 } from '../../drawing'
 import type { Place } from '../../sheet'
 import { answerOf, usePage } from '../store'
+import type { ViewOptions } from './scene'
 
 /** The part of the scene that a drag changes, apart from what stands still. */
 export interface MovingScene {
@@ -29,13 +30,19 @@ export interface MovingScene {
 interface Sorted extends Displacement {
   readonly moved: ReadonlySet<string>
   readonly groups: readonly { readonly key: string; readonly items: readonly Item[] }[]
+  /** One arrow of each thing that moves: enough to place all of it. */
+  readonly within: ReadonlySet<string>
 }
 
 const atRest: MovingScene = { moved: new Set(), live: [], carried: [], after: undefined }
 const none: ReadonlySet<string> = new Set()
 
 /** The moving part of the scene while a drag that began from `base` has a draft. */
-export function useMovingScene(base: Scene | undefined, theme: Theme): MovingScene {
+export function useMovingScene(
+  base: Scene | undefined,
+  theme: Theme,
+  view: ViewOptions,
+): MovingScene {
   const draft = usePage((state) => state.draft)
   const sorted = useRef<Sorted>(undefined)
   useEffect(() => {
@@ -45,18 +52,18 @@ export function useMovingScene(base: Scene | undefined, theme: Theme): MovingSce
   return useMemo(() => {
     if (!base || !draft) return atRest
     const { evaluation } = answerOf(draft.sheet)
-    const options = { theme, labels: false, frozen: base }
+    const options = { theme, labels: false, frozen: base, ...view }
     sorted.current ??= maybeSort(base, layout(draft.sheet, evaluation, { ...options, only: none }))
     if (!sorted.current) return atRest
-    const { live, moved, groups } = sorted.current
-    const after = layout(draft.sheet, evaluation, { ...options, only: live })
+    const { live, moved, groups, within } = sorted.current
+    const after = layout(draft.sheet, evaluation, { ...options, only: live, within })
     return {
       moved,
       live: after.items.filter((item) => item.arrow !== undefined && live.has(item.arrow)),
       carried: groups.map(({ key, items }) => ({ key, items, by: carriedBy(base, after, key) })),
       after,
     }
-  }, [base, draft, theme])
+  }, [base, draft, theme, view])
 }
 
 /** What moves is settled by the first frame in which anything does, and holds for the whole drag. */
@@ -71,6 +78,7 @@ function maybeSort(base: Scene, after: Scene): Sorted | undefined {
     live,
     carried,
     groups,
+    within: new Set([...live, ...groups.map(({ key }) => key)]),
     moved: new Set([...live, ...carried.flatMap((keys) => [...keys])]),
   }
 }

@@ -25,7 +25,7 @@ export function usePointers(root: RefObject<HTMLElement | null>, gestures: Gestu
     board.addEventListener(
       'pointerdown',
       (event) => {
-        if ((event.target as Element).closest('.board-verbs')) return
+        if ((event.target as Element).closest('.board-verbs, .over-board')) return
         board.setPointerCapture(event.pointerId)
         gestures.down(inputOf(event))
       },

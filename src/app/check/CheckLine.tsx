@@ -2,6 +2,7 @@ import { drawnScene } from '../board'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
 import {
   checkedSum,
+  hiddenSums,
   nameOfSum,
   quantityOfSum,
   shownEvaluation,
@@ -18,6 +19,7 @@ export function CheckLine() {
   const evaluation = usePage(shownEvaluation)
   const kept = usePage((state) => state.history.sheet)
   const chosen = usePage((state) => state.chosenSum)
+  const pen = usePage((state) => state.pen)
   const sum = checkedSum(sheet, chosen)
   if (!sum) {
     return (
@@ -33,9 +35,10 @@ export function CheckLine() {
   }
   // A drag keeps the scale of the drawing that it began on.
   const scale = drawnScene(kept, 'light').unitsPerCentimetre[quantityOfSum(sheet, sum)]
-  const text = checkText(sheet, evaluation, sum, scale)
+  const isHidden = hiddenSums(kept, pen, sum.id).has(sum.id)
+  const text = checkText(sheet, evaluation, sum, scale, isHidden)
   return (
-    <section className="check" aria-label="Check">
+    <section className="check" aria-label="Check" data-hand={text.figures.length > 3 || undefined}>
       <div>
         <p className="name">{text.drawn}</p>
         <p className="figure">

@@ -9,6 +9,8 @@ import {
 import { type Digits, digitsOf, digitsOfResult, formatScale, readingsByPhasor } from '../../drawing'
 import type { Evaluation, Sheet, Sum, SumEvaluation } from '../../sheet'
 import { labelOf, quantityOfSum } from '../store'
+import { handFigures } from './hand-figures'
+import { signed } from './signed'
 
 /** One figure of the check line. */
 export interface CheckFigure {
@@ -37,13 +39,17 @@ interface Context {
 
 /**
  * The check line of a sum, in words and figures: calculated, measured, and the differences in the
- * unit, per cent, degrees and millimetres of paper. `unitsPerCentimetre` is that of the drawing.
+ * unit, per cent, degrees and millimetres of paper. `unitsPerCentimetre` is that of the drawing. Where
+ * the sum was constructed by hand, that comes first, and every pair of the three is compared.
+ *
+ * @param isHidden What is calculated stays hidden, as while the sum is being constructed.
  */
 export function checkText(
   sheet: Sheet,
   evaluation: Evaluation,
   sum: Sum,
   unitsPerCentimetre: number | undefined,
+  isHidden = false,
 ): CheckText {
   const quantity = quantityOfSum(sheet, sum)
   const count = sum.terms.length
@@ -56,7 +62,11 @@ export function checkText(
     ].join(' · '),
   }
   const found = evaluation.sums.find(({ id }) => id === sum.id)
-  if (!found?.resultant) return { ...head, figures: [unresolved(sheet, evaluation, sum)] }
+  const hand = handFigures(sheet, evaluation, sum)
+  const drawn = hand ? [hand.drawn] : []
+  if (!found?.resultant) {
+    return { ...head, figures: [...drawn, unresolved(sheet, evaluation, sum)] }
+  }
   const context: Context = {
     sheet,
     sum,
@@ -65,15 +75,25 @@ export function checkText(
     ...digitsOfSum(sheet, sum),
     perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
   }
+  const seen = sum.equals === 0 ? [] : [measured(context)]
+  if (isHidden) return { ...head, figures: [...drawn, HIDDEN, ...seen] }
   return {
     ...head,
     figures: [
+      ...drawn,
       calculated(context),
-      ...(sum.equals === 0 ? [] : [measured(context)]),
+      ...seen,
+      ...(hand?.differences ?? []),
       difference(context),
       ...allowance(context),
     ],
   }
+}
+
+const HIDDEN: CheckFigure = {
+  name: 'Calculated',
+  figure: '–',
+  under: 'Hidden until the last arrow is drawn by hand, or until you ask.',
 }
 
 function unresolved(sheet: Sheet, evaluation: Evaluation, sum: Sum): CheckFigure {
@@ -216,14 +236,6 @@ function finer(one: Digits, other: Digits): Digits {
     ...(Number.isFinite(resolution) && { resolution }),
     ...(one.like !== undefined && other.like !== undefined && { like: 1 }),
   }
-}
-
-function signed(text: string): string {
-  return /^[−0]/.test(text) && !/[1-9]/.test(text)
-    ? text.replace('−', '')
-    : text.startsWith('−')
-      ? text
-      : `+${text}`
 }
 
 function millimetres(length: number): string {

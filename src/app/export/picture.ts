@@ -1,4 +1,4 @@
-import type { Scene } from '../../drawing'
+import type { ConstructionLines, Scene } from '../../drawing'
 import type { Sheet } from '../../sheet'
 import { drawnScene, paintItems, sceneOfAnswer } from '../board'
 import { loadFonts } from '../fonts'
@@ -10,15 +10,17 @@ const dotsPerMillimetre = 300 / 25.4
  * The scene that is given out: as read and always in the colours of paper, whatever the screen shows. A
  * verdict that is of an older sheet is left out.
  */
-export function printedScene(sheet: Sheet): Scene {
+export function printedScene(sheet: Sheet, construction: ConstructionLines = {}): Scene {
   const { former, ...known } = answerOf(sheet)
-  return former ? sceneOfAnswer(known, 'light', 'read') : drawnScene(sheet, 'light')
+  return former
+    ? sceneOfAnswer(known, 'light', { construction })
+    : drawnScene(sheet, 'light', { construction })
 }
 
 /** The drawing as a PNG at 300 dots an inch; fails where the browser cannot make one. */
-export async function toPng(sheet: Sheet): Promise<Blob> {
+export async function toPng(sheet: Sheet, construction?: ConstructionLines): Promise<Blob> {
   await loadFonts()
-  const scene = printedScene(sheet)
+  const scene = printedScene(sheet, construction)
   const canvas = document.createElement('canvas')
   canvas.width = Math.round(scene.width * dotsPerMillimetre)
   canvas.height = Math.round(scene.height * dotsPerMillimetre)

@@ -1,6 +1,6 @@
 import { type Sheet, serializeSheet } from '../../sheet'
+import { download } from './download'
 import { fileNameOf } from './file-name'
-import { download } from './save'
 
 /** The sheet as a file of its own, under the name that it is saved by. */
 export function toSheetFile(sheet: Sheet): File {

@@ -1,7 +1,8 @@
-import { svg } from '../../drawing'
+import { type ConstructionLines, svg } from '../../drawing'
 import { serializeSheet } from '../../sheet'
 import type { Store } from '../store'
 import { settledAnswer } from '../worker'
+import { download } from './download'
 import { fileNameOf } from './file-name'
 import { printedScene, toPng } from './picture'
 
@@ -12,7 +13,7 @@ const PATIENCE_OF_EXPORT = 10_000
 export async function saveSvg(store: Store): Promise<void> {
   const isStamped = await settledAnswer(store, PATIENCE_OF_EXPORT)
   const { sheet } = store.getState().history
-  const text = svg(printedScene(sheet), serializeSheet(sheet))
+  const text = svg(printedScene(sheet, linesToSave(store)), serializeSheet(sheet))
   const name = fileNameOf(sheet, 'svg')
   download(new Blob([text], { type: 'image/svg+xml' }), name)
   tell(
@@ -27,7 +28,7 @@ export async function savePng(store: Store): Promise<void> {
   const { sheet } = store.getState().history
   await attempt(store, 'No picture was saved', async () => {
     const name = fileNameOf(sheet, 'png')
-    download(await toPng(sheet), name)
+    download(await toPng(sheet, linesToSave(store)), name)
     tell(
       store,
       `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.${stampNote(isStamped)}`,
@@ -43,20 +44,16 @@ export async function copyPicture(store: Store): Promise<void> {
       throw new Error('this browser keeps pictures off the clipboard.')
     // Some browsers let a page write only at once after the click, so the picture itself is waited for.
     const settled = settledAnswer(store, PATIENCE_OF_EXPORT)
-    const picture = settled.then(() => toPng(sheet))
+    const picture = settled.then(() => toPng(sheet, linesToSave(store)))
     await navigator.clipboard.write([new ClipboardItem({ 'image/png': picture })])
     tell(store, `Picture copied: paste it into the report.${stampNote(await settled)}`)
   })
 }
 
-/** Hands a file to the browser to be saved. */
-export function download(blob: Blob, name: string): void {
-  const address = URL.createObjectURL(blob)
-  const anchor = document.createElement('a')
-  anchor.href = address
-  anchor.download = name
-  anchor.click()
-  setTimeout(() => URL.revokeObjectURL(address), 10_000)
+/** The construction lines, where they were asked for in what is saved. */
+function linesToSave(store: Store): ConstructionLines | undefined {
+  const { pen } = store.getState()
+  return pen.isConstructionSaved ? pen.construction : undefined
 }
 
 function stampNote(isStamped: boolean): string {

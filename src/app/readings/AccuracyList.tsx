@@ -36,10 +36,11 @@ export function AccuracyList({ instrument }: { readonly instrument: Instrument }
     if (!read.ok) return read.problem
     const end = maybeNumber(range, UNITS[of])
     if (!end.ok) return end.problem
-    const problem = change([
-      ...accuracy,
-      { of, ...(end.value === null ? {} : { range: end.value }), text },
-    ])
+    const row = { of, ...(end.value === null ? {} : { range: end.value }), text }
+    if (accuracy.some((other) => other.of === of && other.range === row.range)) {
+      return 'The accuracy of this range is stated already: take that out first.'
+    }
+    const problem = change([...accuracy, row])
     if (problem === undefined) setRange('')
     return problem
   }
@@ -49,7 +50,7 @@ export function AccuracyList({ instrument }: { readonly instrument: Instrument }
       {accuracy.length > 0 && (
         <ul className="accuracy">
           {accuracy.map((row, index) => (
-            <li key={`${row.of} ${row.range} ${row.text}`}>
+            <li key={`${row.of} ${row.range}`}>
               <span>{accuracyWords(row)}</span>
               <button
                 type="button"

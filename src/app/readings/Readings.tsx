@@ -1,6 +1,6 @@
 import { type ClipboardEvent, useMemo, useState } from 'react'
 import { nextReading, type Remark, readingTable, remarksOn, type Sheet } from '../../sheet'
-import { shownEvaluation, shownSheet, usePage, usePageStore } from '../store'
+import { answerOf, usePage, usePageStore } from '../store'
 import { Angles } from './Angles'
 import { AssumedLimits } from './AssumedLimits'
 import { Channels } from './Channels'
@@ -15,8 +15,9 @@ import './readings.css'
 /** What the meters showed: one row for each indication, and with what it was taken. */
 export function Readings() {
   const store = usePageStore()
-  const sheet = usePage(shownSheet)
-  const evaluation = usePage(shownEvaluation)
+  // The committed sheet: a drag changes no reading, and is not to wait for their words in each frame.
+  const sheet = usePage((state) => state.history.sheet)
+  const { evaluation } = answerOf(sheet)
   const [pasted, setPasted] = useState<string>()
   const remarks = useMemo(() => remarksByPart(sheet), [sheet])
   const next = useMemo(() => nextReading(sheet), [sheet])

@@ -1,5 +1,5 @@
 import { type Sheet, serializeLink } from '../../sheet'
-import { toSheetFile } from '../export'
+import { toSheetFile } from '../export/save-sheet'
 
 /** Some mail programs cut longer links. */
 export const warnedLength = 2_000

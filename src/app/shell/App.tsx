@@ -3,6 +3,7 @@ import { AnswerPanel } from '../answer'
 import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
+import { HandPanel } from '../hand'
 import { CopyBanner, KeepNotes } from '../keep'
 import { VersionNote } from '../offline'
 import { Readings } from '../readings'
@@ -29,6 +30,7 @@ export function App() {
         <FirstVisit />
         <Schedule />
         <Sums />
+        <HandPanel />
         <Suspense>
           <Readings />
         </Suspense>

@@ -1,9 +1,11 @@
+import type { ConstructionLines, DrawingMode } from '../../drawing'
 import type { Edit, Evaluation, History, Id, Sheet } from '../../sheet'
 
 /** What is picked on the board and in the schedule. */
 export type Selection =
   | { readonly kind: 'phasor'; readonly id: Id }
   | { readonly kind: 'sum'; readonly id: Id }
+  | { readonly kind: 'hand'; readonly id: Id }
 
 /** One sentence to the user. A problem stays until it is put away; news gives way to the next. */
 export interface Notice {
@@ -44,6 +46,19 @@ export interface Shelved {
   readonly identity: Identity
 }
 
+/** How the board is drawn on. It stands beside the document: no link or file carries it. */
+export interface Pen {
+  /** What a press on the paper draws; undefined: it takes hold of what is there. */
+  readonly mode: DrawingMode | undefined
+  /** While a construction is drawn: a press takes hold of the hand arrows instead of drawing another. */
+  readonly isAdjusting: boolean
+  /** The exact drawing was asked for before the construction is finished. */
+  readonly isExactShown: boolean
+  readonly construction: ConstructionLines
+  /** The construction lines stand in what is saved, too. */
+  readonly isConstructionSaved: boolean
+}
+
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */
 export interface State {
   readonly history: History
@@ -55,6 +70,7 @@ export interface State {
   readonly selection: Selection | undefined
   /** The sum in the check line; the first where none was chosen. */
   readonly chosenSum: Id | undefined
+  readonly pen: Pen
   readonly notice: Notice | undefined
   /** The last whole answer that came. It is of an older sheet while `progress` says so. */
   readonly answer: Answer | undefined

@@ -13,8 +13,8 @@ import {
 } from '../../sheet'
 import { describeAnswer } from './describe'
 import { createIdentity } from './identity'
-import { answerOf, continueAnswer, hasPhasor, hasSum, keepAnswer } from './selectors'
-import type { Identity, Notice, Origin, Progress, Selection, Shelved, State } from './state'
+import { answerOf, continueAnswer, hasHandArrow, hasPhasor, hasSum, keepAnswer } from './selectors'
+import type { Identity, Notice, Origin, Pen, Progress, Selection, Shelved, State } from './state'
 
 /** What can be done to the page's state. Each either does the whole thing or says why it does not. */
 export interface Actions {
@@ -28,6 +28,8 @@ export interface Actions {
   redo(): void
   select(selection: Selection | undefined): void
   chooseSum(id: string): void
+  /** Changes how the board is drawn on. */
+  setPen(change: Partial<Pen>): void
   /**
    * Opens another sheet; the one that was open stays on the shelf. Where the sheet of that identity
    * stands on the shelf just as it is, its history comes back with it.
@@ -104,6 +106,7 @@ export function createStore(
       draft: undefined,
       selection: undefined,
       chosenSum: undefined,
+      pen: restingPen,
       notice: undefined,
       answer: undefined,
       progress: { state: 'resting' },
@@ -130,6 +133,7 @@ export function createStore(
       },
       select: (selection) => set({ selection }),
       chooseSum: (id) => set({ chosenSum: id }),
+      setPen: (change) => set(({ pen }) => ({ pen: { ...pen, ...change } })),
       open: (opened, from, text, known = createIdentity()) => {
         const { history, shelf, origin: before, identity: left } = get()
         const shelved = shelf.find(({ identity: { id } }) => id === known.id)
@@ -196,6 +200,15 @@ export function createStore(
   })
 }
 
+/** The pen as it lies: nothing is drawn. */
+const restingPen: Pen = {
+  mode: undefined,
+  isAdjusting: false,
+  isExactShown: false,
+  construction: {},
+  isConstructionSaved: false,
+}
+
 function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history'] {
   return shelved && serializeSheet(shelved.history.sheet) === serializeSheet(sheet)
     ? shelved.history
@@ -204,9 +217,8 @@ function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history']
 
 function keptSelection(sheet: Sheet, selection: Selection | undefined): Selection | undefined {
   if (!selection) return undefined
-  const kept =
-    selection.kind === 'phasor' ? hasPhasor(sheet, selection.id) : hasSum(sheet, selection.id)
-  return kept ? selection : undefined
+  const has = { phasor: hasPhasor, sum: hasSum, hand: hasHandArrow }[selection.kind]
+  return has(sheet, selection.id) ? selection : undefined
 }
 
 function removalNotice(edit: Edit, said: string): Notice | undefined {

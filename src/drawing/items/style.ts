@@ -48,8 +48,12 @@ export const HEADS: { readonly [shape in HeadShape]: readonly [number, number] }
 /** How much larger the head of a heavy arrow is. */
 const HEAVY_HEAD = 1.45
 
+/** What a hand drew: thin, with a blunt open head that no quantity has, whatever it stands for. */
+const HAND = { shape: 'open', width: 0.35, headLength: 3, headReach: 2.3 } as const
+
 /** The style of an arrow: its head tells the quantity, heavy ink an exact resultant. */
 export function styleOf({ role, quantity }: PlacedArrow, palette: Palette): ArrowStyle {
+  if (role === 'hand') return { ...HAND, colour: palette.gap }
   const shape = HEAD_SHAPES[quantity]
   const [length, reach] = HEADS[shape]
   return role === 'resultant'

@@ -1,6 +1,7 @@
 import type { Sum } from '../../sheet'
 import { partsOf } from '../placement/vectors'
 import type { PlacedArrow, TextRun } from '../scene'
+import { formatDrawn, nameOfDrawn } from '../text/hand-text'
 import { isolate } from '../text/label-runs'
 import { digitsOfResult, formatMagnitude, formatPhasor } from '../text/phasor-text'
 import { coarser, type Digits, digitsOf } from '../text/resolution'
@@ -15,7 +16,18 @@ export interface LabelTexts {
 
 /** What an arrow is labelled: its symbol and its value, and for the two ends of a sum which it is. */
 export function arrowTexts(arrow: PlacedArrow, register: Register): LabelTexts {
+  if (arrow.role === 'hand') return handTexts(arrow, register)
   return arrow.role === 'resultant' ? resultantTexts(arrow, register) : phasorTexts(arrow, register)
+}
+
+function handTexts({ hand = '', quantity, sign }: PlacedArrow, register: Register): LabelTexts {
+  const drawn = register.hand.get(hand)
+  if (!drawn) return { full: [], short: [] }
+  const { phasors, sums, unitsPerCentimetre } = register
+  const label = nameOfDrawn(drawn.arrow, phasors, sums)
+  const before = sign === 1 ? '' : '−'
+  const value = formatDrawn(drawn.found, quantity, unitsPerCentimetre[quantity])
+  return { full: named(label, { before, after: value }), short: named(label, { before }) }
 }
 
 function phasorTexts(

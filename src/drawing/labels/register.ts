@@ -1,10 +1,13 @@
 import {
   type Evaluation,
+  type HandArrow,
+  type HandEvaluation,
   type Id,
   type Phasor,
   referenceOf,
   type Sheet,
   type Sum,
+  type UnitsPerCentimetre,
 } from '../../sheet'
 import { createVectors, type Vectors } from '../placement/vectors'
 import { type ReadingsByPhasor, readingsByPhasor } from '../text/resolution'
@@ -16,6 +19,14 @@ export interface Register {
   readonly vectors: Vectors
   readonly readings: ReadingsByPhasor
   readonly reference: Id | undefined
+  readonly hand: ReadonlyMap<Id, DrawnArrow>
+  readonly unitsPerCentimetre: UnitsPerCentimetre
+}
+
+/** A hand arrow, and what it reads. */
+export interface DrawnArrow {
+  readonly arrow: HandArrow
+  readonly found: HandEvaluation | undefined
 }
 
 /** The register of a sheet. */
@@ -26,5 +37,12 @@ export function createRegister(sheet: Sheet, evaluation: Evaluation): Register {
     vectors: createVectors(evaluation),
     readings: readingsByPhasor(sheet),
     reference: referenceOf(sheet),
+    hand: new Map(
+      (sheet.hand ?? []).map((arrow, index) => [
+        arrow.id,
+        { arrow, found: evaluation.hand[index] },
+      ]),
+    ),
+    unitsPerCentimetre: sheet.drawing?.unitsPerCentimetre ?? {},
   }
 }

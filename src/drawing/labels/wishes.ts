@@ -28,10 +28,17 @@ export function wishesOf(
   const others = picture.painted
     .filter(({ role }) => role === 'term' || role === 'loose')
     .sort((one, other) => lengthOf(one) - lengthOf(other))
+  // Beside the exact drawing, what a hand drew needs no names: it lies along what it stands for.
+  const drawn = picture.painted.filter(
+    ({ role, sum }) => role === 'hand' && isAlone(sums.get(sum ?? '')),
+  )
   return [
     ...picture.arcs.map((arc) => angleWish(arc, palette)),
     ...picture.gaps.map((gap) => gapWish(gap, sums, register, palette)),
-    ...[...ends, ...others].map((arrow) =>
+    ...picture.misses
+      .filter(({ isClosing }) => isClosing)
+      .map((miss) => pointWish(miss, [words(formatPaperLength(miss.millimetres))], palette)),
+    ...[...drawn, ...ends, ...others].map((arrow) =>
       arrowWish(arrow, sums.get(arrow.sum ?? ''), register, palette),
     ),
   ].flatMap((wish) => clipped(wish, frame))
@@ -55,12 +62,17 @@ function arrowWish(
     from: arrow.from,
     to: arrow.to,
     ...arrowTexts(arrow, register),
-    fill: palette.ink,
+    fill: arrow.role === 'hand' ? palette.gap : palette.ink,
     along: isInChain ? 0.5 : 0.65,
-    isBestAtTip: !isInChain && arrow.role !== 'resultant',
+    isBestAtTip: !isInChain && arrow.role !== 'resultant' && arrow.role !== 'hand',
     side: sideOf(arrow, figure),
     reach: styleOf(arrow, palette).width / 2,
   }
+}
+
+/** Whether nothing exact of a sum is drawn. */
+function isAlone(figure: SumFigure | undefined): boolean {
+  return !figure || (figure.terms.length === 0 && !figure.resultant && !figure.measured)
 }
 
 function isChain({ terms }: SumFigure): boolean {
@@ -129,12 +141,21 @@ function gapWish(
   const length = formatPaperLength(millimetres)
   const value =
     size === undefined ? length : formatMagnitude(size, quantity, digitsOfResult(size, digits, 1))
+  const full = [words(size === undefined ? `gap ${length}` : `gap ${value}, ${length}`)]
+  return { ...pointWish({ key, from, to }, full, palette), short: [words(`gap ${value}`)] }
+}
+
+function pointWish(
+  { key, from, to }: Pick<Gap, 'key' | 'from' | 'to'>,
+  text: readonly TextRun[],
+  palette: Palette,
+): Wish {
   return {
     arrow: key,
     from,
     to,
-    full: [words(size === undefined ? `gap ${length}` : `gap ${value}, ${length}`)],
-    short: [words(`gap ${value}`)],
+    full: text,
+    short: text,
     fill: palette.gap,
     along: 0.5,
     isBestAtTip: false,

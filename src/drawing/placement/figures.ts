@@ -2,9 +2,18 @@ import type { Evaluation, Id, Phasor, Quantity, Sheet, Sum } from '../../sheet'
 import { addMember, type Figure, type Workshop } from './figure'
 import { hangLoose } from './loose'
 import { createVectors, measuredOf, resultantOf, vectorOf } from './vectors'
+import { partsWithin } from './within'
 
-/** The figures of a sheet: its sums in order, then what is loose. What is open is left out. */
-export function figuresOf(sheet: Sheet, evaluation: Evaluation): Figure[] {
+/**
+ * The figures of a sheet: its sums in order, then what is loose. What is open is left out.
+ *
+ * @param within Only the figures of arrows with these keys.
+ */
+export function figuresOf(
+  sheet: Sheet,
+  evaluation: Evaluation,
+  within?: ReadonlySet<string>,
+): Figure[] {
   const phasors = new Map<Id, Phasor>()
   for (const phasor of sheet.phasors) phasors.set(phasor.id, phasor)
   const vectors = createVectors(evaluation)
@@ -15,8 +24,9 @@ export function figuresOf(sheet: Sheet, evaluation: Evaluation): Figure[] {
     homes: new Map(),
     summed: new Set(),
   }
-  for (const sum of sheet.sums ?? []) addSum(workshop, sum)
-  hangLoose(workshop, sheet.phasors)
+  const parts = within && partsWithin(sheet, phasors, within)
+  for (const sum of sheet.sums ?? []) if (!parts || parts.sums.has(sum.id)) addSum(workshop, sum)
+  hangLoose(workshop, parts ? parts.loose : sheet.phasors)
   return workshop.figures
 }
 

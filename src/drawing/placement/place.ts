@@ -27,15 +27,26 @@ export interface Placement {
  * and its length is its magnitude by the scale of its quantity.
  *
  * @param area Where there is room to draw, in millimetres.
+ * @param within Places only the figures of arrows with these keys. They stand where they did only where
+ *   `frozen` holds their starts.
  */
-export function place(sheet: Sheet, evaluation: Evaluation, area: Box, frozen?: Frozen): Placement {
-  const figures = figuresOf(sheet, evaluation)
+export function place(
+  sheet: Sheet,
+  evaluation: Evaluation,
+  area: Box,
+  frozen?: Frozen,
+  within?: ReadonlySet<string>,
+): Placement {
+  const figures = figuresOf(sheet, evaluation, within)
   const { origin, starts, scales } = settle(figures, sheet.drawing ?? {}, area, frozen)
   const arrows: PlacedArrow[] = []
   for (const figure of figures) {
     placeFigure(figure, figure.start ?? starts.get(figure.key) ?? origin, scales, arrows)
   }
-  return { arrows, origin, unitsPerCentimetre: Object.fromEntries(scales), starts }
+  const unitsPerCentimetre = within
+    ? { ...frozen?.unitsPerCentimetre, ...Object.fromEntries(scales) }
+    : Object.fromEntries(scales)
+  return { arrows, origin, unitsPerCentimetre, starts }
 }
 
 function settle(

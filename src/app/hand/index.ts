@@ -1,0 +1,5 @@
+import './hand.css'
+
+export { HandPanel } from './HandPanel'
+export { HandVerbs } from './HandVerbs'
+export { StrokeForm } from './StrokeForm'
