@@ -35,6 +35,8 @@ interface Context {
   readonly angle: Digits
   /** Units for each millimetre of paper; undefined where nothing of the quantity is drawn. */
   readonly perMillimetre: number | undefined
+  /** Everything was solved: a sum without a gap is one that nothing checks. */
+  readonly isJudged: boolean
 }
 
 /**
@@ -74,6 +76,7 @@ export function checkText(
     unit: unitOf(quantity),
     ...digitsOfSum(sheet, sum),
     perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
+    isJudged: evaluation.agreement !== undefined,
   }
   const seen = sum.equals === 0 ? [] : [measured(context)]
   if (isHidden) return { ...head, figures: [...drawn, HIDDEN, ...seen] }
@@ -155,7 +158,7 @@ function measured({ sheet, sum, found, unit, magnitude, angle }: Context): Check
 }
 
 function difference(context: Context): CheckFigure {
-  const { sum, found, unit, magnitude, angle, perMillimetre } = context
+  const { sum, found, unit, magnitude, angle, perMillimetre, isJudged } = context
   const { resultant, measured: seen, closingError } = found
   if (closingError) {
     const like = Math.max(resultant?.magnitude ?? 0, seen?.magnitude ?? 0) || closingError.magnitude
@@ -189,6 +192,7 @@ function difference(context: Context): CheckFigure {
     }
   }
   const name = 'Measured less calculated'
+  if (isJudged) return { name, figure: '–', under: 'Nothing checks this sum.' }
   if (resultant && seen?.magnitude !== undefined) {
     const by = seen.magnitude - resultant.magnitude
     const percent =

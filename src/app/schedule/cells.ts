@@ -188,16 +188,10 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
   const values = [
     ...(magnitude === undefined || magnitudeLimit === undefined
       ? []
-      : [
-          withLimit(
-            formatQuantity(magnitude, unit, { limit: magnitudeLimit }),
-            magnitudeLimit,
-            unit,
-          ),
-        ]),
+      : [withLimit(magnitude, magnitudeLimit, unit, ROUNDING * magnitude)]),
     ...(angle === undefined || angleLimit === undefined
       ? []
-      : [withLimit(formatAngle(angle, { limit: angleLimit }), angleLimit, '°')]),
+      : [withLimit(angle, angleLimit, '°', ROUNDING * 180)]),
   ]
   const state =
     magnitudeState === angleState
@@ -206,6 +200,11 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
   return { values, state }
 }
 
-function withLimit(value: string, limit: number, unit: string): string {
-  return limit === 0 ? value : `${value} ${formatLimit(limit, unit)}`
+/** A limit below this share of a size is rounding: the value is exact. */
+const ROUNDING = 1e-9
+
+function withLimit(value: number, found: number, unit: string, rounding: number): string {
+  const limit = found <= rounding ? 0 : found
+  const text = unit === '°' ? formatAngle(value, { limit }) : formatQuantity(value, unit, { limit })
+  return limit === 0 ? text : `${text} ${formatLimit(limit, unit)}`
 }
