@@ -46,6 +46,8 @@ const shown: readonly (readonly [string, string])[] = [
 ]
 
 test('a twelve-reading feeder job is typed by keyboard alone', async ({ page }) => {
+  // Hundreds of keys, one after the other: a busy machine is no reason to fail.
+  test.setTimeout(900_000)
   await openPage(page, feeder)
   const { keyboard } = page
   await expect(page.getByRole('heading', { name: 'Readings' })).toBeVisible()

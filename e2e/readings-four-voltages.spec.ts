@@ -16,6 +16,8 @@ import { expect, test } from './support/test'
 const voltages = ['Vcable', 'Vchoke', 'Vheater', 'VS'] as const
 
 test('a four-voltage job is taken down as shown, by keyboard alone', async ({ page }) => {
+  // Hundreds of keys, one after the other: a busy machine is no reason to fail.
+  test.setTimeout(900_000)
   await openPage(page)
   const { keyboard } = page
 

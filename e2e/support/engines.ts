@@ -2,15 +2,8 @@ import { existsSync } from 'node:fs'
 import { chromium, firefox } from '@playwright/test'
 import { browserFlags } from '../../src/command/browser.mjs'
 import { maybeFirefox, maybeWebKit } from '../../src/command/engines.mjs'
+import type { Visitor } from './visitor'
 import { openWebKit } from './webkit'
-
-/** A browser with one window, driven alike whatever its engine. */
-export interface Visitor {
-  open(address: string): Promise<void>
-  /** Runs an expression in the page, and promises what it gives. */
-  run<Value>(expression: string): Promise<Value>
-  end(): Promise<void>
-}
 
 /** An engine by its name: how to start it, or undefined where this machine has none. */
 export interface Engine {

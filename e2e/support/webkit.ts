@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process'
 import { once } from 'node:events'
 import { createServer } from 'node:net'
-import type { Visitor } from './engines'
+import type { Visitor } from './visitor'
 
 /** What drives a WebKit: its driver, the browser that the driver starts, and a screen for it. */
 interface WebKit {

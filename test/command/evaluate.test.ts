@@ -4,7 +4,8 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { evaluate, exampleSheet, serializeSheet } from '../../src/sheet'
+import { exampleSheet, serializeSheet } from '../../src/sheet'
+import { evaluate } from '../../src/sheet/estimate'
 
 const project = fileURLToPath(new URL('../..', import.meta.url))
 /** Starting a program takes as long as the machine is busy. */

@@ -9,8 +9,8 @@ import {
   seatsOf,
 } from '../../sheet'
 import { labelOf, quantityOfSum } from '../store'
+import type { CheckFigure } from './figure'
 import { signed } from './signed'
-import type { CheckFigure } from './text'
 
 /** What the check line says of a construction by hand. */
 export interface HandFigures {

@@ -9,15 +9,9 @@ import {
 import { type Digits, digitsOf, digitsOfResult, formatScale, readingsByPhasor } from '../../drawing'
 import type { Evaluation, Sheet, Sum, SumEvaluation } from '../../sheet'
 import { labelOf, quantityOfSum } from '../store'
+import type { CheckFigure } from './figure'
 import { handFigures } from './hand-figures'
 import { signed } from './signed'
-
-/** One figure of the check line. */
-export interface CheckFigure {
-  readonly name: string
-  readonly figure: string
-  readonly under: string
-}
 
 /** What the check line says of a sum. */
 export interface CheckText {

@@ -33,6 +33,8 @@ export interface TipCovariance {
 /** Parts below this share of the whole do not count. */
 const NEGLIGIBLE = 1e-9
 const COVERAGE = 0.95
+const HALF_TURN = 180
+const ROUNDING = 1e-14
 
 /** One drawing that the observations allow: its best values and their uncertainties. */
 export class Drawing {
@@ -82,6 +84,12 @@ export class Drawing {
     if (this.#draws) return this.#foundByDraws(observable, best, this.#draws)
     const parts = this.partsOf(this.sharesOf(gradient))
     const uncertainty = combinedUncertainty(parts)
+    const size = observable.kind === 'angle' ? HALF_TURN : Math.abs(value)
+    // What the conditions alone fix is exact: what is left is the solver's rounding.
+    if (uncertainty <= ROUNDING * size) {
+      const isNothing = observable.kind === 'angle' && Math.abs(best) <= ROUNDING * size
+      return { value: isNothing ? 0 : best, uncertainty: 0, expanded: 0 }
+    }
     return { value: best, uncertainty, expanded: uncertainty * coverageFactor(parts) }
   }
 

@@ -1,7 +1,7 @@
 import { parseAccuracy } from '../../core'
 import { UNIT_OF_FUNCTION } from '../readings/accuracy-row'
 import type { Instrument, Sheet } from '../types'
-import type { Remark } from './index'
+import type { Remark } from './remark'
 
 /** Instruments in use whose calibration had lapsed, or whose accuracy cannot be read. */
 export function calibrationRemarks(sheet: Sheet): readonly Remark[] {

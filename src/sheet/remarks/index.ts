@@ -1,16 +1,11 @@
-import type { Id, Sheet } from '../types'
+import type { Sheet } from '../types'
 import { calibrationRemarks } from './calibration'
 import { loadingRemarks } from './loading'
 import { nonsenseRemarks } from './nonsense'
 import { rangeRemarks } from './range'
+import type { Remark } from './remark'
 
-/** Something about a reading or an instrument that a careful eye would stop at. */
-export interface Remark {
-  /** The id of what it is about. */
-  readonly about: Id
-  /** One or two whole sentences. */
-  readonly text: string
-}
+export type { Remark } from './remark'
 
 /**
  * What is odd about the readings of a sheet, in the order of the sheet: figures that cannot be, meters

@@ -12,7 +12,7 @@ import { labelOf } from '../edits/labels'
 import { limitOf } from '../readings/limit'
 import { indexOf } from '../sheet-index'
 import type { CircuitElement, CircuitNode, Id, Reading, Sheet } from '../types'
-import type { Remark } from './index'
+import type { Remark } from './remark'
 
 /** The share of a reading's limit from which a load is worth a word. */
 const NOTABLE = 0.1

@@ -6,7 +6,7 @@ import { indicationOf } from '../readings/indication'
 import { limitOf } from '../readings/limit'
 import { isMagnitudeOf } from '../readings/magnitude'
 import type { PhasorId, PowerReading, Reading, Sheet } from '../types'
-import type { Remark } from './index'
+import type { Remark } from './remark'
 
 /** Figures that cannot be, in words. */
 export function nonsenseRemarks(sheet: Sheet, reading: Reading): readonly Remark[] {

@@ -6,7 +6,7 @@ import { limitOf } from '../readings/limit'
 import type { Indication } from '../readings/observed'
 import { indexOf } from '../sheet-index'
 import type { Reading, Sheet } from '../types'
-import type { Remark } from './index'
+import type { Remark } from './remark'
 
 /** A reading beyond its range or the category of its meter, or without what its accuracy asks for. */
 export function rangeRemarks(sheet: Sheet, reading: Reading): readonly Remark[] {
