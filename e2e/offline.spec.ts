@@ -1,4 +1,5 @@
-import { engines, type Visitor } from './support/engines'
+import { engines } from './support/engines'
+import type { Visitor } from './support/visitor'
 import { serve } from './support/own-server'
 import { expect, test } from './support/test'
 

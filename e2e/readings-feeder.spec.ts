@@ -1,4 +1,6 @@
 import { type Reading, type Sheet, wordsOf } from '../src/sheet'
+import { expectTermsOnBoard, savedByKeyboard } from './support/agreement'
+import { expectCheckedAs } from './support/check-line'
 import { press, tabTo } from './support/keyboard'
 import { openPage, settledSheet } from './support/page'
 import { nextReading, pickForNext, typeReading, wordsOfReading } from './support/readings'
@@ -82,6 +84,12 @@ test('a twelve-reading feeder job is typed by keyboard alone', async ({ page }) 
       await expect(wordsOfReading(page, index + 1)).toHaveText(wordsOf(sheet, reading))
     }
     await expect(wordsOfReading(page, 6)).toHaveText('IA lags V1 by 24.9° ± 1° assumed')
+  })
+
+  await test.step('sees the same in the schedule, on the board, in the link and in the file', async () => {
+    await expectCheckedAs(page, sheet)
+    await expectTermsOnBoard(page, sheet)
+    expect(await savedByKeyboard(page)).toEqual(sheet)
   })
 
   await test.step('reads where the calibration had lapsed', async () => {

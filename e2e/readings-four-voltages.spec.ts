@@ -1,7 +1,7 @@
-import { readFile } from 'node:fs/promises'
 import type { Page } from '@playwright/test'
-import { parseSheetText, type Sheet } from '../src/sheet'
-import { arrowOf, isInked, sceneOf, sheetOnScreen } from './support/board'
+import type { Sheet } from '../src/sheet'
+import { expectTermsOnBoard, savedByKeyboard } from './support/agreement'
+import { arrowOf, sceneOf } from './support/board'
 import { expectCheckedAs } from './support/check-line'
 import { press, tabTo } from './support/keyboard'
 import { openPage, settledSheet } from './support/page'
@@ -84,7 +84,8 @@ test('a four-voltage job is taken down as shown, by keyboard alone', async ({ pa
     await expect(cell(page, 'Angle', 'Vchoke')).toHaveValue(/^81/)
     await expect(cell(page, 'Angle', 'VS')).toHaveValue(/^43\.6/)
     await expectCheckedAs(page, sheet)
-    await expectOnBoard(page, sheet)
+    await expectTermsOnBoard(page, sheet)
+    expectTrueToScale(sheet)
     expect(await savedByKeyboard(page)).toEqual(sheet)
   })
 
@@ -134,27 +135,11 @@ async function openPart(page: Page, name: string): Promise<void> {
   await page.keyboard.press('Enter')
 }
 
-/** Every arrow that Node lays out for the sheet is painted where it says, and is as long as was read. */
-async function expectOnBoard(page: Page, sheet: Sheet): Promise<void> {
-  const screen = await sheetOnScreen(page, sheet)
-  const sum = sheet.sums?.[0]?.id
-  for (const at of [0, 1, 2]) {
-    expect(await isInked(page, screen.middle(`term:${sum}:${at}`)), `term ${at}`).toBe(true)
-  }
+/** What was measured is drawn as long, and at the angle, as it was read. */
+function expectTrueToScale(sheet: Sheet): void {
   const scene = sceneOf(sheet)
-  const { from, to } = arrowOf(scene, `measured:${sum}`)
+  const { from, to } = arrowOf(scene, `measured:${sheet.sums?.[0]?.id}`)
   const millimetres = Math.hypot(to.x - from.x, to.y - from.y)
   expect((millimetres / 10) * (scene.unitsPerCentimetre.voltage ?? 0)).toBeCloseTo(46.4, 9)
   expect((Math.atan2(to.y - from.y, to.x - from.x) * 180) / Math.PI).toBeCloseTo(43.65, 9)
-}
-
-/** The sheet in the file that the page saves. */
-async function savedByKeyboard(page: Page): Promise<Sheet> {
-  await press(page, 'Share', 'Shift+Tab')
-  const coming = page.waitForEvent('download')
-  await press(page, 'Save to a file')
-  const text = await readFile(await (await coming).path(), 'utf8')
-  const parsed = parseSheetText(text)
-  if (!parsed.ok) throw new Error('the file holds no sheet')
-  return parsed.sheet
 }

@@ -2,12 +2,6 @@ import papa from 'papaparse'
 import type { Evaluation } from '../sheet'
 import type { Evaluated } from './evaluate-file'
 
-/** What is said of the readings as a whole; each is left out where nothing says it. */
-interface Judgement {
-  readonly agreement?: { readonly verdict: string }
-  readonly suspects?: readonly { readonly reading: string }[]
-}
-
 /** How large a gap is, and how large it may be; in the unit of its sum. */
 interface Gap {
   readonly magnitude: number
@@ -30,7 +24,7 @@ export function formatTableHead(): string {
 export function formatTableRow({ title, answer }: Evaluated): string {
   const name = title || [answer.file, answer.line].filter((part) => part !== undefined).join(':')
   if ('errors' in answer) return toCsv([name, 'invalid', '', '', ''])
-  const { agreement, suspects }: Evaluation & Judgement = answer
+  const { agreement, suspects } = answer
   const gap = largestGap(answer)
   return toCsv([
     name,

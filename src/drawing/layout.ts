@@ -41,6 +41,8 @@ export interface LayoutOptions {
   readonly within?: ReadonlySet<string>
   /** Sums whose exact drawing is hidden, as while they are constructed by hand. */
   readonly hidden?: ReadonlySet<Id>
+  /** The terminals of each phasor stand in its subscript (IEC 60375), where it has any. */
+  readonly terminals?: boolean
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
 }
@@ -51,6 +53,7 @@ export interface LayoutOptions {
  */
 export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOptions = {}): Scene {
   const { theme = 'light', labels = true, frozen, only, within, hidden, construction } = options
+  const { terminals = false } = options
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
@@ -85,7 +88,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
       ? createLabels(
           items,
           picture,
-          createRegister(sheet, evaluation),
+          createRegister(sheet, evaluation, terminals),
           frame,
           [...fences, ...stamp.boxes],
           palette,

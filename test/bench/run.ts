@@ -1,9 +1,16 @@
 import type { Measure } from './measure'
-import { dragFirstOf100, dragLooseAmong1000, redraw1000 } from './measures/board'
+import {
+  dragFirstOf100,
+  dragLooseAmong1000,
+  drawAmong100,
+  drawAmong2000,
+  redraw1000,
+} from './measures/board'
 import { falseAlarms, lostLoops, unnoticed, valuesOutside } from './measures/calibration'
 import { estimateForty, estimateSix, growthOfEstimate } from './measures/estimator'
 import { bytesOfFirstLoad, firstShaftsOnScreen } from './measures/first-load'
 import { charactersOfLink, linkAgainstDeflate } from './measures/link'
+import { picking2000 } from './measures/picking'
 import { resultantAgainstLoop, resultantAgainstMathjs } from './measures/resultant'
 import { svgAgainstJoining } from './measures/svg'
 
@@ -20,6 +27,9 @@ const measures: readonly Measure[] = [
   dragFirstOf100,
   dragLooseAmong1000,
   redraw1000,
+  drawAmong100,
+  drawAmong2000,
+  picking2000,
   estimateSix,
   estimateForty,
   lostLoops,

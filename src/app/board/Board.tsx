@@ -53,8 +53,13 @@ export function Board() {
   const chosenSum = usePage((state) => state.chosenSum)
   const hidden = hiddenSums(sheet, pen, chosenSum)
   const viewOptions = useMemo(
-    () => ({ hidden, construction: pen.construction, values }),
-    [hidden, pen.construction, values],
+    () => ({
+      hidden,
+      construction: pen.construction,
+      terminals: pen.areTerminalsShown,
+      values,
+    }),
+    [hidden, pen.construction, pen.areTerminalsShown, values],
   )
   const scene = useMemo(
     () => base ?? sceneOfAnswer(answer, theme, viewOptions),

@@ -1,4 +1,4 @@
-import type { KeyboardEvent } from 'react'
+import { type KeyboardEvent, useMemo } from 'react'
 import { isOffPaper, type Scene } from '../../drawing'
 import { usePage, usePageStore } from '../store'
 
@@ -15,6 +15,7 @@ export function BoardVerbs(properties: {
   const isAdjusted = usePage(({ values }) => values === 'adjusted')
   const { drawing: pinned, hand } = store.getState().history.sheet
   const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
+  const isOff = useMemo(() => isOffPaper(scene), [scene])
   const refit = () =>
     store
       .getState()
@@ -36,7 +37,7 @@ export function BoardVerbs(properties: {
       )}
       {isAdjusted && <p className="board-remark">Drawn as adjusted</p>}
       {scene.isStampLeftOut && <p className="board-remark">Stamp left out: no free place</p>}
-      {isOffPaper(scene) && <p className="board-remark">The drawing reaches beyond its frame</p>}
+      {isOff && <p className="board-remark">The drawing reaches beyond its frame</p>}
       {/* What a hand drew is true to the scale that it was drawn at. */}
       {isPinned && hand === undefined && (
         <button type="button" className="verb" onClick={refit}>

@@ -27,6 +27,8 @@ export interface ViewOptions {
   readonly construction?: ConstructionLines
   /** As read where nothing is said. */
   readonly values?: State['values']
+  /** The terminals of each phasor stand in its subscript. */
+  readonly terminals?: boolean
 }
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
@@ -42,8 +44,9 @@ export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}
 /** The whole scene of an answer; laid out once for each view. */
 export function sceneOfAnswer(answer: Answer, theme: Theme, options: ViewOptions): Scene {
   const { values = 'read', ...view } = options
-  const { hidden = [], construction: { parallels = false, arcs = false } = {} } = view
-  const name = [theme, values, parallels, arcs, ...hidden].join(' ')
+  const { hidden = [], terminals = false, construction = {} } = view
+  const { parallels = false, arcs = false } = construction
+  const name = [theme, values, terminals, parallels, arcs, ...hidden].join(' ')
   const own = scenes.get(answer) ?? new Map<string, Scene>()
   scenes.set(answer, own)
   const known = own.get(name)

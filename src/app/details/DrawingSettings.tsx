@@ -11,6 +11,7 @@ export function DrawingSettings() {
   const drawing = sheet.drawing ?? {}
   const quantities = [...new Set(sheet.phasors.map(({ quantity }) => quantity))]
   const reference = referenceOf(sheet)
+  const areTerminalsShown = usePage((state) => state.pen.areTerminalsShown)
 
   const commitScale = (quantity: Quantity, text: string): string | undefined => {
     const { [quantity]: _, ...others } = drawing.unitsPerCentimetre ?? {}
@@ -87,6 +88,18 @@ export function DrawingSettings() {
                 {label || id}
               </option>
             ))}
+          </select>
+        </label>
+        <label className="field">
+          Terminals
+          <select
+            value={areTerminalsShown ? 'shown' : 'left out'}
+            onChange={({ target }) =>
+              store.getState().setPen({ areTerminalsShown: target.value === 'shown' })
+            }
+          >
+            <option>left out</option>
+            <option value="shown">shown as subscripts, from–to</option>
           </select>
         </label>
         {quantities.map((quantity) => (

@@ -1,6 +1,6 @@
-import type { ConstructionLines, Scene } from '../../drawing'
+import type { Scene } from '../../drawing'
 import type { Sheet } from '../../sheet'
-import { drawnScene, paintItems, sceneOfAnswer } from '../board'
+import { drawnScene, paintItems, sceneOfAnswer, type ViewOptions } from '../board'
 import { loadFonts } from '../fonts'
 import { answerOf } from '../store'
 
@@ -10,17 +10,15 @@ const dotsPerMillimetre = 300 / 25.4
  * The scene that is given out: as read and always in the colours of paper, whatever the screen shows. A
  * verdict that is of an older sheet is left out.
  */
-export function printedScene(sheet: Sheet, construction: ConstructionLines = {}): Scene {
+export function printedScene(sheet: Sheet, view: ViewOptions = {}): Scene {
   const { former, ...known } = answerOf(sheet)
-  return former
-    ? sceneOfAnswer(known, 'light', { construction })
-    : drawnScene(sheet, 'light', { construction })
+  return former ? sceneOfAnswer(known, 'light', view) : drawnScene(sheet, 'light', view)
 }
 
 /** The drawing as a PNG at 300 dots an inch; fails where the browser cannot make one. */
-export async function toPng(sheet: Sheet, construction?: ConstructionLines): Promise<Blob> {
+export async function toPng(sheet: Sheet, view?: ViewOptions): Promise<Blob> {
   await loadFonts()
-  const scene = printedScene(sheet, construction)
+  const scene = printedScene(sheet, view)
   const canvas = document.createElement('canvas')
   canvas.width = Math.round(scene.width * dotsPerMillimetre)
   canvas.height = Math.round(scene.height * dotsPerMillimetre)

@@ -1,5 +1,6 @@
-import { type ConstructionLines, svg } from '../../drawing'
+import { svg } from '../../drawing'
 import { serializeSheet } from '../../sheet'
+import type { ViewOptions } from '../board'
 import type { Store } from '../store'
 import { settledAnswer } from '../worker'
 import { download } from './download'
@@ -13,7 +14,7 @@ const PATIENCE_OF_EXPORT = 10_000
 export async function saveSvg(store: Store): Promise<void> {
   const isStamped = await settledAnswer(store, PATIENCE_OF_EXPORT)
   const { sheet } = store.getState().history
-  const text = svg(printedScene(sheet, linesToSave(store)), serializeSheet(sheet))
+  const text = svg(printedScene(sheet, viewToSave(store)), serializeSheet(sheet))
   const name = fileNameOf(sheet, 'svg')
   download(new Blob([text], { type: 'image/svg+xml' }), name)
   tell(
@@ -28,7 +29,7 @@ export async function savePng(store: Store): Promise<void> {
   const { sheet } = store.getState().history
   await attempt(store, 'No picture was saved', async () => {
     const name = fileNameOf(sheet, 'png')
-    download(await toPng(sheet, linesToSave(store)), name)
+    download(await toPng(sheet, viewToSave(store)), name)
     tell(
       store,
       `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.${stampNote(isStamped)}`,
@@ -44,16 +45,19 @@ export async function copyPicture(store: Store): Promise<void> {
       throw new Error('this browser keeps pictures off the clipboard.')
     // Some browsers let a page write only at once after the click, so the picture itself is waited for.
     const settled = settledAnswer(store, PATIENCE_OF_EXPORT)
-    const picture = settled.then(() => toPng(sheet, linesToSave(store)))
+    const picture = settled.then(() => toPng(sheet, viewToSave(store)))
     await navigator.clipboard.write([new ClipboardItem({ 'image/png': picture })])
     tell(store, `Picture copied: paste it into the report.${stampNote(await settled)}`)
   })
 }
 
-/** The construction lines, where they were asked for in what is saved. */
-function linesToSave(store: Store): ConstructionLines | undefined {
-  const { pen } = store.getState()
-  return pen.isConstructionSaved ? pen.construction : undefined
+/** What of the view stands in what is saved: the terminals, and the construction lines on request. */
+function viewToSave(store: Store): ViewOptions {
+  const { areTerminalsShown, isConstructionSaved, construction } = store.getState().pen
+  return {
+    terminals: areTerminalsShown,
+    ...(isConstructionSaved && { construction }),
+  }
 }
 
 function stampNote(isStamped: boolean): string {

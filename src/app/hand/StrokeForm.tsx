@@ -94,6 +94,7 @@ function HandFields(properties: {
       <label className="field">
         {`${stroke.millimetres.toFixed(1)} mm at ${stroke.degrees.toFixed(1)}° stands for`}
         <select
+          aria-label="It stands for"
           value={String(position)}
           onChange={({ target: { value } }) =>
             setPosition(value === 'closing' ? value : Number(value))
@@ -162,7 +163,11 @@ function PhasorFields(properties: {
       {sums.length > 0 && (
         <label className="field">
           Stands
-          <select value={isTerm ? sum : ''} onChange={({ target }) => setSum(target.value)}>
+          <select
+            aria-label="Stands"
+            value={isTerm ? sum : ''}
+            onChange={({ target }) => setSum(target.value)}
+          >
             <option value="">by itself</option>
             {sums.map((each) => (
               <option key={each.id} value={each.id}>

@@ -57,6 +57,8 @@ export interface Pen {
   readonly construction: ConstructionLines
   /** The construction lines stand in what is saved, too. */
   readonly isConstructionSaved: boolean
+  /** The terminals of each phasor stand in its subscript: its positive direction, from first to last. */
+  readonly areTerminalsShown: boolean
 }
 
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */

@@ -207,6 +207,7 @@ const restingPen: Pen = {
   isExactShown: false,
   construction: {},
   isConstructionSaved: false,
+  areTerminalsShown: false,
 }
 
 function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history'] {

@@ -1,4 +1,4 @@
-import type { Sum } from '../../sheet'
+import type { Phasor, Sum } from '../../sheet'
 import { partsOf } from '../placement/vectors'
 import type { PlacedArrow, TextRun } from '../scene'
 import { formatDrawn, nameOfDrawn } from '../text/hand-text'
@@ -44,12 +44,18 @@ function phasorTexts(
       ? `${formatMagnitude(magnitude, quantity, digits.magnitude)}, reference`
       : formatPhasor({ magnitude, angle }, quantity, digits)
   const before = sign === 1 ? '' : '−'
+  const terminals = register.hasTerminals ? terminalsOf(phasor) : ''
   const isCompared = role === 'measured' && register.vectors.sums.get(sum ?? '')?.resultant
   const mark = isCompared ? 'measured' : ''
   return {
-    full: named(label, { before, after: [value, mark].filter(Boolean).join(' ') }),
-    short: named(label, { before, after: mark }),
+    full: named(label, { before, terminals, after: [value, mark].filter(Boolean).join(' ') }),
+    short: named(label, { before, terminals, after: mark }),
   }
+}
+
+/** The positive direction, from the first terminal to the second: `a–b`; empty where none is named. */
+function terminalsOf({ from = '', to = '' }: Phasor): string {
+  return from === '' && to === '' ? '' : `${isolate(from)}–${isolate(to)}`
 }
 
 function resultantTexts({ sum: id = '', quantity }: PlacedArrow, register: Register): LabelTexts {

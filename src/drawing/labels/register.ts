@@ -19,6 +19,8 @@ export interface Register {
   readonly vectors: Vectors
   readonly readings: ReadingsByPhasor
   readonly reference: Id | undefined
+  /** The terminals of a phasor are part of its label. */
+  readonly hasTerminals: boolean
   readonly hand: ReadonlyMap<Id, DrawnArrow>
   readonly unitsPerCentimetre: UnitsPerCentimetre
 }
@@ -30,13 +32,18 @@ export interface DrawnArrow {
 }
 
 /** The register of a sheet. */
-export function createRegister(sheet: Sheet, evaluation: Evaluation): Register {
+export function createRegister(
+  sheet: Sheet,
+  evaluation: Evaluation,
+  hasTerminals: boolean,
+): Register {
   return {
     phasors: new Map(sheet.phasors.map((phasor) => [phasor.id, phasor])),
     sums: new Map((sheet.sums ?? []).map((sum) => [sum.id, sum])),
     vectors: createVectors(evaluation),
     readings: readingsByPhasor(sheet),
     reference: referenceOf(sheet),
+    hasTerminals,
     hand: new Map(
       (sheet.hand ?? []).map((arrow, index) => [
         arrow.id,

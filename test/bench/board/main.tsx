@@ -57,7 +57,7 @@ const scene = drawnScene(sheet, 'light')
 const first = scene.arrows.find(({ phasor }) => phasor === 'v0') as PlacedArrow
 const tip = toBoard(fitView(size, scene), first.to, scene)
 
-/** One frame of the drag that the mouse has begun: the pointer moves, and the board is drawn. */
+/** One frame of what the mouse has begun, a drag or a new arrow: the pointer moves, the board is drawn. */
 function dragFrame(step: number): number {
   const board = document.querySelector('.board') as HTMLElement
   const angle = step * 0.7
@@ -111,10 +111,12 @@ declare global {
 
 async function start(): Promise<void> {
   await loadFonts()
+  const store = createStore(sheet, 'new')
+  if (location.search.includes('draw')) store.getState().setPen({ mode: 'phasor' })
   const root = createRoot(document.getElementById('root') as HTMLElement)
   flushSync(() =>
     root.render(
-      <StoreContext value={createStore(sheet, 'new')}>
+      <StoreContext value={store}>
         <Board />
       </StoreContext>,
     ),

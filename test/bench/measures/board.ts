@@ -35,6 +35,22 @@ export const dragLooseAmong1000 = frameMeasure(
   'drag',
 )
 
+/** A new arrow is drawn, with rule and protractor, among many that stand still. */
+export const drawAmong100 = frameMeasure(
+  'a frame while a new arrow is drawn among 100 phasors, against the whole picture straight on a canvas',
+  1,
+  'loose=100&draw',
+  'drag',
+)
+
+/** The same among the most phasors that a sheet has. */
+export const drawAmong2000 = frameMeasure(
+  'a frame while a new arrow is drawn among 2,000 phasors, against the whole picture straight on a canvas',
+  0.15,
+  'loose=2000&draw',
+  'drag',
+)
+
 /** Everything is drawn anew, as while panning. */
 export const redraw1000 = frameMeasure(
   'a full redraw of 1,000 phasors, against the same picture straight on a canvas',
