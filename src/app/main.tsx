@@ -8,6 +8,7 @@ import { createOfflineStore, OfflineContext, watchVersions } from './offline'
 import { App } from './shell/App'
 import { StoreContext } from './store'
 import './style.css'
+import { createEstimateWorker, createEstimator, settledAnswer, watchEstimate } from './worker'
 
 async function start(): Promise<void> {
   const [{ store, keeping }] = await Promise.all([
@@ -42,7 +43,13 @@ async function start(): Promise<void> {
     settled: keeping.keeper.settled,
     reload: () => window.location.reload(),
   })
+  watchEstimate(store, createEstimator(createEstimateWorker), {
+    setTimeout: (act, milliseconds) => window.setTimeout(act, milliseconds),
+    clearTimeout: (timer) => window.clearTimeout(timer),
+  })
   await fetchLater()
+  // The first answer shows that the worker was fetched, and its spare with it.
+  await settledAnswer(store, 60_000)
   // From here on the page asks for nothing any more.
   document.documentElement.dataset.settled = 'true'
 }

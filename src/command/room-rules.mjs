@@ -18,7 +18,8 @@ const rooms = {
 const doorOf = (/** @type {string} */ room) => `^src/${room}/(estimate/)?index\\.ts$`
 
 /** Where the program begins: whatever no path from here reaches is left over. */
-const beginnings = '^(src/app/main\\.tsx|src/command/[^/]+\\.(ts|mjs|cjs)|vite\\.config\\.ts)$'
+const beginnings =
+  '^(src/app/main\\.tsx|src/app/worker/estimate\\.worker\\.ts|src/command/[^/]+\\.(ts|mjs|cjs)|vite\\.config\\.ts)$'
 
 /** @type {import('dependency-cruiser').IForbiddenRuleType[]} */
 const rules = [

@@ -1,3 +1,4 @@
+import { cosDegrees, sinDegrees } from '../core'
 import type { Place } from '../sheet'
 
 /** An upright rectangle in millimetres, y up. */
@@ -96,4 +97,22 @@ export function distanceToSegment(
   const t = squared === 0 ? 0 : ((x - x1) * alongX + (y - y1) * alongY) / squared
   const nearest = Math.min(1, Math.max(0, t))
   return Math.hypot(x - x1 - nearest * alongX, y - y1 - nearest * alongY)
+}
+
+/** The corners of a box as points x, y, …, anticlockwise from the lower left. */
+export function cornersOf({ left, bottom, right, top }: Box): readonly number[] {
+  return [left, bottom, right, bottom, right, top, left, top]
+}
+
+/** The points x, y, … turned about a place by degrees, anticlockwise. */
+export function turnPoints(points: readonly number[], about: Place, degrees: number): number[] {
+  if (degrees === 0) return [...points]
+  const [cosine, sine] = [cosDegrees(degrees), sinDegrees(degrees)]
+  const turned: number[] = []
+  for (let at = 0; at + 1 < points.length; at += 2) {
+    const x = (points[at] as number) - about.x
+    const y = (points[at + 1] as number) - about.y
+    turned.push(about.x + cosine * x - sine * y, about.y + sine * x + cosine * y)
+  }
+  return turned
 }

@@ -18,6 +18,7 @@ import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
 import type { Item, PlacedArrow, Scene } from './scene'
+import { createStamp, NO_STAMP } from './stamp'
 import { describeDrawing } from './text/description'
 import { type Palette, paletteOf, type Theme } from './theme'
 
@@ -31,6 +32,8 @@ export interface LayoutOptions {
   readonly frozen?: Frozen
   /** Makes items for the arrows of these keys alone; `arrows` still lists all. */
   readonly only?: ReadonlySet<string>
+  /** The last whole evaluation, where this one has no verdict yet: its stamp is drawn in grey. */
+  readonly former?: Evaluation
   /**
    * Places the figures of the arrows with these keys alone, and `arrows` lists no others: in a drag,
    * what stands still need not be looked at. Only with a whole scene as `frozen`.
@@ -76,6 +79,10 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
   }
   addDrawing(items, picture, palette, only)
+  const stamp = only
+    ? NO_STAMP
+    : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
+  items.push(...stamp.items)
   const labelling =
     labels && !only
       ? createLabels(
@@ -83,7 +90,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
           picture,
           createRegister(sheet, evaluation, terminals),
           frame,
-          fences,
+          [...fences, ...stamp.boxes],
           palette,
         )
       : { items: [], leftOut: 0 }
@@ -95,6 +102,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     title: sheet.title,
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
     labelsLeftOut: labelling.leftOut + open.leftOut,
+    ...(stamp.isLeftOut && { isStampLeftOut: true }),
   }
 }
 

@@ -25,6 +25,7 @@ interface ItemCommon {
     | 'label'
     | 'scale-bar'
     | 'title-block'
+    | 'stamp'
   /** The key of the placed arrow that it belongs to. */
   readonly arrow?: string
 }
@@ -65,6 +66,8 @@ export type TextItem = ItemCommon & {
   readonly anchor: 'start' | 'middle' | 'end'
   readonly runs: readonly TextRun[]
   readonly fill: string
+  /** Degrees by which it is turned about `at`, anticlockwise; not at all where nothing is said. */
+  readonly turn?: number
   /** The colour of a halo that keeps the text clear of what lies under it. */
   readonly halo?: string
 }
@@ -112,4 +115,6 @@ export interface Scene {
   readonly description: string
   /** How many labels found no free place. */
   readonly labelsLeftOut: number
+  /** Set where there is a verdict and no room for its stamp. */
+  readonly isStampLeftOut?: true
 }

@@ -1,4 +1,4 @@
-import type { Quantity } from '../sheet'
+import type { Agreement, Quantity } from '../sheet'
 
 /** Which of the two sets of colours a scene is laid out in; what is exported is always light. */
 export type Theme = 'light' | 'dark'
@@ -21,6 +21,8 @@ export interface Palette {
   readonly selection: string
   /** Gaps between what is measured and what is calculated, and what a hand drew. */
   readonly gap: string
+  /** The ink of the stamp for each verdict; words and border tell them apart as well. */
+  readonly verdicts: { readonly [verdict in Agreement['verdict']]: string }
 }
 
 const light: Palette = {
@@ -39,6 +41,13 @@ const light: Palette = {
   },
   selection: 'rgba(62, 132, 200, 0.22)',
   gap: '#b3205a',
+  verdicts: {
+    agree: '#1f6b38',
+    disagree: '#a3231a',
+    'not-enough': '#545c66',
+    'nothing-to-check': '#31518f',
+    'agree-on-correction': '#7a5200',
+  },
 }
 
 const dark: Palette = {
@@ -57,6 +66,13 @@ const dark: Palette = {
   },
   selection: 'rgba(120, 175, 235, 0.26)',
   gap: '#f585ae',
+  verdicts: {
+    agree: '#7fcb95',
+    disagree: '#f59385',
+    'not-enough': '#aab2bb',
+    'nothing-to-check': '#9db9ee',
+    'agree-on-correction': '#e0b55e',
+  },
 }
 
 /** The colours of a theme. */

@@ -8,6 +8,7 @@ import {
   type SetChannel,
   setChannel,
 } from './edits/channels'
+import { type Choose, choose } from './edits/choose'
 import { type ClearLimits, clearLimits } from './edits/clear-limits'
 import {
   type SetDetails,
@@ -110,6 +111,7 @@ interface EditByKind {
   readonly 'set-hand-arrow': SetHandArrow
   readonly 'remove-hand-arrow': RemoveHandArrow
   readonly 'clear-hand': ClearHand
+  readonly choose: Choose
   readonly several: Several
 }
 
@@ -167,6 +169,7 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'set-hand-arrow': setHandArrow,
   'remove-hand-arrow': removeHandArrow,
   'clear-hand': clearHand,
+  choose,
   several,
 }
 

@@ -15,7 +15,7 @@ import { SceneShape } from './SceneShape'
 import { SelectionShape } from './SelectionShape'
 import { StrokeReadout } from './StrokeReadout'
 import { StrokeShape } from './StrokeShape'
-import { drawnScene, isGround } from './scene'
+import { greyed, isGround, sceneOfAnswer } from './scene'
 import { useMovingScene } from './useMovingScene'
 import { useNudgeKeys } from './useNudgeKeys'
 import { usePointers } from './usePointers'
@@ -47,16 +47,23 @@ export function Board() {
   const [finished, setFinished] = useState<Stroke>()
   const description = useId()
 
+  const answer = usePage((state) => answerOf(state.history.sheet))
+  const values = usePage((state) => state.values)
   const pen = usePage((state) => state.pen)
   const chosenSum = usePage((state) => state.chosenSum)
   const hidden = hiddenSums(sheet, pen, chosenSum)
   const viewOptions = useMemo(
-    () => ({ hidden, construction: pen.construction, terminals: pen.areTerminalsShown }),
-    [hidden, pen.construction, pen.areTerminalsShown],
+    () => ({
+      hidden,
+      construction: pen.construction,
+      terminals: pen.areTerminalsShown,
+      values,
+    }),
+    [hidden, pen.construction, pen.areTerminalsShown, values],
   )
   const scene = useMemo(
-    () => base ?? drawnScene(sheet, theme, viewOptions),
-    [base, sheet, theme, viewOptions],
+    () => base ?? sceneOfAnswer(answer, theme, viewOptions),
+    [base, answer, theme, viewOptions],
   )
   const view = useMemo(() => chosenView ?? fitView(size, scene), [chosenView, size, scene])
   const moving = useMovingScene(base, theme, viewOptions)
@@ -66,18 +73,23 @@ export function Board() {
   )
   const still = useMemo(
     () =>
-      scene.items.filter(
-        (item) =>
-          !isGround(item) &&
-          (hasFonts || item.kind !== 'text') &&
-          !(item.arrow !== undefined && moving.moved.has(item.arrow)),
-      ),
-    [scene, moving.moved, hasFonts],
+      scene.items
+        .filter(
+          (item) =>
+            !isGround(item) &&
+            (hasFonts || item.kind !== 'text') &&
+            !(item.arrow !== undefined && moving.moved.has(item.arrow)),
+        )
+        // While something moves, the verdict is of what was there before.
+        .map((item) =>
+          item.part === 'stamp' && moving.moved.size > 0 ? greyed(item, theme) : item,
+        ),
+    [scene, moving.moved, hasFonts, theme],
   )
 
   const words = useMemo(
-    () => describeBoard(sheet, answerOf(sheet).evaluation, scene),
-    [sheet, scene],
+    () => describeBoard(sheet, answer.evaluation, scene),
+    [sheet, answer, scene],
   )
 
   const latest = useRef({ scene, view, size })

@@ -1,6 +1,6 @@
 import { type KeyboardEvent, useMemo } from 'react'
 import { isOffPaper, type Scene } from '../../drawing'
-import { usePageStore } from '../store'
+import { usePage, usePageStore } from '../store'
 
 /** The verbs that lie on the desk beside the paper. */
 export function BoardVerbs(properties: {
@@ -12,6 +12,7 @@ export function BoardVerbs(properties: {
 }) {
   const { scene, onKeyDown, onFit, onZoom } = properties
   const store = usePageStore()
+  const isAdjusted = usePage(({ values }) => values === 'adjusted')
   const { drawing: pinned, hand } = store.getState().history.sheet
   const isPinned = pinned?.origin !== undefined || pinned?.unitsPerCentimetre !== undefined
   const isOff = useMemo(() => isOffPaper(scene), [scene])
@@ -34,6 +35,8 @@ export function BoardVerbs(properties: {
             : `${scene.labelsLeftOut} labels left out: no free place`}
         </p>
       )}
+      {isAdjusted && <p className="board-remark">Drawn as adjusted</p>}
+      {scene.isStampLeftOut && <p className="board-remark">Stamp left out: no free place</p>}
       {isOff && <p className="board-remark">The drawing reaches beyond its frame</p>}
       {/* What a hand drew is true to the scale that it was drawn at. */}
       {isPinned && hand === undefined && (

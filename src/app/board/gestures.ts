@@ -96,6 +96,9 @@ type Gesture =
       readonly stroke?: Stroke
     }
 
+/** Why nothing can be dragged while the adjusted values are drawn: they follow from the readings. */
+export const ADJUSTED_IS_HELD =
+  'These are the adjusted values: show the readings as read to change the drawing.'
 /** A shorter stroke was a slip of the hand, in millimetres. */
 const shortest = 1
 const slack = 4
@@ -114,7 +117,8 @@ export function createGestures(host: GestureHost): Gestures {
     const reach = (input.touch ? reachOfFinger : reachOfMouse) / host.view().scale
     const { selection } = state
     const selected = selection?.kind === 'sum' ? undefined : selection?.id
-    return gripAt(state.history.sheet, scene, place, reach, selected)
+    const grip = gripAt(state.history.sheet, scene, place, reach, selected)
+    return grip && state.values === 'adjusted' ? { ...grip, held: ADJUSTED_IS_HELD } : grip
   }
 
   const cancel = () => {

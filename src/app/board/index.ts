@@ -1,4 +1,4 @@
 export { Board } from './Board'
 export { paintItems } from './paint'
-export { drawnScene, type ViewOptions } from './scene'
+export { drawnScene, sceneOfAnswer, type ViewOptions } from './scene'
 export { useTheme } from './useScreen'

@@ -24,6 +24,8 @@ export type Pen = Pick<
   | 'setLineDash'
   | 'save'
   | 'restore'
+  | 'translate'
+  | 'rotate'
   | 'font'
   | 'textAlign'
   | 'textBaseline'
@@ -107,6 +109,19 @@ function finish(pen: Pen, item: LinesItem | PathItem | ArcItem): void {
 }
 
 function paintText(pen: Pen, item: TextItem, height: number): void {
+  const { turn = 0, at } = item
+  if (turn === 0) {
+    paintLevelText(pen, item, height)
+    return
+  }
+  pen.save()
+  pen.translate(at.x, height - at.y)
+  pen.rotate(-turn * radiansPerDegree)
+  paintLevelText(pen, { ...item, at: { x: 0, y: height } }, height)
+  pen.restore()
+}
+
+function paintLevelText(pen: Pen, item: TextItem, height: number): void {
   const { runs, at, anchor, halo, fill } = item
   pen.textAlign = 'left'
   pen.textBaseline = 'alphabetic'

@@ -1,6 +1,13 @@
-import { type ConstructionLines, type Item, layout, type Scene, type Theme } from '../../drawing'
+import {
+  type ConstructionLines,
+  type Item,
+  layout,
+  paletteOf,
+  type Scene,
+  type Theme,
+} from '../../drawing'
 import type { Id, Sheet } from '../../sheet'
-import { answerOf } from '../store'
+import { type Answer, answerOf, evaluationShown, type State } from '../store'
 
 const groundParts: ReadonlySet<Item['part']> = new Set([
   'paper',
@@ -11,13 +18,15 @@ const groundParts: ReadonlySet<Item['part']> = new Set([
   'title-block',
 ])
 
-const scenes = new WeakMap<Sheet, Map<string, Scene>>()
+const scenes = new WeakMap<Answer, Map<string, Scene>>()
 
 /** What of a scene is a matter of the view: no sheet says it. */
 export interface ViewOptions {
   /** Sums whose exact drawing is hidden. */
   readonly hidden?: ReadonlySet<Id>
   readonly construction?: ConstructionLines
+  /** As read where nothing is said. */
+  readonly values?: State['values']
   /** The terminals of each phasor stand in its subscript. */
   readonly terminals?: boolean
 }
@@ -27,16 +36,31 @@ export function isGround(item: Item): boolean {
   return groundParts.has(item.part)
 }
 
-/** The whole scene of a sheet in the colours of a theme; laid out once for each sheet and view. */
+/** The whole scene of a sheet in the colours of a theme, with all that is known of it by now. */
 export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}): Scene {
-  const { hidden = [], terminals = false, construction = {} } = options
+  return sceneOfAnswer(answerOf(sheet), theme, options)
+}
+
+/** The whole scene of an answer; laid out once for each view. */
+export function sceneOfAnswer(answer: Answer, theme: Theme, options: ViewOptions): Scene {
+  const { values = 'read', ...view } = options
+  const { hidden = [], terminals = false, construction = {} } = view
   const { parallels = false, arcs = false } = construction
-  const name = [theme, terminals, parallels, arcs, ...hidden].join(' ')
-  const own = scenes.get(sheet) ?? new Map<string, Scene>()
-  scenes.set(sheet, own)
+  const name = [theme, values, terminals, parallels, arcs, ...hidden].join(' ')
+  const own = scenes.get(answer) ?? new Map<string, Scene>()
+  scenes.set(answer, own)
   const known = own.get(name)
   if (known) return known
-  const scene = layout(sheet, answerOf(sheet).evaluation, { theme, ...options })
+  const { sheet, former } = answer
+  const evaluation = evaluationShown(answer, values)
+  const scene = layout(sheet, evaluation, { theme, ...view, ...(former && { former }) })
   own.set(name, scene)
   return scene
+}
+
+/** An item in grey: what it says is of a sheet that is being changed. */
+export function greyed(item: Item, theme: Theme): Item {
+  const { thin } = paletteOf(theme)
+  if (item.kind === 'text') return { ...item, fill: thin }
+  return item.stroke === undefined ? item : { ...item, stroke: thin }
 }

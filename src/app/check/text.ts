@@ -29,6 +29,8 @@ interface Context {
   readonly angle: Digits
   /** Units for each millimetre of paper; undefined where nothing of the quantity is drawn. */
   readonly perMillimetre: number | undefined
+  /** Everything was solved: a sum without a gap is one that nothing checks. */
+  readonly isJudged: boolean
 }
 
 /**
@@ -68,6 +70,7 @@ export function checkText(
     unit: unitOf(quantity),
     ...digitsOfSum(sheet, sum),
     perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
+    isJudged: evaluation.agreement !== undefined,
   }
   const seen = sum.equals === 0 ? [] : [measured(context)]
   if (isHidden) return { ...head, figures: [...drawn, HIDDEN, ...seen] }
@@ -79,6 +82,7 @@ export function checkText(
       ...seen,
       ...(hand?.differences ?? []),
       difference(context),
+      ...allowance(context),
     ],
   }
 }
@@ -148,7 +152,7 @@ function measured({ sheet, sum, found, unit, magnitude, angle }: Context): Check
 }
 
 function difference(context: Context): CheckFigure {
-  const { sum, found, unit, magnitude, angle, perMillimetre } = context
+  const { sum, found, unit, magnitude, angle, perMillimetre, isJudged } = context
   const { resultant, measured: seen, closingError } = found
   if (closingError) {
     const like = Math.max(resultant?.magnitude ?? 0, seen?.magnitude ?? 0) || closingError.magnitude
@@ -182,6 +186,7 @@ function difference(context: Context): CheckFigure {
     }
   }
   const name = 'Measured less calculated'
+  if (isJudged) return { name, figure: '–', under: 'Nothing checks this sum.' }
   if (resultant && seen?.magnitude !== undefined) {
     const by = seen.magnitude - resultant.magnitude
     const percent =
@@ -191,6 +196,19 @@ function difference(context: Context): CheckFigure {
     return { name, figure: signed(formatQuantity(by, unit, magnitude)), under: percent }
   }
   return { name, figure: '–', under: 'Nothing checks this sum yet.' }
+}
+
+/** How large a gap the limits of the readings allow, and whether this one is within; nothing unless judged. */
+function allowance({ found: { closingError, closes }, unit }: Context): readonly CheckFigure[] {
+  const allowed = closingError?.allowed
+  if (allowed === undefined || closes === undefined) return []
+  return [
+    {
+      name: 'Gap allowed',
+      figure: formatQuantity(allowed, unit, { limit: allowed }),
+      under: closes ? 'the sum closes within its limits' : 'the sum does not close',
+    },
+  ]
 }
 
 /** The digits of a sum: the finest that any of its terms, or what it must equal, was given with. */

@@ -1,13 +1,18 @@
 import type { Scene } from '../../drawing'
 import type { Sheet } from '../../sheet'
-import { drawnScene, paintItems, type ViewOptions } from '../board'
+import { drawnScene, paintItems, sceneOfAnswer, type ViewOptions } from '../board'
 import { loadFonts } from '../fonts'
+import { answerOf } from '../store'
 
 const dotsPerMillimetre = 300 / 25.4
 
-/** The scene that is given out: always in the colours of paper, whatever the screen shows. */
+/**
+ * The scene that is given out: as read and always in the colours of paper, whatever the screen shows. A
+ * verdict that is of an older sheet is left out.
+ */
 export function printedScene(sheet: Sheet, view: ViewOptions = {}): Scene {
-  return drawnScene(sheet, 'light', view)
+  const { former, ...known } = answerOf(sheet)
+  return former ? sceneOfAnswer(known, 'light', view) : drawnScene(sheet, 'light', view)
 }
 
 /** The drawing as a PNG at 300 dots an inch; fails where the browser cannot make one. */

@@ -2,26 +2,38 @@ import { svg } from '../../drawing'
 import { serializeSheet } from '../../sheet'
 import type { ViewOptions } from '../board'
 import type { Store } from '../store'
+import { settledAnswer } from '../worker'
 import { download } from './download'
 import { fileNameOf } from './file-name'
 import { printedScene, toPng } from './picture'
 
+/** How long a file waits for the verdict, in milliseconds. */
+const PATIENCE_OF_EXPORT = 10_000
+
 /** Saves the drawing as an SVG, true to scale, which carries its sheet. */
-export function saveSvg(store: Store): void {
+export async function saveSvg(store: Store): Promise<void> {
+  const isStamped = await settledAnswer(store, PATIENCE_OF_EXPORT)
   const { sheet } = store.getState().history
   const text = svg(printedScene(sheet, viewToSave(store)), serializeSheet(sheet))
   const name = fileNameOf(sheet, 'svg')
   download(new Blob([text], { type: 'image/svg+xml' }), name)
-  tell(store, `Saved “${name}”. Its millimetres are true, and it opens here again.`)
+  tell(
+    store,
+    `Saved “${name}”. Its millimetres are true, and it opens here again.${stampNote(isStamped)}`,
+  )
 }
 
 /** Saves the drawing as a PNG at 300 dots an inch. */
 export async function savePng(store: Store): Promise<void> {
+  const isStamped = await settledAnswer(store, PATIENCE_OF_EXPORT)
   const { sheet } = store.getState().history
   await attempt(store, 'No picture was saved', async () => {
     const name = fileNameOf(sheet, 'png')
     download(await toPng(sheet, viewToSave(store)), name)
-    tell(store, `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.`)
+    tell(
+      store,
+      `Saved “${name}”. A PNG carries no sheet: save the SVG to open it again.${stampNote(isStamped)}`,
+    )
   })
 }
 
@@ -31,10 +43,11 @@ export async function copyPicture(store: Store): Promise<void> {
   await attempt(store, 'The picture was not copied', async () => {
     if (!('ClipboardItem' in window))
       throw new Error('this browser keeps pictures off the clipboard.')
-    await navigator.clipboard.write([
-      new ClipboardItem({ 'image/png': toPng(sheet, viewToSave(store)) }),
-    ])
-    tell(store, 'Picture copied: paste it into the report.')
+    // Some browsers let a page write only at once after the click, so the picture itself is waited for.
+    const settled = settledAnswer(store, PATIENCE_OF_EXPORT)
+    const picture = settled.then(() => toPng(sheet, viewToSave(store)))
+    await navigator.clipboard.write([new ClipboardItem({ 'image/png': picture })])
+    tell(store, `Picture copied: paste it into the report.${stampNote(await settled)}`)
   })
 }
 
@@ -45,6 +58,12 @@ function viewToSave(store: Store): ViewOptions {
     terminals: areTerminalsShown,
     ...(isConstructionSaved && { construction }),
   }
+}
+
+function stampNote(isStamped: boolean): string {
+  return isStamped
+    ? ''
+    : ' The stamp is left out: whether the readings agree is not worked out yet.'
 }
 
 async function attempt(store: Store, refusal: string, work: () => Promise<void>): Promise<void> {

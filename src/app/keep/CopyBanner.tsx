@@ -7,6 +7,8 @@ export function CopyBanner() {
   const identity = usePage((state) => state.identity)
   const sheet = usePage((state) => state.history.sheet)
   const isAsItCame = usePage((state) => state.origin === 'link' && state.history.past.length === 0)
+  // What was concluded grows when the whole answer comes.
+  usePage((state) => state.answer)
   const { copy } = identity
   if (copy === undefined) return null
   const makeMine = () => {

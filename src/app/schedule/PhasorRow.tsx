@@ -4,7 +4,7 @@ import { PhasorSymbol } from '../shell/PhasorSymbol'
 import { usePageStore } from '../store'
 import { ArrowMark } from './ArrowMark'
 import { Cell } from './Cell'
-import type { CellText, RowText } from './cells'
+import type { BestText, CellText, RowText } from './cells'
 import { commitLabel, commitLimit, commitValue } from './commit'
 
 const quantities: readonly Quantity[] = ['voltage', 'current', 'impedance', 'power', 'other']
@@ -13,13 +13,17 @@ const quantities: readonly Quantity[] = ['voltage', 'current', 'impedance', 'pow
 export interface PhasorRowProperties {
   readonly phasor: Phasor
   readonly text: RowText
+  /** What was worked out of it; undefined until it is. */
+  readonly best: BestText | undefined
+  /** What was worked out is of the sheet before. */
+  readonly former: boolean
   readonly selected: boolean
   readonly reference: boolean
 }
 
 /** One phasor of the schedule: every part can be typed, and the rest follows. */
 export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties) {
-  const { phasor, text, selected, reference } = properties
+  const { phasor, text, best, former, selected, reference } = properties
   const store = usePageStore()
   const name = phasor.label || phasor.id
 
@@ -85,9 +89,22 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
           {...text.limit}
           onCommit={(entered) => commitLimit(store, phasor, entered)}
         />
+        {best && best.values.length > 0 && (
+          <p className="best" data-former={former || undefined}>
+            <span className="visually-hidden">Best values of {name}: </span>
+            {best.values.map((value) => (
+              <span key={value}>{value}</span>
+            ))}
+          </p>
+        )}
       </td>
       <td data-area="known">
         <KnownChoice id={phasor.id} name={name} known={text.known} />
+        {best && (
+          <p className="best" data-former={former || undefined}>
+            {best.state}
+          </p>
+        )}
       </td>
     </tr>
   )

@@ -2,8 +2,8 @@ import { type ClipboardEvent, useMemo, useState } from 'react'
 import { flushSync } from 'react-dom'
 import { readingsByPhasor } from '../../drawing'
 import { newId, type Phasor, referenceOf, type Sheet } from '../../sheet'
-import { shownEvaluation, shownSheet, usePage, usePageStore } from '../store'
-import { type RowText, rowText } from './cells'
+import { shownAnswer, shownSheet, usePage, usePageStore } from '../store'
+import { type BestText, bestText, type RowText, rowText } from './cells'
 import { copyRows } from './copy'
 import { PasteDialog } from './PasteDialog'
 import { PhasorRow } from './PhasorRow'
@@ -16,7 +16,9 @@ const columns = ['Phasor', 'Quantity', 'Magnitude', 'Angle', 'Real', 'Imaginary'
 export function Schedule() {
   const store = usePageStore()
   const sheet = usePage(shownSheet)
-  const evaluation = usePage(shownEvaluation)
+  const answer = usePage(shownAnswer)
+  const { evaluation } = answer
+  const whole = answer.whole ?? answer.former
   const selection = usePage((state) => state.selection)
   const [pasted, setPasted] = useState<string>()
   const selected = selection?.kind === 'phasor' ? selection.id : undefined
@@ -53,6 +55,11 @@ export function Schedule() {
                     key={phasor.id}
                     phasor={phasor}
                     text={rowText(sheet, phasor, found, readings)}
+                    best={bestText(
+                      phasor,
+                      whole?.phasors.find(({ id }) => id === phasor.id),
+                    )}
+                    former={answer.whole === undefined}
                     selected={phasor.id === selected}
                     reference={phasor.id === reference}
                   />
@@ -92,10 +99,13 @@ export function Schedule() {
 function Row(properties: {
   readonly phasor: Phasor
   readonly text: RowText
+  readonly best: BestText | undefined
+  readonly former: boolean
   readonly selected: boolean
   readonly reference: boolean
 }) {
-  return <PhasorRow {...properties} text={useStable(properties.text)} />
+  const { text, best } = properties
+  return <PhasorRow {...properties} text={useStable(text)} best={useStable(best)} />
 }
 
 function addPhasor(

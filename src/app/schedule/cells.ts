@@ -171,3 +171,40 @@ function knownOf(
   if (!read) return typed ? 'typed' : 'open'
   return typed ? 'partly' : 'read'
 }
+
+/** The best values of a row, for its cells Limit and Known. */
+export interface BestText {
+  /** Each best value with its limit. */
+  readonly values: readonly string[]
+  /** How each part came to be: `magnitude adjusted, angle solved`. */
+  readonly state: string
+}
+
+/** What was worked out of a phasor; undefined where nothing was. */
+export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): BestText | undefined {
+  if (best === undefined) return undefined
+  const { magnitude, angle, magnitudeLimit, angleLimit, magnitudeState, angleState } = best
+  const unit = unitOf(phasor.quantity)
+  const values = [
+    ...(magnitude === undefined || magnitudeLimit === undefined
+      ? []
+      : [withLimit(magnitude, magnitudeLimit, unit, ROUNDING * magnitude)]),
+    ...(angle === undefined || angleLimit === undefined
+      ? []
+      : [withLimit(angle, angleLimit, '°', ROUNDING * 180)]),
+  ]
+  const state =
+    magnitudeState === angleState
+      ? magnitudeState
+      : `magnitude ${magnitudeState}, angle ${angleState}`
+  return { values, state }
+}
+
+/** A limit below this share of a size is rounding: the value is exact. */
+const ROUNDING = 1e-9
+
+function withLimit(value: number, found: number, unit: string, rounding: number): string {
+  const limit = found <= rounding ? 0 : found
+  const text = unit === '°' ? formatAngle(value, { limit }) : formatQuantity(value, unit, { limit })
+  return limit === 0 ? text : `${text} ${formatLimit(limit, unit)}`
+}

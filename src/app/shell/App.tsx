@@ -1,4 +1,5 @@
 import { Suspense } from 'react'
+import { AnswerPanel } from '../answer'
 import { Board } from '../board'
 import { CheckLine } from '../check'
 import { DrawingSettings, TitleBlock } from '../details'
@@ -33,6 +34,7 @@ export function App() {
         <Suspense>
           <Readings />
         </Suspense>
+        <AnswerPanel />
         <section aria-label="Sheet">
           <TitleBlock />
           <DrawingSettings />

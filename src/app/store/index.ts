@@ -4,8 +4,10 @@ export { createIdentity, createName } from './identity'
 export {
   answerOf,
   checkedSum,
+  evaluationShown,
   hiddenSums,
   isConstructed,
+  shownAnswer,
   shownEvaluation,
   shownSheet,
 } from './selectors'
@@ -17,6 +19,7 @@ export type {
   Notice,
   Origin,
   Pen,
+  Progress,
   Selection,
   Shelved,
   State,

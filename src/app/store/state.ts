@@ -74,6 +74,11 @@ export interface State {
   readonly chosenSum: Id | undefined
   readonly pen: Pen
   readonly notice: Notice | undefined
+  /** The last whole answer that came. It is of an older sheet while `progress` says so. */
+  readonly answer: Answer | undefined
+  readonly progress: Progress
+  /** Whether the board shows the readings as read, or the best values, which close. */
+  readonly values: 'read' | 'adjusted'
   /** What a screen reader is told after an edit. */
   readonly announcement: string
 }
@@ -81,5 +86,15 @@ export interface State {
 /** A sheet with what the program says of it. */
 export interface Answer {
   readonly sheet: Sheet
+  /** What the page shows: values as read, what is solved filled in once that is known. */
   readonly evaluation: Evaluation
+  /** Everything solved and adjusted; undefined until it is worked out. */
+  readonly whole?: Evaluation
+  /** Until then: that of the sheet before, shown greyed. */
+  readonly former?: Evaluation
 }
+
+/** How the whole answer comes along. */
+export type Progress =
+  | { readonly state: 'resting' | 'working' | 'slow' }
+  | { readonly state: 'failed'; readonly text: string }

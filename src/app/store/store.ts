@@ -5,6 +5,7 @@ import {
   createHistory,
   describeEdit,
   type Edit,
+  type Evaluation,
   redo,
   type Sheet,
   serializeSheet,
@@ -12,8 +13,8 @@ import {
 } from '../../sheet'
 import { describeAnswer } from './describe'
 import { createIdentity } from './identity'
-import { answerOf, hasHandArrow, hasPhasor, hasSum } from './selectors'
-import type { Identity, Notice, Origin, Pen, Selection, Shelved, State } from './state'
+import { answerOf, continueAnswer, hasHandArrow, hasPhasor, hasSum, keepAnswer } from './selectors'
+import type { Identity, Notice, Origin, Pen, Progress, Selection, Shelved, State } from './state'
 
 /** What can be done to the page's state. Each either does the whole thing or says why it does not. */
 export interface Actions {
@@ -41,6 +42,12 @@ export interface Actions {
   /** Goes back to the sheet that was open before. */
   goBack(): void
   notify(notice: Notice | undefined): void
+  /** Takes the whole evaluation of a sheet, the open one or an older. */
+  receiveAnswer(sheet: Sheet, evaluation: Evaluation): void
+  /** Says how the whole answer for the open sheet comes along. */
+  setProgress(progress: Progress): void
+  /** Shows the board as read or as adjusted. */
+  showValues(values: State['values']): void
 }
 
 /** The page's store: the state and what can be done to it. */
@@ -84,6 +91,7 @@ export function createStore(
         set({ draft: undefined })
         return true
       }
+      continueAnswer(history.sheet, result.value)
       const description = describeEdit(history.sheet, edit)
       const said = `${description}.`
       settle(commit(history, result.value, description), said, removalNotice(edit, said))
@@ -100,12 +108,17 @@ export function createStore(
       chosenSum: undefined,
       pen: restingPen,
       notice: undefined,
+      answer: undefined,
+      progress: { state: 'resting' },
+      values: 'read',
       announcement: '',
 
       edit: step,
       preview: (edit) => {
         const result = apply(get().history.sheet, edit)
-        if (result.ok) set({ draft: { edit, sheet: result.value } })
+        if (!result.ok) return
+        continueAnswer(get().history.sheet, result.value)
+        set({ draft: { edit, sheet: result.value } })
       },
       dropDraft: () => {
         if (get().draft) set({ draft: undefined })
@@ -179,6 +192,10 @@ export function createStore(
         })
       },
       notify: (notice) => set({ notice }),
+
+      receiveAnswer: (sheet, evaluation) => set({ answer: keepAnswer(sheet, evaluation) }),
+      setProgress: (progress) => set({ progress }),
+      showValues: (values) => set({ values }),
     }
   })
 }

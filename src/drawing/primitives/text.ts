@@ -1,5 +1,5 @@
 import { ASCENT, DESCENT, measureText } from '../font/measure'
-import { type Box, distanceToBox } from '../geometry'
+import { type Box, boxOfPoints, cornersOf, distanceToBox, turnPoints } from '../geometry'
 import type { TextItem, TextRun } from '../scene'
 import { escapeText } from '../svg/escape'
 import { formatMillimetres } from '../svg/number'
@@ -17,14 +17,20 @@ const FACES: { readonly [face in TextRun['face']]: string } = {
 /** A line of text. The upright face is taken from what the element stands in. */
 export const text: Primitive<TextItem> = {
   bounds(item) {
-    return boxOfText(item)
+    const { at, turn = 0 } = item
+    const box = boxOfText(item)
+    return turn === 0 ? box : boxOfPoints(turnPoints(cornersOf(box), at, turn))
   },
   distance(item, point) {
-    return distanceToBox(point, boxOfText(item))
+    const { at, turn = 0 } = item
+    const [x = point.x, y = point.y] = turnPoints([point.x, point.y], at, -turn)
+    return distanceToBox({ x, y }, boxOfText(item))
   },
-  svg({ at, anchor, runs, fill, halo }, height) {
+  svg({ at, anchor, runs, fill, halo, turn = 0 }, height) {
     const [first] = runs
-    const place = `x="${formatMillimetres(at.x)}" y="${formatMillimetres(height - at.y)}"`
+    const [x, y] = [formatMillimetres(at.x), formatMillimetres(height - at.y)]
+    const turned = turn === 0 ? '' : ` transform="rotate(${formatMillimetres(-turn)} ${x} ${y})"`
+    const place = `x="${x}" y="${y}"${turned}`
     const anchored = anchor === 'start' ? '' : ` text-anchor="${anchor}"`
     const haloed = halo
       ? ` stroke="${halo}" stroke-width="${HALO_WIDTH}" stroke-linejoin="round" paint-order="stroke"`

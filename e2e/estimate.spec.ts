@@ -1,0 +1,172 @@
+import { readdir, readFile } from 'node:fs/promises'
+import { join } from 'node:path'
+import type { Page } from '@playwright/test'
+import { projectFolder } from '../src/command/run.mjs'
+import type { Reading, Sheet } from '../src/sheet'
+import { evaluate } from '../src/sheet/estimate'
+import { checkFigure } from './support/check-line'
+import { openPage, settledSheet } from './support/page'
+import { nextReading } from './support/readings'
+import { sheetOf } from './support/sheets'
+import { expect, test } from './support/test'
+
+/*
+ * An invented job: a dehumidifier's fan motor behind a series choke, a resistor for measuring and a
+ * capacitor. Four voltages, each read twice over: how large, and how far it leads the current.
+ */
+const labels = ['VR', 'Vchoke', 'VC', 'VS'] as const
+
+const sound: readonly (readonly [string, string])[] = [
+  ['24.1', '0.4'],
+  ['61.3', '73.2'],
+  ['27.4', '-89.6'],
+  ['52.1', '36.6'],
+]
+
+function job(): Sheet {
+  return sheetOf({
+    title: 'Dehumidifier 3, fan motor',
+    reference: 'I',
+    phasors: [
+      { id: 'I', label: 'I', quantity: 'current', magnitude: { value: 1.84, text: '1.84' } },
+      ...labels.map((label) => ({ id: label, label, quantity: 'voltage' as const })),
+    ],
+    sums: [
+      {
+        id: 's1',
+        terms: [{ phasor: 'VR' }, { phasor: 'Vchoke' }, { phasor: 'VC' }],
+        equals: 'VS',
+      },
+    ],
+  })
+}
+
+/** Types what the displays show, one after the other, wherever the page stands ready. */
+async function typeReadings(page: Page, shown: readonly (readonly [string, string])[]) {
+  for (const [at, label] of labels.entries()) {
+    for (const [kind, text] of [
+      ['magnitude', shown[at]?.[0] ?? ''],
+      ['angle', shown[at]?.[1] ?? ''],
+    ] as const) {
+      await page
+        .getByRole('combobox', { name: 'Phasor of the next reading' })
+        .selectOption({ label })
+      await page.getByRole('combobox', { name: 'Kind of the next reading' }).selectOption(kind)
+      await nextReading(page).fill(text)
+      await nextReading(page).press('Enter')
+      await expect(nextReading(page)).toHaveValue('')
+    }
+  }
+}
+
+function panel(page: Page) {
+  return page.getByRole('region', { name: 'Best values' })
+}
+
+/** The text of the SVG that the page saves. */
+async function savedSvg(page: Page): Promise<string> {
+  const download = page.waitForEvent('download')
+  await page.getByRole('button', { name: 'Save drawing' }).click()
+  await page.getByRole('button', { name: 'SVG, true to scale' }).click()
+  return readFile(await (await download).path(), 'utf8')
+}
+
+test('eight sound readings are typed, and the sheet is stamped: they agree', async ({ page }) => {
+  await openPage(page, job())
+  await typeReadings(page, sound)
+  const sheet = await settledSheet(page, ({ readings }) => readings?.length === 8)
+  const { agreement, sums, phasors } = evaluate(sheet)
+  expect(agreement?.verdict).toBe('agree')
+
+  await expect(panel(page).getByText('READINGS AGREE')).toBeVisible()
+  await expect(checkFigure(page, 'Gap allowed').nth(1)).toHaveText(
+    'the sum closes within its limits',
+  )
+  const allowed = Number.parseFloat(
+    (await checkFigure(page, 'Gap allowed').first().textContent()) ?? '',
+  )
+  expect(allowed).toBeCloseTo(sums[0]?.closingError?.allowed ?? Number.NaN, 1)
+
+  const row = page.locator('[data-row="Vchoke"]')
+  await expect(row.locator('[data-area="known"] .best')).toHaveText('adjusted')
+  const best = (await row.locator('[data-area="limit"] .best').textContent()) ?? ''
+  const found = phasors.find(({ id }) => id === 'Vchoke')
+  const shown = Number.parseFloat(best.replace(/^.*?: /, ''))
+  expect(Math.abs(shown - (found?.magnitude ?? Number.NaN))).toBeLessThan(0.06)
+
+  const text = await savedSvg(page)
+  expect(text).toContain('>READINGS AGREE<')
+  expect(text).toMatch(/>gap [\d.]+ V of [\d.]+ V allowed · 2 checks</)
+})
+
+test('one bad reading among eight is stamped, and listed first', async ({ page }) => {
+  await openPage(page, job())
+  await typeReadings(page, [sound[0], sound[1], ['37.4', '-89.6'], sound[3]] as typeof sound)
+  const sheet = await settledSheet(page, ({ readings }) => readings?.length === 8)
+  expect(evaluate(sheet).agreement?.verdict).toBe('disagree')
+
+  await expect(panel(page).getByText('READINGS DO NOT AGREE')).toBeVisible()
+  await expect(checkFigure(page, 'Gap allowed').nth(1)).toHaveText('the sum does not close')
+  const first = evaluate(sheet).suspects?.[0]?.reading
+  const number = (sheet.readings ?? []).findIndex(({ id }: Reading) => id === first) + 1
+  await expect(panel(page).getByRole('rowheader').first()).toHaveText(
+    new RegExp(`^${number}: VC, magnitude`),
+  )
+  expect(await savedSvg(page)).toContain('>READINGS DO NOT AGREE<')
+})
+
+test('with nothing left to check, the page says so and claims nothing', async ({ page }) => {
+  const { phasors, ...rest } = job()
+  await openPage(page, {
+    ...rest,
+    phasors: phasors.filter(({ id }) => id !== 'I' && id !== 'VC'),
+    reference: 'VR',
+    sums: [{ id: 's1', terms: [{ phasor: 'VR' }, { phasor: 'Vchoke' }], equals: 'VS' }],
+  })
+  await expect(panel(page).getByText('NOT ENOUGH READINGS')).toBeVisible()
+  for (const [label, text] of [
+    ['VR', '24.1'],
+    ['Vchoke', '61.3'],
+    ['VS', '72.2'],
+  ] as const) {
+    await page.getByRole('combobox', { name: 'Phasor of the next reading' }).selectOption({ label })
+    await page.getByRole('combobox', { name: 'Kind of the next reading' }).selectOption('magnitude')
+    await nextReading(page).fill(text)
+    await nextReading(page).press('Enter')
+    await expect(nextReading(page)).toHaveValue('')
+  }
+  await expect(panel(page).getByText('SOLVED, NOTHING LEFT TO CHECK')).toBeVisible()
+  await expect(panel(page).getByText(/^Nothing checks reading 1: VR, magnitude/)).toBeVisible()
+  await expect(checkFigure(page, 'Gap allowed')).toHaveCount(0)
+
+  // Three voltages make a triangle and its mirror: one click takes the other.
+  const pictures = panel(page).getByRole('listitem').getByRole('button')
+  await expect(pictures).toHaveCount(2)
+  await pictures.nth(1).click()
+  await settledSheet(page, ({ chosen }) => (chosen?.length ?? 0) > 0)
+  await expect(pictures).toHaveCount(2)
+})
+
+test('the adjusted diagram closes, and is for looking only', async ({ page }) => {
+  await openPage(page, job())
+  await typeReadings(page, sound)
+  await settledSheet(page, ({ readings }) => readings?.length === 8)
+  await panel(page).getByRole('radio', { name: 'As adjusted' }).check()
+  await expect(page.getByText('Drawn as adjusted')).toBeVisible()
+  await panel(page).getByRole('radio', { name: 'As read' }).check()
+  await expect(page.getByText('Drawn as adjusted')).toHaveCount(0)
+})
+
+test('the linear algebra stays out of the first load', async () => {
+  const folder = join(projectFolder, 'dist')
+  const assets = await readdir(join(folder, 'assets'))
+  const contents = await Promise.all(
+    assets
+      .filter((name) => name.endsWith('.js'))
+      .map(async (name) => ({ name, text: await readFile(join(folder, 'assets', name), 'utf8') })),
+  )
+  // A sentence of the library's own, which no shortening of names touches.
+  const holders = contents.filter(({ text }) => text.includes('Row index out of range'))
+  expect(holders.map(({ name }) => name)).toEqual([expect.stringMatching(/^estimate\.worker-/)])
+  expect(await readFile(join(folder, 'service-worker.js'), 'utf8')).toContain(holders[0]?.name)
+})

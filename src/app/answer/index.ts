@@ -1,0 +1,1 @@
+export { AnswerPanel } from './AnswerPanel'
