@@ -1,7 +1,7 @@
 import { engines } from './support/engines'
-import type { Visitor } from './support/visitor'
 import { serve } from './support/own-server'
 import { expect, test } from './support/test'
+import type { Visitor } from './support/visitor'
 
 /** Waits until an expression holds in the page. */
 async function until(visitor: Visitor, expression: string): Promise<void> {

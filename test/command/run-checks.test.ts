@@ -81,6 +81,7 @@ describe('npm test', () => {
     expect(names).toEqual([
       'packages installed',
       'browser found',
+      'other engines',
       'types',
       'lint and format',
       'room borders',
