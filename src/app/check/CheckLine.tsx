@@ -38,7 +38,7 @@ export function CheckLine() {
   const isHidden = hiddenSums(kept, pen, sum.id).has(sum.id)
   const text = checkText(sheet, evaluation, sum, scale, isHidden)
   return (
-    <section className="check" aria-label="Check" data-hand={text.figures.length > 3 || undefined}>
+    <section className="check" aria-label="Check" data-hand={text.figures.length > 4 || undefined}>
       <div>
         <p className="name">{text.drawn}</p>
         <p className="figure">
