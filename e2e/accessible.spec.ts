@@ -9,7 +9,7 @@ import { expect, test } from './support/test'
 
 test('a screen reader hears every phasor with its value', async ({ page }) => {
   await openPage(page, benchSheet)
-  await expect(page.getByRole('table')).toMatchAriaSnapshot(`
+  await expect(page.getByRole('table', { name: 'Phasors' })).toMatchAriaSnapshot(`
     - rowgroup:
       - row:
         - cell:

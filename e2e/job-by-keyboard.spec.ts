@@ -97,7 +97,13 @@ async function typePhasor(page: Page, phasor: JobPhasor): Promise<void> {
   const { keyboard } = page
   await press(page, 'Add phasor')
   await expect(
-    page.locator('tbody').getByRole('row').last().getByRole('textbox').first(),
+    page
+      .getByRole('table', { name: 'Phasors' })
+      .locator('tbody')
+      .getByRole('row')
+      .last()
+      .getByRole('textbox')
+      .first(),
   ).toBeFocused()
   await keyboard.type(label)
   await keyboard.press('Tab')

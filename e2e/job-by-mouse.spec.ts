@@ -23,7 +23,9 @@ test('a technician does the whole job with the mouse', async ({ page }) => {
 
   await test.step('types five phasors, two of them as read', async () => {
     for (const phasor of jobPhasors) await addPhasor(page, phasor)
-    await expect(page.locator('tbody').getByRole('row')).toHaveCount(5)
+    await expect(
+      page.getByRole('table', { name: 'Phasors' }).locator('tbody').getByRole('row'),
+    ).toHaveCount(5)
     await expect(cell(page, 'Real', 'Vcoil')).toHaveValue(/^10\.9/)
     await expect(cell(page, 'Imaginary', 'Vcoil')).toHaveValue(/^51\.3/)
   })
@@ -89,8 +91,10 @@ test('a technician does the whole job with the mouse', async ({ page }) => {
     await other.goto(await copyLink(page))
     await isDrawn(other)
     expect(sheetInLink(await copyLink(other))).toEqual(sheet)
-    const table = page.getByRole('table')
-    expect(await other.getByRole('table').ariaSnapshot()).toBe(await table.ariaSnapshot())
+    const table = page.getByRole('table', { name: 'Phasors' })
+    expect(await other.getByRole('table', { name: 'Phasors' }).ariaSnapshot()).toBe(
+      await table.ariaSnapshot(),
+    )
     await expectCheckedAs(other, sheet)
   })
 })
@@ -98,7 +102,7 @@ test('a technician does the whole job with the mouse', async ({ page }) => {
 async function addPhasor(page: Page, phasor: (typeof jobPhasors)[number]): Promise<void> {
   const { label, quantity, magnitude, angle, known } = phasor
   await page.getByRole('button', { name: 'Add phasor', exact: true }).click()
-  const row = page.locator('tbody').getByRole('row').last()
+  const row = page.getByRole('table', { name: 'Phasors' }).locator('tbody').getByRole('row').last()
   const name = row.getByRole('textbox', { name: /^Label of/ })
   await expect(name).toBeFocused()
   await name.fill(label)

@@ -105,7 +105,13 @@ test('a four-voltage job is taken down as shown, by keyboard alone', async ({ pa
 async function addPhasor(page: Page, label: string, quantity: string): Promise<void> {
   await press(page, 'Add phasor')
   await expect(
-    page.locator('tbody').getByRole('row').last().getByRole('textbox').first(),
+    page
+      .getByRole('table', { name: 'Phasors' })
+      .locator('tbody')
+      .getByRole('row')
+      .last()
+      .getByRole('textbox')
+      .first(),
   ).toBeFocused()
   await page.keyboard.type(label)
   await page.keyboard.press('Tab')

@@ -30,7 +30,9 @@ test('rows from a spreadsheet are pasted straight into the schedule', async ({ p
     [1.84, -30],
   ])
   await page.getByRole('button', { name: 'Undo', exact: true }).click()
-  await expect(page.locator('tbody').getByRole('row')).toHaveCount(1)
+  await expect(
+    page.getByRole('table', { name: 'Phasors' }).locator('tbody').getByRole('row'),
+  ).toHaveCount(1)
 })
 
 test('a header settles the order of the columns, and commas and semicolons separate too', async ({
@@ -75,7 +77,9 @@ test('rows that cannot be read are named, nothing is added, and the text stays t
   await field.fill(rows.replace('lots', '31').replace('\n\t5', '\nV4\t5').replace('-3', '3'))
   await dialog.getByRole('button', { name: 'Add rows' }).click()
   await expect(dialog).toHaveCount(0)
-  await expect(page.locator('tbody').getByRole('row')).toHaveCount(6)
+  await expect(
+    page.getByRole('table', { name: 'Phasors' }).locator('tbody').getByRole('row'),
+  ).toHaveCount(6)
   await expect(cell(page, 'Magnitude', 'V3')).toHaveValue('31 V')
 })
 

@@ -36,7 +36,7 @@ export function Schedule() {
     <section aria-labelledby="phasors-heading" onPaste={onPaste}>
       <h2 id="phasors-heading">Phasors</h2>
       {sheet.phasors.length > 0 && (
-        <table className="schedule">
+        <table className="schedule" aria-labelledby="phasors-heading">
           <thead>
             <tr>
               {columns.map((name) => (
