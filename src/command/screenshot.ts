@@ -20,7 +20,7 @@ try {
   for (const { name, ...screen } of pictures) {
     const page = await browser.newPage({ ...screen, colorScheme: 'light' })
     await page.goto(`http://127.0.0.1:${port}/`)
-    await page.waitForSelector('html[data-ready]', { state: 'attached' })
+    await page.waitForSelector('html[data-settled]', { state: 'attached' })
     const path = join(projectFolder, 'public', name)
     await page.screenshot({ path })
     await page.close()
