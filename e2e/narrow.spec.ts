@@ -59,11 +59,17 @@ async function sideways(page: Page): Promise<readonly string[]> {
       return isWide(element) && (scrolls || element.matches('html')) && !element.matches(strip)
     })
     const width = document.documentElement.clientWidth
+    const isClipped = (element: Element) => {
+      for (let at = element.parentElement; at; at = at.parentElement) {
+        if (/hidden|clip/.test(getComputedStyle(at).overflowX)) return true
+      }
+      return false
+    }
     const cut = all.filter((element) => {
-      if (!element.matches('button, input, select, textarea, summary, p, h1, h2, li')) return false
       if (element.closest(`${strip}, .visually-hidden`)) return false
       const { left, right } = element.getBoundingClientRect()
-      return element.checkVisibility() && (right > width + 1 || left < -1)
+      if (!element.checkVisibility() || (right <= width + 1 && left >= -1)) return false
+      return element.matches('button, input, select, textarea, summary') || !isClipped(element)
     })
     return [
       ...scrolling.map((element) => `${nameOf(element)} scrolls sideways`),
