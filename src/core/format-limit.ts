@@ -3,7 +3,7 @@ import { formatShifted, prefixExponentOf, unitSuffix } from './format-quantity'
 import type { Limit } from './limit'
 
 /** A size to two significant digits, never below itself: a limit must not look tighter than it is. */
-function roundUp(size: number): number {
+export function roundUp(size: number): number {
   const nearest = Number(size.toPrecision(2))
   // What lies within a rounding error above is no reason for a wider limit: 0.1 + 0.2 is 0.3.
   if (nearest >= size * (1 - 1e-9)) return nearest

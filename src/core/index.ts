@@ -43,6 +43,7 @@ export {
   type Wave,
 } from './conversions'
 export { type DrawingTolerance, tipErrorAllowed, USUAL_TOLERANCE } from './drawing-tolerance'
+export { formatEstimate } from './format-estimate'
 export { formatLimit } from './format-limit'
 export { decimalPlacesOf, formatNumber } from './format-number'
 export { formatAngle, formatPolar, formatRectangular } from './format-phasor'

@@ -1,4 +1,11 @@
-import { formatAngle, formatLimit, formatQuantity, resolutionOf, unitOf } from '../../core'
+import {
+  formatAngle,
+  formatEstimate,
+  formatLimit,
+  formatQuantity,
+  resolutionOf,
+  unitOf,
+} from '../../core'
 import { digitsOf, type PhasorDigits, type ReadingsByPhasor } from '../../drawing'
 import {
   assumedOf,
@@ -205,6 +212,7 @@ const ROUNDING = 1e-9
 
 function withLimit(value: number, found: number, unit: string, rounding: number): string {
   const limit = found <= rounding ? 0 : found
-  const text = unit === '°' ? formatAngle(value, { limit }) : formatQuantity(value, unit, { limit })
+  if (unit !== '°') return formatEstimate(value, limit, unit)
+  const text = formatAngle(value, { limit })
   return limit === 0 ? text : `${text} ${formatLimit(limit, unit)}`
 }
