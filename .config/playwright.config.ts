@@ -11,7 +11,7 @@ export default defineConfig({
   fullyParallel: true,
   retries: 0,
   // For what hangs, not for what is slow: a busy machine fails no test.
-  timeout: 120_000,
+  timeout: 300_000,
   expect: { timeout: 20_000 },
   reporter: 'list',
   use: {
