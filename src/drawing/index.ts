@@ -28,6 +28,9 @@ export type {
   TextItem,
   TextRun,
 } from './scene'
+export { schematicScene } from './schematic'
+export { describeCircuit } from './schematic/description'
+export { valueText } from './schematic/values'
 export { gapText, type StampWords, stampWordsOf } from './stamp/words'
 export { svg } from './svg/document'
 export { digitsOfDrawn, formatDrawn, nameOfDrawn } from './text/hand-text'

@@ -18,6 +18,7 @@ import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
 import type { Item, PlacedArrow, Scene } from './scene'
+import { createSchematic, NO_SCHEMATIC } from './schematic'
 import { createStamp, NO_STAMP } from './stamp'
 import { describeDrawing } from './text/description'
 import { type Palette, paletteOf, type Theme } from './theme'
@@ -79,6 +80,10 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
   }
   addDrawing(items, picture, palette, only)
+  const schematic =
+    only || !labels ? NO_SCHEMATIC : createSchematic(sheet, { items, frame, fences }, palette)
+  items.push(...schematic.items)
+  fences.push(...schematic.boxes)
   const stamp = only
     ? NO_STAMP
     : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
@@ -103,6 +108,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
     labelsLeftOut: labelling.leftOut + open.leftOut,
     ...(stamp.isLeftOut && { isStampLeftOut: true }),
+    ...(schematic.isLeftOut && { isSchematicLeftOut: true }),
   }
 }
 
