@@ -137,6 +137,8 @@ export interface PowerEvaluation {
   readonly factor?: number
   /** What the current does to the voltage. */
   readonly sense?: 'leads' | 'lags' | 'in phase'
+  /** Set where it is of predicted values, as before a job, when best ones are open. */
+  readonly predicted?: true
 }
 
 /**

@@ -1,5 +1,6 @@
 export { asAdjusted, asAlternative, withFormerValues } from './adjusted'
 export { type AssumedLimits, assumedOf } from './assumed'
+export { type FoundValue, type FoundVerdict, foundBesideMark } from './circuit/found'
 export { nameOfElement } from './circuit/names'
 export { partedFrom } from './circuit/parted'
 export {
@@ -12,6 +13,11 @@ export {
   nodeAt,
   pathOf,
 } from './circuit/tree'
+export {
+  formatElementLimit,
+  formatElementValue,
+  parseElementValue,
+} from './circuit/value-text'
 export {
   countedValue,
   countsInCheck,
