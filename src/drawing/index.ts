@@ -46,3 +46,9 @@ export {
   readingsByPhasor,
 } from './text/resolution'
 export { type Palette, paletteOf, type Theme } from './theme'
+export {
+  type TriangleKind,
+  type TriangleSubject,
+  triangleScene,
+  triangleSubjects,
+} from './triangles'

@@ -1,0 +1,2 @@
+export { triangleScene } from './scene'
+export { type TriangleKind, type TriangleSubject, triangleSubjects } from './subjects'
