@@ -90,6 +90,7 @@ function sumOf(values: readonly Complex[]): Complex | undefined {
     im += value.im
     size += magnitudeOf(value)
   }
+  if (!Number.isFinite(size)) return undefined
   const least = values.length > 1 ? ROUNDING * size : 0
   return finite({ re: Math.abs(re) <= least ? 0 : re, im: Math.abs(im) <= least ? 0 : im })
 }
