@@ -2,7 +2,6 @@ import { formatLimit, formatNumber, formatQuantity } from '../../core'
 import { assumedOf } from '../assumed'
 import type { ElementEvaluation, Estimate } from '../evaluation'
 import type { CircuitElement, Sheet, Typed } from '../types'
-import { nameOfElement } from './names'
 import { formatElementLimit, formatElementValue } from './value-text'
 import {
   countedValue,
@@ -58,7 +57,7 @@ function besideMark(
   const unit = unitOfElementValue(value)
   const marked = markedValue(element, value)
   const name = nameOfFound(element, value)
-  const subject = `${nameOfElement(sheet, element.id)}${name === '' ? '' : `, ${name}`}`
+  const subject = [element.label ?? element.id, name].filter((part) => part !== '').join(', ')
   const start = `${subject}: ${figureOf(found, unit)} found`
   const base = { value, name: name || nameOfElementValue(value), unit, found }
   if (marked === undefined)

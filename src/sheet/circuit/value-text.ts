@@ -1,5 +1,6 @@
 import { failure, formatLimit, formatQuantity, parseCell, type Result, success } from '../../core'
 import { parseShown } from '../digits'
+import { plainFigure } from '../plain-figure'
 import type { Typed } from '../types'
 import { type ElementValue, unitOfElementValue } from './values'
 
@@ -28,7 +29,7 @@ export function parseElementValue(
 /** A value of an element as it was typed, with its unit; without its limit. */
 export function formatElementValue({ value, text }: Typed, of: ElementValue): string {
   const unit = unitOfElementValue(of)
-  if (text === undefined) return formatQuantity(value, unit, { digits: digitsOf(String(value)) })
+  if (text === undefined) return plainFigure(value, unit)
   const parsed = parseShown(text, unit)
   // Digits that carry their unit, or a prefix, stay as they are.
   if (!parsed.ok) return formatQuantity(value, unit)
@@ -47,10 +48,4 @@ export function formatElementLimit({ value, limit }: Typed, of: ElementValue): s
   return limit === 0
     ? formatLimit(0, unit)
     : `± ${formatQuantity(limit, unit, { digits: 2, like: value })}`
-}
-
-/** How many significant digits a figure was written with; at least two. */
-function digitsOf(text: string): number {
-  const [figures = ''] = text.split('e')
-  return Math.max(2, figures.replace(/\D/g, '').replace(/^0+/, '').length)
 }

@@ -3,6 +3,7 @@ import { chargeOf, dischargeTime } from '../../../core/circuit'
 import { nameOfElement } from '../../circuit/names'
 import { predictingValue } from '../../circuit/values'
 import type { Caution } from '../../evaluation'
+import { plainFigure } from '../../plain-figure'
 import type { CircuitElement, Sheet } from '../../types'
 import { type Figures, LAST_WORD, sizeOf } from './figures'
 import { touchLimitOf } from './voltages'
@@ -46,7 +47,7 @@ function discharge(sheet: Sheet, capacitance: number, peak: number): string {
     return 'Discharge it through a resistor that bears it, and measure that it is discharged.'
   }
   const seconds = dischargeTime(capacitance, resistance, peak, limit)
-  const [through, below] = [formatQuantity(resistance, 'Ω'), formatQuantity(limit, 'V')]
+  const [through, below] = [plainFigure(resistance, 'Ω'), plainFigure(limit, 'V')]
   if (seconds === 0) return `That is not above ${below}.`
   const time = formatQuantity(seconds, 's', { digits: 2 })
   return `Through ${through} it falls to ${below} in ${time}: measure that it has.`

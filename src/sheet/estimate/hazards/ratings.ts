@@ -1,6 +1,7 @@
-import { formatQuantity, unitOf } from '../../../core'
+import { unitOf } from '../../../core'
 import { nameOfElement } from '../../circuit/names'
 import type { Caution } from '../../evaluation'
+import { plainFigure } from '../../plain-figure'
 import type { Sheet } from '../../types'
 import { ABOVE, type Figures, LAST_WORD, sizeOf } from './figures'
 
@@ -12,7 +13,7 @@ export function ratingCautions(sheet: Sheet, figures: Figures): readonly Caution
       const size = sizeOf(sheet, figures, element[side])
       if (rating === undefined || size === undefined || size.value <= rating * ABOVE) return []
       const name = nameOfElement(sheet, element.id)
-      const rated = formatQuantity(rating, unitOf(side))
+      const rated = plainFigure(rating, unitOf(side))
       return [
         {
           about: element[side],

@@ -1,5 +1,6 @@
 import { formatNumber, formatQuantity } from '../../../core'
 import type { Caution } from '../../evaluation'
+import { plainFigure } from '../../plain-figure'
 import type { Sheet } from '../../types'
 import { type Figures, LAST_WORD } from './figures'
 
@@ -14,7 +15,7 @@ export function resonanceCautions(sheet: Sheet, { resonance }: Figures): readonl
   const apart = Math.abs(frequency - working)
   const isSharp = quality === undefined || quality >= 1
   if (apart > NEAR * working && !(isSharp && apart <= bandwidth / 2)) return []
-  const [at, works] = [formatQuantity(frequency, 'Hz'), formatQuantity(working, 'Hz')]
+  const [at, works] = [formatQuantity(frequency, 'Hz'), plainFigure(working, 'Hz')]
   const rise =
     quality === undefined
       ? 'nothing in its values holds voltages and currents down there'

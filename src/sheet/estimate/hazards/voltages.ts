@@ -1,6 +1,6 @@
-import { formatQuantity } from '../../../core'
 import { nameOfElement } from '../../circuit/names'
 import type { Caution } from '../../evaluation'
+import { plainFigure } from '../../plain-figure'
 import type { Sheet } from '../../types'
 import { ABOVE, type Figures, LAST_WORD, listed, sizeOf } from './figures'
 
@@ -26,7 +26,7 @@ export function touchCautions(sheet: Sheet, figures: Figures): readonly Caution[
   const more = above.length > 3 ? [...told, `${above.length - 3} more`] : told
   const whose =
     limit < TOUCH_LIMIT
-      ? `the ${formatQuantity(limit, 'V')} that this sheet sets for the place`
+      ? `the ${plainFigure(limit, 'V')} that this sheet sets for the place`
       : 'the 50 V ac up to which touch is usually taken for safe in dry places (IEC 61140, IEC 60364)'
   const verb = above.length === 1 ? 'is' : 'are'
   return [{ about: highest.id, text: `${listed(more)} ${verb} above ${whose}. ${LAST_WORD}` }]
