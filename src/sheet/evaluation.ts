@@ -84,6 +84,8 @@ export interface ElementEvaluation {
     readonly capacitance?: Estimate
     readonly reactance?: Estimate
   }
+  /** The impedance in Ω that its marks, or what else is predicted from, come to; left out where it is open. */
+  readonly predicted?: Limited
 }
 
 /**
@@ -202,6 +204,8 @@ export interface Evaluation {
   readonly elements?: readonly ElementEvaluation[]
   /** One a voltage and current of the circuit; left out on a sheet without a circuit. */
   readonly comparison?: readonly ComparisonEvaluation[]
+  /** The impedance of the circuit as a whole in Ω, as predicted; left out where it is open. */
+  readonly impedance?: Limited
   /** One an element of which both voltage and current are known; last the total. */
   readonly power?: readonly PowerEvaluation[]
   readonly resonance?: ResonanceEvaluation

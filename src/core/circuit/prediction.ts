@@ -28,6 +28,12 @@ export type PredictedTree =
 /** Which voltage or current of the circuit something is. */
 export type Place = Pick<Drive, 'path' | 'side'>
 
+/** Which voltage, current or impedance of the circuit is predicted. */
+export interface PredictedPlace {
+  readonly path: readonly number[]
+  readonly side: Place['side'] | 'impedance'
+}
+
 /** A circuit and the one value that is known of what flows in it. */
 export interface PredictionProblem {
   readonly circuit: PredictedTree
@@ -39,13 +45,16 @@ export interface PredictionProblem {
     readonly angle: number
     /** What makes the magnitude uncertain, in its unit. */
     readonly parts: readonly UncertaintyPart[]
+    /** What makes the angle uncertain, in degrees; it counts where there is no `reference`. */
+    readonly angleParts?: readonly UncertaintyPart[]
   }
   /** The place whose angle, in degrees, is given by definition. */
   readonly reference?: Place & { readonly angle: number }
 }
 
-/** A predicted voltage or current. */
-export interface Predicted extends Place {
+/** A predicted voltage, current or impedance. */
+export interface Predicted extends PredictedPlace {
+  /** V, A or Ω. */
   readonly value: Complex
   /** Expanded, coverage 95 %; left out where it cannot be propagated. */
   readonly magnitudeLimit?: number
@@ -53,8 +62,11 @@ export interface Predicted extends Place {
   readonly angleLimit?: number
 }
 
+/** With more tolerances than this the limits are left out: each needs the circuit solved twice. */
+const MOST_TOLERANCES = 400
+
 /**
- * Every voltage and current of a circuit, with limits from the tolerances of its elements, of the
+ * Every voltage, current and impedance of a circuit, with limits from the tolerances of its elements, of the
  * frequency and of what drives it. The tolerances are taken as independent and propagated to first
  * order: what each does is half the difference between the circuit with the value one standard
  * uncertainty up and the one with it as much down (JCGM 100:2008, 5.1.3, note 2). Fails in a sentence
@@ -64,8 +76,10 @@ export function predict(problem: PredictionProblem): Result<readonly Predicted[]
   const nominal = solve(problem)
   if (!nominal.ok) return nominal
   const places = placesOf(nominal.value)
-  const spreads = places.map(({ value }) => startSpread(value, problem))
-  for (const index of tolerancesOf(problem).keys()) {
+  const tolerances = tolerancesOf(problem)
+  if (tolerances.length > MOST_TOLERANCES) return success(places)
+  const spreads = places.map((place) => startSpread(place, problem))
+  for (const index of tolerances.keys()) {
     const [up, down] = [moved(problem, index, 1), moved(problem, index, -1)].map(solve)
     const [above, below] = [up, down].map((each) => (each?.ok ? placesOf(each.value) : []))
     // Where a value up or down opens a way or closes one, other places are known: nothing is linear.
@@ -83,11 +97,13 @@ interface Spread {
   isOpen: boolean
 }
 
-/** What drives the circuit moves all magnitudes alike, and no angle. */
-function startSpread(value: Complex, { drive }: PredictionProblem): Spread {
+/** What drives the circuit moves all voltages and currents alike, and no impedance. */
+function startSpread({ side, value }: Predicted, { drive, reference }: PredictionProblem): Spread {
+  if (side === 'impedance') return { magnitude: [], angle: [], isOpen: false }
   const share = drive.magnitude > 0 ? magnitudeOf(value) / drive.magnitude : 0
   const magnitude = drive.parts.map((part) => ({ ...part, uncertainty: part.uncertainty * share }))
-  return { magnitude, angle: [], isOpen: false }
+  const angle = reference === undefined ? [...(drive.angleParts ?? [])] : []
+  return { magnitude, angle, isOpen: false }
 }
 
 function widen(spread: Spread, up: Predicted | undefined, down: Predicted | undefined): void {
@@ -198,9 +214,9 @@ function turned(flow: Flow, factor: Complex): Flow {
 }
 
 function placesOf(flow: Flow, path: readonly number[] = []): readonly Predicted[] {
-  const own = (['voltage', 'current'] as const).flatMap((side) => {
+  const own = (['voltage', 'current', 'impedance'] as const).flatMap((side) => {
     const value = flow[side]
-    return value === undefined ? [] : [{ path, side, value }]
+    return value === undefined || value === 'open' ? [] : [{ path, side, value }]
   })
   return [...own, ...flow.branches.flatMap((branch, at) => placesOf(branch, [...path, at]))]
 }

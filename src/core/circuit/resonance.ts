@@ -57,6 +57,7 @@ function isNearer(one: number, other: number, to: number): boolean {
 }
 
 const POINTS_PER_DECADE = 120
+const MOST_POINTS = 4_800
 /** How far beyond what its coils and capacitors make together a circuit may resonate. */
 const BEYOND = 100
 
@@ -74,7 +75,8 @@ function gridOf(elements: readonly ElementValues[]): readonly number[] {
   const lowest = frequencyOf(sum(coils), sum(capacitors)) / BEYOND
   const highest = frequencyOf(least(coils), least(capacitors)) * BEYOND
   if (!(lowest > 0 && Number.isFinite(highest))) return []
-  const points = Math.ceil(Math.log10(highest / lowest) * POINTS_PER_DECADE)
+  const wanted = Math.ceil(Math.log10(highest / lowest) * POINTS_PER_DECADE)
+  const points = Math.min(wanted, MOST_POINTS)
   return Array.from({ length: points + 1 }, (_, at) => lowest * (highest / lowest) ** (at / points))
 }
 

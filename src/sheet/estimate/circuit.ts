@@ -10,7 +10,7 @@ import type { SheetProblem } from './sheet-problem'
 
 /** What the circuit of a sheet adds to its evaluation. */
 export interface CircuitAnswer {
-  readonly parts: Pick<Evaluation, 'comparison' | 'power' | 'resonance'>
+  readonly parts: Pick<Evaluation, 'elements' | 'comparison' | 'impedance' | 'power' | 'resonance'>
   readonly cautions: readonly Caution[]
 }
 
@@ -29,7 +29,12 @@ export function evaluateCircuit(
   const figures = { phasors, elements, comparison: comparison ?? [], power, resonance }
   return {
     parts: {
+      elements: elements.map((element) => {
+        const impedance = prediction?.impedances.get(element.id)
+        return impedance === undefined ? element : { ...element, predicted: impedance }
+      }),
       ...(comparison === undefined ? {} : { comparison }),
+      ...(prediction?.whole && { impedance: prediction.whole }),
       ...(power.length === 0 ? {} : { power }),
       ...(resonance === undefined ? {} : { resonance }),
     },

@@ -63,7 +63,9 @@ function verdictOf(
 }
 
 function gap(measured: number | undefined, predicted: number | undefined): number | undefined {
-  return measured === undefined || predicted === undefined ? undefined : measured - predicted
+  if (measured === undefined || predicted === undefined) return undefined
+  const difference = measured - predicted
+  return Number.isFinite(difference) ? difference : undefined
 }
 
 /** Both limits together: independent expanded uncertainties add up as squares. */
@@ -74,7 +76,8 @@ function together(
 ): number | undefined {
   if (difference === undefined || measured === undefined || predicted === undefined)
     return undefined
-  return Math.hypot(measured, predicted)
+  const both = Math.hypot(measured, predicted)
+  return Number.isFinite(both) ? both : undefined
 }
 
 function isWithin(

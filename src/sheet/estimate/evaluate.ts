@@ -50,7 +50,6 @@ export function evaluate(
       .filter(({ isChecked }) => isChecked)
       .map(({ reading, score }) => ({ reading, score }))
       .sort((a, b) => b.score - a.score),
-    elements,
     ...circuit.parts,
     cautions: [...cautionsOf(phasors, problem, solved), ...circuit.cautions],
   }

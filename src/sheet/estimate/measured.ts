@@ -2,6 +2,7 @@ import { fromPolar, magnitudeOf, radiansFromDegrees } from '../../core'
 import { expandedUncertainty, type UncertaintyPart } from '../../core/estimate'
 import type { Limited } from '../evaluation'
 import type { Phasor } from '../types'
+import { onlyFinite } from './finite'
 import type { PendingObservation } from './pending'
 import type { SheetProblem } from './sheet-problem'
 
@@ -35,14 +36,14 @@ export function measuredOf(phasor: Phasor, problem: SheetProblem): Measured {
 /** The same as a limited value. */
 export function toLimited({ magnitude, angle }: Measured): Limited {
   const known = magnitude && angle ? fromPolar(magnitude.value, angle.value) : undefined
-  return {
+  return onlyFinite({
     ...(magnitude && {
       magnitude: magnitude.value,
       magnitudeLimit: limitOfParts(magnitude.parts),
     }),
     ...(angle && { angle: angle.value, angleLimit: limitOfParts(angle.parts) }),
     ...(known && { real: known.re, imaginary: known.im }),
-  }
+  })
 }
 
 function limitOfParts(parts: readonly UncertaintyPart[]): number {

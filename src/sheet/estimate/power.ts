@@ -34,7 +34,8 @@ function powersOf(
 ): readonly PowerEvaluation[] {
   return elements.flatMap(({ id, voltage, current }) => {
     const [v, i] = [values.get(voltage), values.get(current)].map(complexOf)
-    return v && i ? [{ of: id, ...powerOf(v, i) }] : []
+    const power = v && i && powerOf(v, i)
+    return power && Number.isFinite(power.apparent) ? [{ of: id, ...power }] : []
   })
 }
 
@@ -49,6 +50,8 @@ function totalOf(sheet: Sheet, powers: readonly PowerEvaluation[]): readonly Pow
     : (sheet.elements ?? []).map(({ id }) => id)
   const parts = powers.filter(({ of }) => ids.includes(of))
   if (parts.length !== ids.length || ids.length === 0) return []
+  const total = totalPower(parts)
+  if (!Number.isFinite(total.apparent)) return []
   const isPredicted = powers.some(({ predicted }) => predicted === true)
-  return [{ of: 'total', ...totalPower(parts), ...(isPredicted ? { predicted: true } : {}) }]
+  return [{ of: 'total', ...total, ...(isPredicted ? { predicted: true } : {}) }]
 }

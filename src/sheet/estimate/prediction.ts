@@ -12,7 +12,8 @@ import { formOf, isGroup } from '../circuit/tree'
 import { predictingValue, valuesOfKind } from '../circuit/values'
 import { type Side, type WiredNode, wiredNodes, wiringOf } from '../circuit/wiring'
 import type { Limited } from '../evaluation'
-import type { CircuitElement, PhasorId, Sheet } from '../types'
+import type { CircuitElement, Id, PhasorId, Sheet } from '../types'
+import { onlyFinite } from './finite'
 import { measuredOf } from './measured'
 import type { SheetProblem } from './sheet-problem'
 
@@ -23,6 +24,10 @@ export interface Prediction {
   /** The phasor from which its angles count. */
   readonly origin: PhasorId
   readonly phasors: ReadonlyMap<PhasorId, Limited>
+  /** In Ω, by element; an open one is left out. */
+  readonly impedances: ReadonlyMap<Id, Limited>
+  /** Of the circuit as a whole, in Ω. */
+  readonly whole?: Limited
 }
 
 /** The place of a phasor in the circuit. */
@@ -60,6 +65,7 @@ export function predictionOf(sheet: Sheet, problem: SheetProblem): Result<Predic
     drive: drive.value.id,
     origin: origin?.id ?? drive.value.id,
     phasors: namedValues(placed, answer.value),
+    ...impedancesIn(wiring, answer.value),
   })
 }
 
@@ -134,7 +140,8 @@ function driveOf(sheet: Sheet, problem: SheetProblem, placed: readonly PlacedPha
     if (measured?.magnitude === undefined) continue
     const { value, parts } = measured.magnitude
     const angle = angleOf(place.id, problem)
-    return success({ ...place, magnitude: value, angle, parts: oneOf(parts) })
+    const angleParts = measured.angle?.parts ?? []
+    return success({ ...place, magnitude: value, angle, parts: oneOf(parts), angleParts })
   }
   const label = sheet.phasors.find(({ id }) => id === candidates[0]?.id)?.label
   return failure(
@@ -167,14 +174,31 @@ function namedValues(
   )
 }
 
+function impedancesIn(
+  wiring: WiredNode,
+  values: readonly Predicted[],
+): Pick<Prediction, 'impedances' | 'whole'> {
+  const byPath = new Map(
+    values
+      .filter(({ side }) => side === 'impedance')
+      .map((each) => [each.path.join(), limitedOf(each)]),
+  )
+  const impedances = [...wiredNodes(wiring)].flatMap(({ element, path }) => {
+    const impedance = byPath.get(path.join())
+    return element && impedance ? [[element.id, impedance] as const] : []
+  })
+  const whole = byPath.get('')
+  return { impedances: new Map(impedances), ...(whole && { whole }) }
+}
+
 function limitedOf({ value, magnitudeLimit, angleLimit }: Predicted): Limited {
   const { magnitude, angle } = toPolar(value)
-  return {
+  return onlyFinite({
     magnitude,
     ...(magnitude > 0 ? { angle } : {}),
     real: value.re,
     imaginary: value.im,
     ...(magnitudeLimit === undefined ? {} : { magnitudeLimit }),
     ...(magnitude > 0 && angleLimit !== undefined ? { angleLimit } : {}),
-  }
+  })
 }

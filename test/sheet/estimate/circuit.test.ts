@@ -1,6 +1,11 @@
+import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { foundBesideMark, type Sheet } from '../../../src/sheet'
-import { evaluate } from '../../../src/sheet/estimate'
+import { apply, foundBesideMark, partedFrom, quick, type Sheet } from '../../../src/sheet'
+import { evaluate, problemOfSheet } from '../../../src/sheet/estimate'
+import { evaluateCircuit } from '../../../src/sheet/estimate/circuit'
+import { anyEdit } from '../arbitrary-edit'
+import { anySheet } from '../arbitrary-sheet'
+import { unhurried } from '../laws'
 import { edited, MARKED, measuredJob, seriesJob } from './circuit-jobs'
 
 const LAST_WORD = 'Local rules and licensed practice have the last word.'
@@ -42,6 +47,16 @@ describe('before a job', () => {
       expect(predicted.magnitudeLimit).toBeGreaterThan(0)
       expect(predicted.angleLimit).toBeGreaterThanOrEqual(0)
     }
+  })
+
+  test('so is every impedance, and that of the whole', () => {
+    for (const { predicted } of evaluation.elements ?? []) {
+      expect(predicted?.magnitudeLimit).toBeGreaterThan(0)
+    }
+    const current = evaluation.comparison?.find(({ phasor }) => phasor === 'I')?.predicted
+    expect(evaluation.impedance?.magnitude).toBeCloseTo(48 / (current?.magnitude ?? 0), 9)
+    const resistor = evaluation.elements?.find(({ id }) => id === 'R')?.predicted
+    expect(resistor).toMatchObject({ real: 100, imaginary: 0, angle: 0 })
   })
 
   test('nothing is compared, since nothing was measured', () => {
@@ -194,6 +209,23 @@ describe('a value off by a prefix', () => {
     expect(current?.agrees).toBe(false)
     expect(current?.difference?.percent).toBeGreaterThan(10_000)
   })
+})
+
+test('any valid sheet has an answer, and no figure in it is not a number', unhurried, () => {
+  fc.assert(
+    fc.property(anySheet, fc.array(anyEdit, { maxLength: 6 }), (sheet, edits) => {
+      const changed = edits.reduce((before, editOf) => {
+        const edit = editOf(before)
+        const after = edit && apply(before, edit)
+        return after?.ok ? after.value : before
+      }, sheet)
+      const { phasors } = quick(changed)
+      const { parts } = evaluateCircuit(changed, phasors, [], problemOfSheet(changed))
+      expect(JSON.stringify(parts)).not.toMatch(/null/)
+      for (const sentence of partedFrom(changed)) expect(sentence).toMatch(/\.$/)
+    }),
+    { seed: 8, numRuns: 200 },
+  )
 })
 
 describe('cautions', () => {
