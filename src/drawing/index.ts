@@ -28,16 +28,11 @@ export type {
   TextItem,
   TextRun,
 } from './scene'
-export { schematicScene } from './schematic'
-export { describeCircuit } from './schematic/description'
-export { valueText } from './schematic/values'
 export { gapText, type StampWords, stampWordsOf } from './stamp/words'
 export { svg } from './svg/document'
-export { type ComparedPart, type ComparedRow, comparisonRows } from './text/comparison-text'
 export { digitsOfDrawn, formatDrawn, nameOfDrawn } from './text/hand-text'
 export { labelRuns } from './text/label-runs'
 export { digitsOfResult } from './text/phasor-text'
-export { type PowerRow, powerRows } from './text/power-text'
 export { formatScale } from './text/quantity-text'
 export {
   coarser,
@@ -47,11 +42,4 @@ export {
   type ReadingsByPhasor,
   readingsByPhasor,
 } from './text/resolution'
-export { resonanceText } from './text/resonance-text'
 export { type Palette, paletteOf, type Theme } from './theme'
-export {
-  type TriangleKind,
-  type TriangleSubject,
-  triangleScene,
-  triangleSubjects,
-} from './triangles'

@@ -1,4 +1,4 @@
-import { type ComparedPart, type ComparedRow, comparisonRows } from '../../drawing'
+import { type ComparedPart, type ComparedRow, comparisonRows } from '../../drawing/circuit'
 import { type Evaluation, type Sheet, type WiredNode, wiredNodes } from '../../sheet'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
 import { labelOf } from '../store'

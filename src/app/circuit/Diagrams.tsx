@@ -1,13 +1,11 @@
 import { useState } from 'react'
+import { type Scene, svg, type Theme } from '../../drawing'
 import {
-  type Scene,
   schematicScene,
-  svg,
-  type Theme,
   type TriangleSubject,
   triangleScene,
   triangleSubjects,
-} from '../../drawing'
+} from '../../drawing/circuit'
 import { type Evaluation, type Sheet, serializeSheet } from '../../sheet'
 import { useTheme } from '../board'
 import { download, fileNameOf } from '../export'

@@ -33,7 +33,7 @@ export function ElementRow(properties: {
     >
       <div className="element-head">
         <Cell
-          name={`Label of ${name}`}
+          name={`Name of ${name}`}
           column="element-label"
           shown={name}
           typed={element.label ?? ''}

@@ -1,4 +1,4 @@
-import { powerRows, resonanceText } from '../../drawing'
+import { powerRows, resonanceText } from '../../drawing/circuit'
 import type { Evaluation, Sheet } from '../../sheet'
 
 const COLUMNS: readonly (readonly ['active' | 'reactive' | 'apparent' | 'factor', string])[] = [

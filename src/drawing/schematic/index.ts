@@ -1,11 +1,9 @@
 import type { Sheet } from '../../sheet'
 import type { Box } from '../geometry'
-import { paperItem } from '../items/paper'
 import { createGround } from '../labels/ground'
 import { roomNear } from '../rooms'
-import type { Item, Scene } from '../scene'
-import { type Palette, paletteOf, type Theme } from '../theme'
-import { describeCircuit } from './description'
+import type { Item } from '../scene'
+import type { Palette } from '../theme'
 import { drawCircuit } from './drawn-circuit'
 import { moveItem } from './items'
 
@@ -21,8 +19,6 @@ export const NO_SCHEMATIC: Schematic = { items: [], boxes: [], isLeftOut: false 
 
 /** How large a schematic is tried, as shares of its full size: a crowded sheet takes a smaller one. */
 const SCALES = [1, 0.85, 0.7, 0.6]
-/** What stays free round a schematic that has a paper to itself, in millimetres. */
-const MARGIN = 3
 
 /**
  * The circuit of a sheet as a schematic, where the drawing leaves room; left out where it leaves none.
@@ -51,25 +47,4 @@ export function createSchematic(
     }
   }
   return { ...NO_SCHEMATIC, isLeftOut: true }
-}
-
-/** The circuit of a sheet on a paper of its own, just large enough; undefined without a circuit. */
-export function schematicScene(sheet: Sheet, theme: Theme): Scene | undefined {
-  const palette = paletteOf(theme)
-  const drawn = drawCircuit(sheet, palette)
-  if (drawn === undefined) return undefined
-  const { left, right, bottom, top } = drawn.box
-  const place = { x: MARGIN - left, y: MARGIN - bottom }
-  const size = { width: right - left + 2 * MARGIN, height: top - bottom + 2 * MARGIN }
-  return {
-    ...size,
-    items: [paperItem(size, palette), ...drawn.items.map((item) => moveItem(item, place))],
-    arrows: [],
-    origin: place,
-    unitsPerCentimetre: {},
-    starts: new Map(),
-    title: sheet.title,
-    description: `Circuit: ${describeCircuit(sheet)}.`,
-    labelsLeftOut: 0,
-  }
 }

@@ -7,9 +7,9 @@ import {
   type Item,
   layout,
   type Scene,
-  schematicScene,
   svg,
 } from '../../../src/drawing'
+import { schematicScene } from '../../../src/drawing/circuit'
 import { drawCircuit } from '../../../src/drawing/schematic/drawn-circuit'
 import { paletteOf } from '../../../src/drawing/theme'
 import { quick, type Sheet, serializeSheet } from '../../../src/sheet'

@@ -1,5 +1,5 @@
 import { type Complex, formatAngle, formatQuantity, magnitudeOf, toPolar } from '../../core'
-import type { TriangleKind } from './subjects'
+import type { TriangleKind } from './triangle-subjects'
 
 /** Digits of what a triangle shows. */
 const DIGITS = { digits: 4 } as const

@@ -10,8 +10,8 @@ import type { Item, PlacedArrow, Scene, TextRun } from '../scene'
 import { moveItem } from '../schematic/items'
 import { formatScale } from '../text/quantity-text'
 import { type Palette, paletteOf, type Theme } from '../theme'
-import type { TriangleKind, TriangleSubject } from './subjects'
-import { wordsOfTriangle } from './words'
+import type { TriangleKind, TriangleSubject } from './triangle-subjects'
+import { wordsOfTriangle } from './triangle-words'
 
 /** How large the triangle itself may be, in millimetres. */
 const ROOM = { width: 90, height: 60 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { comparisonRows, powerRows, resonanceText } from '../../../src/drawing'
+import { comparisonRows, powerRows, resonanceText } from '../../../src/drawing/circuit'
 import { type ComparisonEvaluation, type Evaluation, quick } from '../../../src/sheet'
 import { ballasted } from '../schematic/circuits'
 import { phasor } from '../sheets'

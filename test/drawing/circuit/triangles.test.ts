@@ -1,16 +1,12 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
+import { boundsOf, boundsOfAll, type Item, type Scene, svg } from '../../../src/drawing'
 import {
-  boundsOf,
-  boundsOfAll,
-  type Item,
-  type Scene,
-  svg,
   type TriangleKind,
   type TriangleSubject,
   triangleScene,
   triangleSubjects,
-} from '../../../src/drawing'
+} from '../../../src/drawing/circuit'
 import { quick, type Sheet } from '../../../src/sheet'
 import { ballasted } from '../schematic/circuits'
 import { phasor } from '../sheets'

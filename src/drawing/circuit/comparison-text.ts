@@ -1,6 +1,6 @@
 import { formatAngle, formatLimit, formatQuantity, unitOf } from '../../core'
 import type { ComparisonEvaluation, Evaluation, Id, Phasor, Sheet } from '../../sheet'
-import { type Digits, digitsOf, readingsByPhasor } from './resolution'
+import { type Digits, digitsOf, readingsByPhasor } from '../text/resolution'
 
 /** A part of a phasor, predicted beside measured, as it is printed; empty where there is nothing. */
 export interface ComparedPart {

@@ -1,2 +1,0 @@
-export { triangleScene } from './scene'
-export { type TriangleKind, type TriangleSubject, triangleSubjects } from './subjects'
