@@ -7,6 +7,7 @@ import { CircuitSettings } from './CircuitSettings'
 import './circuit.css'
 import { Comparison } from './Comparison'
 import { Diagrams } from './Diagrams'
+import { Impedances } from './Impedances'
 import { Powers } from './Powers'
 import { StartCircuit } from './StartCircuit'
 
@@ -37,6 +38,7 @@ function Built({ sheet }: { readonly sheet: Sheet }) {
       {!isEmpty && (
         <div data-former={answer.whole === undefined || undefined}>
           <Comparison sheet={sheet} evaluation={evaluation} wiring={wiring} />
+          <Impedances sheet={sheet} evaluation={evaluation} />
           <Powers sheet={sheet} evaluation={evaluation} />
           <Diagrams sheet={sheet} evaluation={evaluation ?? answer.evaluation} />
           <CircuitCautions sheet={sheet} wiring={wiring} evaluation={evaluation} />

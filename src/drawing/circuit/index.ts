@@ -4,6 +4,7 @@
  */
 export { schematicScene } from '../schematic/scene'
 export { type ComparedPart, type ComparedRow, comparisonRows } from './comparison-text'
+export { type ImpedanceRow, impedanceRows } from './impedance-text'
 export { type PowerRow, powerRows } from './power-text'
 export { resonanceText } from './resonance-text'
 export { triangleScene } from './triangle-scene'

@@ -1,5 +1,10 @@
 import { describe, expect, it } from 'vitest'
-import { comparisonRows, powerRows, resonanceText } from '../../../src/drawing/circuit'
+import {
+  comparisonRows,
+  impedanceRows,
+  powerRows,
+  resonanceText,
+} from '../../../src/drawing/circuit'
 import { type ComparisonEvaluation, type Evaluation, quick } from '../../../src/sheet'
 import { ballasted } from '../schematic/circuits'
 import { phasor } from '../sheets'
@@ -81,6 +86,29 @@ describe('the comparison in words', () => {
 
   it('has no rows where nothing is predicted', () => {
     expect(comparisonRows(sheet, quick(sheet))).toEqual([])
+  })
+})
+
+describe('impedances in words', () => {
+  it('stand predicted beside found, of each element and of the whole', () => {
+    const elements = [
+      {
+        id: 'L1',
+        impedance: { magnitude: 47.75, angle: 80.25, real: 8.09, imaginary: 47.06 },
+        predicted: { magnitude: 47.832, angle: 80.13, magnitudeLimit: 2.21, angleLimit: 0.79 },
+      },
+      { id: 'C1' },
+    ]
+    const impedance = { magnitude: 203.5, angle: -74.3 }
+    expect(impedanceRows(sheet, evaluated({ elements, impedance }))).toEqual([
+      {
+        of: 'L1',
+        name: 'Main winding',
+        predicted: ['47.8 Ω ± 2.2 Ω', '80.13° ± 0.79°'],
+        found: ['47.75 Ω', '80.3°'],
+      },
+      { of: 'total', name: 'Total', predicted: ['203.5 Ω', '−74.3°'], found: [] },
+    ])
   })
 })
 
