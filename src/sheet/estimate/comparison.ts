@@ -5,6 +5,10 @@ import { measuredOf, toLimited } from './measured'
 import type { Prediction } from './prediction'
 import type { SheetProblem } from './sheet-problem'
 
+/** What differs by no more than this share, or by so many degrees, differs by a rounding. */
+const ROUNDING = 1e-12
+const ROUNDING_DEGREES = 1e-10
+
 /**
  * The voltages and currents of the circuit in the sheet's order, predicted beside measured. The magnitude
  * that drives the prediction, and the angle from which its angles count, are not compared: they could
@@ -47,9 +51,11 @@ function verdictOf(
   const percent = size === undefined ? Number.NaN : (size / (predicted.magnitude ?? 0)) * 100
   const allowed = together(size, measured.magnitudeLimit, predicted.magnitudeLimit)
   const allowedAngle = together(turn, measured.angleLimit, predicted.angleLimit)
-  const verdicts = [isWithin(size, allowed), isWithin(turn, allowedAngle)].filter(
-    (verdict) => verdict !== undefined,
-  )
+  const rounding = ROUNDING * (predicted.magnitude ?? 0)
+  const verdicts = [
+    isWithin(size, allowed, rounding),
+    isWithin(turn, allowedAngle, ROUNDING_DEGREES),
+  ].filter((verdict) => verdict !== undefined)
   return {
     difference: {
       ...(size === undefined ? {} : { magnitude: size }),
@@ -83,7 +89,8 @@ function together(
 function isWithin(
   difference: number | undefined,
   allowed: number | undefined,
+  rounding: number,
 ): boolean | undefined {
   if (difference === undefined || allowed === undefined) return undefined
-  return Math.abs(difference) <= allowed
+  return Math.abs(difference) <= allowed + rounding
 }

@@ -1,6 +1,13 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { apply, foundBesideMark, partedFrom, quick, type Sheet } from '../../../src/sheet'
+import {
+  apply,
+  foundBesideMark,
+  partedFrom,
+  quick,
+  type Sheet,
+  type Typed,
+} from '../../../src/sheet'
 import { evaluate, problemOfSheet } from '../../../src/sheet/estimate'
 import { evaluateCircuit } from '../../../src/sheet/estimate/circuit'
 import { anyEdit } from '../arbitrary-edit'
@@ -144,6 +151,35 @@ describe('a job in order', () => {
       expect(each?.agrees).toBe(true)
       expect(Math.abs(each?.difference?.magnitude ?? 9)).toBeLessThan(each?.allowed ?? 0)
     }
+  })
+
+  test('agrees with itself where all is exact', () => {
+    const exact = supplied(seriesJob())
+    const certain = (typed: Typed) => ({ ...typed, limit: 0 })
+    const sure = {
+      ...exact,
+      phasors: exact.phasors.map((each) =>
+        each.magnitude ? { ...each, magnitude: certain(each.magnitude) } : each,
+      ),
+      elements: (exact.elements ?? []).map((each) => ({
+        ...each,
+        marked: Object.fromEntries(
+          Object.entries(each.marked ?? {}).map(([value, typed]) => [value, certain(typed)]),
+        ),
+      })),
+    }
+    const expected = new Map(
+      evaluate(sure).comparison?.map(({ phasor, predicted }) => [phasor, predicted]),
+    )
+    const typed = {
+      ...sure,
+      phasors: sure.phasors.map((each) => ({
+        ...each,
+        magnitude: { value: expected.get(each.id)?.magnitude ?? 0, limit: 0 },
+      })),
+    }
+    const verdicts = evaluate(typed).comparison?.map(({ agrees }) => agrees)
+    expect(verdicts).toEqual([undefined, true, true, true, true])
   })
 
   test('allows both limits together', () => {

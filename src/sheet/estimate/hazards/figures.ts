@@ -35,8 +35,7 @@ export function sizeOf(sheet: Sheet, figures: Figures, id: PhasorId): Size | und
   if (phasor === undefined || Math.max(known, expected) < 0) return undefined
   const isKnown = known >= expected
   const value = isKnown ? known : expected
-  const limit = isKnown ? best?.magnitudeLimit : predicted?.magnitudeLimit
-  const figure = formatQuantity(value, unitOf(phasor.quantity), limit ? { limit } : { digits: 3 })
+  const figure = formatQuantity(value, unitOf(phasor.quantity), { digits: 3 })
   const word = isKnown ? (best?.asRead.magnitude === undefined ? ' (solved)' : '') : ' (predicted)'
   return { id, label: phasor.label, value, text: `${figure}${word}` }
 }
