@@ -94,7 +94,7 @@ test(
     fc.assert(
       fc.property(
         fc.constantFrom('series' as const, 'parallel' as const),
-        fc.array(builds, { maxLength: 30 }),
+        fc.array(builds, { minLength: 10, maxLength: 40, size: 'max' }),
         (form, makes) => {
           let sheet = emptySheet()
           const edits = [(): Edit => ({ kind: 'start-circuit', form }), ...makes]
