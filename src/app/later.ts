@@ -3,5 +3,9 @@
  * imported at need elsewhere is named here too.
  */
 export async function fetchLater(): Promise<void> {
-  await Promise.allSettled([import('papaparse'), import('./share/qr-code')])
+  await Promise.allSettled([
+    import('papaparse'),
+    import('./share/qr-code'),
+    import('./circuit/Circuit'),
+  ])
 }

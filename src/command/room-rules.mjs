@@ -15,7 +15,7 @@ const rooms = {
 }
 
 /** The doors of a room: its index, and that of a part whose library stays out of the first load. */
-const doorOf = (/** @type {string} */ room) => `^src/${room}/(estimate/)?index\\.ts$`
+const doorOf = (/** @type {string} */ room) => `^src/${room}/((estimate|circuit)/)?index\\.ts$`
 
 /** Where the program begins: whatever no path from here reaches is left over. */
 const beginnings =

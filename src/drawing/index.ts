@@ -28,6 +28,7 @@ export type {
   TextItem,
   TextRun,
 } from './scene'
+export { describeCircuit } from './schematic/description'
 export { gapText, type StampWords, stampWordsOf } from './stamp/words'
 export { svg } from './svg/document'
 export { digitsOfDrawn, formatDrawn, nameOfDrawn } from './text/hand-text'

@@ -1,4 +1,4 @@
-import type { Evaluation, Id, Sheet } from '../sheet'
+import type { ComparisonEvaluation, Evaluation, Id, Sheet } from '../sheet'
 import { drawingAreaOf } from './area'
 import { type Box, boxOfPoints, joinBoxes, NO_BOX } from './geometry'
 import { shownArrows } from './hand/arrows'
@@ -17,7 +17,11 @@ import { createOpenDrawing, NOTHING_OPEN, scalesWithOpen } from './open'
 import { frameOf, paperSizeOf } from './paper'
 import { createPicture, type Picture } from './picture'
 import { type Frozen, type Placement, place } from './placement/place'
+import { predictedItems } from './predicted/items'
+import { NO_PREDICTION, placeBoth } from './predicted/place-both'
+import { predictedWishes } from './predicted/wishes'
 import type { Item, PlacedArrow, Scene } from './scene'
+import { createSchematic, NO_SCHEMATIC } from './schematic'
 import { createStamp, NO_STAMP } from './stamp'
 import { describeDrawing } from './text/description'
 import { type Palette, paletteOf, type Theme } from './theme'
@@ -43,6 +47,8 @@ export interface LayoutOptions {
   readonly hidden?: ReadonlySet<Id>
   /** The terminals of each phasor stand in its subscript (IEC 60375), where it has any. */
   readonly terminals?: boolean
+  /** Leaves out what the circuit predicts, which is else drawn in thin broken lines under what was measured. */
+  readonly withoutPrediction?: boolean
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
 }
@@ -57,7 +63,17 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
   const palette = paletteOf(theme)
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
-  const placed = place(sheet, evaluation, drawingAreaOf(sheet, frame), frozen, within)
+  const area = drawingAreaOf(sheet, frame)
+  const { placement: placed, predicted } =
+    only || within
+      ? { placement: place(sheet, evaluation, area, frozen, within), predicted: NO_PREDICTION }
+      : placeBoth(
+          sheet,
+          evaluation,
+          comparedIn(evaluation, options),
+          { area, frame, hidden },
+          frozen,
+        )
   const placement = {
     ...placed,
     unitsPerCentimetre: only
@@ -78,7 +94,12 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     const lines = constructionItems(sheet, evaluation, placement.arrows, construction, palette)
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
   }
+  items.push(...predictedItems(predicted.arrows, palette))
   addDrawing(items, picture, palette, only)
+  const schematic =
+    only || !labels ? NO_SCHEMATIC : createSchematic(sheet, { items, frame, fences }, palette)
+  items.push(...schematic.items)
+  fences.push(...schematic.boxes)
   const stamp = only
     ? NO_STAMP
     : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
@@ -92,6 +113,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
           frame,
           [...fences, ...stamp.boxes],
           palette,
+          predictedWishes(sheet, predicted, palette),
         )
       : { items: [], leftOut: 0 }
   items.push(...open.labels, ...labelling.items)
@@ -103,7 +125,17 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     description: only ? '' : describeDrawing(sheet, evaluation, placement.unitsPerCentimetre),
     labelsLeftOut: labelling.leftOut + open.leftOut,
     ...(stamp.isLeftOut && { isStampLeftOut: true }),
+    ...(predicted.leftOut > 0 && { predictedLeftOut: predicted.leftOut }),
+    ...(schematic.isLeftOut && { isSchematicLeftOut: true }),
   }
+}
+
+/** What the circuit predicts: of the evaluation, or as long as it has none yet, of the one before. */
+function comparedIn(
+  { comparison }: Evaluation,
+  { withoutPrediction, former }: LayoutOptions,
+): readonly ComparisonEvaluation[] {
+  return withoutPrediction ? [] : (comparison ?? former?.comparison ?? [])
 }
 
 /** Adds the paper and all that frames the drawing; gives the boxes that labels keep out of. */

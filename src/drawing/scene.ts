@@ -26,6 +26,8 @@ interface ItemCommon {
     | 'scale-bar'
     | 'title-block'
     | 'stamp'
+    | 'schematic'
+    | 'predicted'
   /** The key of the placed arrow that it belongs to. */
   readonly arrow?: string
 }
@@ -117,4 +119,8 @@ export interface Scene {
   readonly labelsLeftOut: number
   /** Set where there is a verdict and no room for its stamp. */
   readonly isStampLeftOut?: true
+  /** How many predicted arrows reach beyond the frame, and are not drawn; left out where none does. */
+  readonly predictedLeftOut?: number
+  /** Set where there is a circuit and no room for its schematic. */
+  readonly isSchematicLeftOut?: true
 }

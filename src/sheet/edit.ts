@@ -1,5 +1,6 @@
 import { failure, type Result, success } from '../core'
 import { toCanonical } from './canonical'
+import { type AddElement, addElement } from './edits/add-element'
 import {
   type AddChannel,
   addChannel,
@@ -20,6 +21,7 @@ import {
 } from './edits/details'
 import { type DragTip, dragTip } from './edits/drag-tip'
 import type { EditKind } from './edits/edit-kind'
+import { type GroupBranches, groupBranches } from './edits/group-branches'
 import {
   type ClearHand,
   clearHand,
@@ -55,11 +57,26 @@ import {
   type SetReading,
   setReading,
 } from './edits/readings'
+import {
+  type RemoveCircuit,
+  type RemoveElement,
+  removeCircuit,
+  removeElement,
+} from './edits/remove-element'
 import { type RemovePhasor, removePhasor } from './edits/remove-phasor'
 import { type ReversePhasor, reversePhasor } from './edits/reverse-phasor'
+import {
+  type CountElement,
+  countElement,
+  type SetElement,
+  type SetElementValue,
+  setElement,
+  setElementValue,
+} from './edits/set-element'
 import { type SetKnown, setKnown } from './edits/set-known'
 import { type SetPhasor, setPhasor } from './edits/set-phasor'
 import { type SetValue, setValue } from './edits/set-value'
+import { type StartCircuit, startCircuit } from './edits/start-circuit'
 import {
   type AddSum,
   addSum,
@@ -111,6 +128,14 @@ interface EditByKind {
   readonly 'set-hand-arrow': SetHandArrow
   readonly 'remove-hand-arrow': RemoveHandArrow
   readonly 'clear-hand': ClearHand
+  readonly 'start-circuit': StartCircuit
+  readonly 'remove-circuit': RemoveCircuit
+  readonly 'add-element': AddElement
+  readonly 'group-branches': GroupBranches
+  readonly 'remove-element': RemoveElement
+  readonly 'set-element': SetElement
+  readonly 'set-element-value': SetElementValue
+  readonly 'count-element': CountElement
   readonly choose: Choose
   readonly several: Several
 }
@@ -169,6 +194,14 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'set-hand-arrow': setHandArrow,
   'remove-hand-arrow': removeHandArrow,
   'clear-hand': clearHand,
+  'start-circuit': startCircuit,
+  'remove-circuit': removeCircuit,
+  'add-element': addElement,
+  'group-branches': groupBranches,
+  'remove-element': removeElement,
+  'set-element': setElement,
+  'set-element-value': setElementValue,
+  'count-element': countElement,
   choose,
   several,
 }

@@ -84,6 +84,73 @@ export interface ElementEvaluation {
     readonly capacitance?: Estimate
     readonly reactance?: Estimate
   }
+  /** The impedance in Ω that its marks, or what else is predicted from, come to; left out where it is open. */
+  readonly predicted?: Limited
+}
+
+/**
+ * A value with its expanded uncertainties, coverage 95 %; what is open is left out: the angle of what
+ * is nothing, a limit that no propagation gives.
+ */
+export interface Limited {
+  readonly magnitude?: number
+  readonly angle?: number
+  readonly real?: number
+  readonly imaginary?: number
+  readonly magnitudeLimit?: number
+  /** Degrees. */
+  readonly angleLimit?: number
+}
+
+/**
+ * A voltage or current that the circuit predicts, beside what was typed or read of it. Differences are
+ * measured − predicted. `allowed` and `allowedAngle` are both limits together, as the root of the sum of
+ * their squares; `agrees` where every part that was measured lies within its own. The magnitude that
+ * drives the prediction says nothing of it, and has no verdict.
+ */
+export interface ComparisonEvaluation {
+  readonly phasor: Id
+  readonly predicted: Limited
+  readonly measured?: Limited
+  readonly difference?: {
+    /** Of the magnitudes, in the phasor's unit. */
+    readonly magnitude?: number
+    /** Of the predicted magnitude; left out where that is nothing. */
+    readonly percent?: number
+    /** Degrees in (−180°, 180°]. */
+    readonly angle?: number
+  }
+  readonly allowed?: number
+  /** Degrees. */
+  readonly allowedAngle?: number
+  readonly agrees?: boolean
+}
+
+/**
+ * Power by V · I* of the best values, of an element or of all of the circuit. Active power is in W and
+ * negative where it is given back; reactive in var, positive where the current lags; apparent in VA. The
+ * factor is active / apparent, and left out, like the sense, where there is no power.
+ */
+export interface PowerEvaluation {
+  readonly of: Id | 'total'
+  readonly active: number
+  readonly reactive: number
+  readonly apparent: number
+  readonly factor?: number
+  /** What the current does to the voltage. */
+  readonly sense?: 'leads' | 'lags' | 'in phase'
+  /** Set where it is of predicted values, as before a job, when best ones are open. */
+  readonly predicted?: true
+}
+
+/**
+ * Where the circuit as a whole is purely resistive: the frequency in Hz, the quality factor there and
+ * the bandwidth in Hz. The last two are left out where nothing takes up power.
+ */
+export interface ResonanceEvaluation {
+  readonly frequency: number
+  readonly quality?: number
+  readonly bandwidth?: number
 }
 
 /** Something that whoever reads the answer should know. */
@@ -135,6 +202,13 @@ export interface Evaluation {
   /** Readings by how far they are from the others, in standard deviations, largest first. */
   readonly suspects?: readonly { readonly reading: Id; readonly score: number }[]
   readonly elements?: readonly ElementEvaluation[]
+  /** One a voltage and current of the circuit; left out on a sheet without a circuit. */
+  readonly comparison?: readonly ComparisonEvaluation[]
+  /** The impedance of the circuit as a whole in Ω, as predicted; left out where it is open. */
+  readonly impedance?: Limited
+  /** One an element of which both voltage and current are known; last the total. */
+  readonly power?: readonly PowerEvaluation[]
+  readonly resonance?: ResonanceEvaluation
   readonly cautions?: readonly Caution[]
   readonly hand: readonly HandEvaluation[]
 }

@@ -1,5 +1,36 @@
 export { asAdjusted, asAlternative, withFormerValues } from './adjusted'
 export { type AssumedLimits, assumedOf } from './assumed'
+export { type FoundValue, type FoundVerdict, foundBesideMark } from './circuit/found'
+export { nameOfElement } from './circuit/names'
+export { partedFrom } from './circuit/parted'
+export {
+  branchesOf,
+  type CircuitGroup,
+  type CircuitPath,
+  type Form,
+  formOf,
+  isGroup,
+  nodeAt,
+  pathOf,
+} from './circuit/tree'
+export {
+  formatElementLimit,
+  formatElementValue,
+  parseElementValue,
+} from './circuit/value-text'
+export {
+  countedValue,
+  countsInCheck,
+  type ElementValue,
+  hasValue,
+  type MarkedValue,
+  markedValue,
+  nameOfElementValue,
+  predictingValue,
+  unitOfElementValue,
+  valuesOfKind,
+} from './circuit/values'
+export { type WiredNode, wiredAt, wiredNodes, wiringOf } from './circuit/wiring'
 export { serializeSheet } from './codec-file'
 export { parseLink, serializeLink } from './codec-link'
 export { parseShown as parseShownValue } from './digits'

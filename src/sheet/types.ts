@@ -345,6 +345,13 @@ export interface Sheet {
   }[]
   readonly hand?: readonly HandArrow[]
   readonly drawing?: Drawing
+  /** What the cautions go by beside the usual limits. */
+  readonly safety?: {
+    /** V rms: the touch voltage above which a caution is due, where it is lower than 50 V, as in wet places. */
+    readonly voltageLimit?: number
+    /** Ω: the resistor through which capacitors are to be discharged. */
+    readonly dischargeResistance?: number
+  }
   readonly report?: {
     readonly hazards?: readonly Hazard[]
     readonly criterion?: string

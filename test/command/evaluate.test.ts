@@ -4,7 +4,7 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { exampleSheet, serializeSheet } from '../../src/sheet'
+import { emptySheet, exampleSheet, type Sheet, serializeSheet } from '../../src/sheet'
 import { evaluate } from '../../src/sheet/estimate'
 
 const project = fileURLToPath(new URL('../..', import.meta.url))
@@ -18,6 +18,7 @@ beforeAll(() => {
   const text = serializeSheet(exampleSheet)
   const line = JSON.stringify(exampleSheet)
   write('sheet.json', text)
+  write('circuit.json', serializeSheet(circuit))
   write('deep/Ünïcode name.json', `\ufeff${text}`)
   write('drawing.svg', `<?xml version="1.0"?><svg><metadata><![CDATA[${text}]]></metadata></svg>`)
   write('bare.svg', '<svg/>')
@@ -48,6 +49,45 @@ function run(...files: readonly string[]) {
 }
 
 const example = evaluate(exampleSheet)
+const circuit: Sheet = {
+  ...emptySheet(),
+  frequency: { value: 50 },
+  supply: 'VS',
+  phasors: [
+    { id: 'VS', label: 'VS', quantity: 'voltage', magnitude: { value: 24, limit: 0.1 } },
+    { id: 'I', label: 'I', quantity: 'current' },
+    { id: 'VR', label: 'VR', quantity: 'voltage' },
+    { id: 'Vcoil', label: 'Vcoil', quantity: 'voltage' },
+    { id: 'VC', label: 'VC', quantity: 'voltage' },
+  ],
+  sums: [
+    { id: 's1', terms: [{ phasor: 'VR' }, { phasor: 'Vcoil' }, { phasor: 'VC' }], equals: 'VS' },
+  ],
+  elements: [
+    {
+      id: 'R',
+      kind: 'resistor',
+      voltage: 'VR',
+      current: 'I',
+      marked: { resistance: { value: 9 } },
+    },
+    {
+      id: 'coil',
+      kind: 'coil',
+      voltage: 'Vcoil',
+      current: 'I',
+      marked: { resistance: { value: 3 }, inductance: { value: 0.02 } },
+    },
+    {
+      id: 'C',
+      kind: 'capacitor',
+      voltage: 'VC',
+      current: 'I',
+      marked: { capacitance: { value: 470e-6 } },
+    },
+  ],
+  circuit: { series: [{ element: 'R' }, { element: 'coil' }, { element: 'C' }] },
+}
 
 test(
   'sheets are evaluated in order, from files and from drawings, as the page evaluates them',
@@ -57,12 +97,19 @@ test(
       'drawing.svg',
       'deep/Ünïcode name.json',
       join(folder, 'sheet.json'),
+      'circuit.json',
     )
     expect(lines).toEqual([
       { file: 'drawing.svg', ...example },
       { file: 'deep/Ünïcode name.json', ...example },
       { file: join(folder, 'sheet.json'), ...example },
+      { file: 'circuit.json', ...evaluate(circuit) },
     ])
+    expect(lines[3]).toMatchObject({
+      comparison: [{ phasor: 'VS' }, {}, {}, {}, {}],
+      power: [{ of: 'R' }, { of: 'coil' }, { of: 'C' }, { of: 'total' }],
+      resonance: { frequency: expect.closeTo(51.9, 1) },
+    })
     expect(complaint).toBe('')
     expect(status).toBe(0)
   },

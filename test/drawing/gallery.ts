@@ -1,11 +1,22 @@
 import type { LayoutOptions } from '../../src/drawing'
 import type { Sheet } from '../../src/sheet'
+import { ballasted } from './schematic/circuits'
 import { fan, phasor, sheetOf, sum } from './sheets'
 
 /** A sheet of the gallery, and how it is laid out. */
 export interface Exhibit {
   readonly sheet: Sheet
   readonly options?: LayoutOptions
+}
+
+/** A circuit with a group inside it, measured in part. */
+const circuit: Sheet = {
+  ...ballasted,
+  phasors: ballasted.phasors.map((each) => {
+    if (each.id === 'VS') return { ...phasor('VS', '230', '29'), label: 'VS' }
+    if (each.id === 'VR') return { ...phasor('VR', '61', '0'), label: 'VR' }
+    return each.id === 'Vm' ? { ...phasor('Vm', '188', '38'), label: 'Vmotor' } : each
+  }),
 }
 
 const feeder = sheetOf(
@@ -136,6 +147,7 @@ export const gallery: { readonly [name: string]: Exhibit } = {
   star: { sheet: star },
   quantities: { sheet: quantities },
   two: { sheet: two },
+  circuit: { sheet: circuit },
   forty: { sheet: forty },
   awkward: { sheet: { ...awkward, drawing: { paper: 'Letter' } } },
   empty: { sheet: sheetOf([], { title: '' }) },

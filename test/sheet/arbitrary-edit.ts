@@ -1,5 +1,16 @@
 import fc from 'fast-check'
-import { type Edit, newId, type Phasor, type Reading, type Sheet, type Sum } from '../../src/sheet'
+import {
+  type CircuitElement,
+  type CircuitPath,
+  type Edit,
+  newId,
+  type Phasor,
+  type Reading,
+  type Sheet,
+  type Sum,
+  wiredNodes,
+  wiringOf,
+} from '../../src/sheet'
 import {
   anyNumber,
   notNegative,
@@ -191,5 +202,93 @@ const drawn: fc.Arbitrary<EditOf> = fc.oneof(
   ),
 )
 
+type OnElement = (element: CircuitElement, sheet: Sheet) => Edit | undefined
+
+const onElement =
+  (make: OnElement) =>
+  (at: number): EditOf =>
+  (sheet) => {
+    const element = pick(sheet.elements, at)
+    return element && make(element, sheet)
+  }
+
+/** The path of some node of the circuit; that of the whole where there is none. */
+function pathIn(sheet: Sheet, at: number): CircuitPath {
+  const wiring = wiringOf(sheet)
+  return (wiring && pick([...wiredNodes(wiring)], at)?.path) ?? []
+}
+
+const form = fc.constantFrom('series' as const, 'parallel' as const)
+const elementKind = fc.constantFrom(
+  'resistor' as const,
+  'coil' as const,
+  'capacitor' as const,
+  'impedance' as const,
+)
+const elementValue = fc.constantFrom(
+  'resistance' as const,
+  'inductance' as const,
+  'capacitance' as const,
+  'reactance' as const,
+  'dcResistance' as const,
+)
+
+const circuits: fc.Arbitrary<EditOf> = fc.oneof(
+  form.map(
+    (joined): EditOf =>
+      () => ({ kind: 'start-circuit', form: joined }),
+  ),
+  fc.constant<EditOf>(() => ({ kind: 'remove-circuit' })),
+  fc.record({ at: which, joined: form, of: elementKind, name: fc.option(label), own: which }).map(
+    ({ at, joined, of, name, own }): EditOf =>
+      (sheet) => {
+        const phasor = own % 3 === 0 ? pick(sheet.phasors, own)?.id : undefined
+        return {
+          kind: 'add-element',
+          element: { kind: of, ...(name === null ? {} : { label: name }) },
+          at: pathIn(sheet, at),
+          form: joined,
+          ...(phasor === undefined ? {} : { own: phasor }),
+        }
+      },
+  ),
+  fc.tuple(which, fc.nat({ max: 2 }), fc.integer({ min: 2, max: 3 })).map(
+    ([at, from, count]): EditOf =>
+      (sheet) => {
+        const wiring = wiringOf(sheet)
+        const groups =
+          wiring && [...wiredNodes(wiring)].filter(({ branches }) => branches.length > 1)
+        const group = pick(groups, at)
+        return group && { kind: 'group-branches', at: group.path, from: from % 2, count }
+      },
+  ),
+  which.map(onElement(({ id }) => ({ kind: 'remove-element', id }))),
+  fc.tuple(which, label, notNegative).map(([at, name, current]) =>
+    onElement(({ id }) => ({
+      kind: 'set-element',
+      id,
+      change: { label: name, rating: { current } },
+    }))(at),
+  ),
+  fc.tuple(which, elementValue, typedNotNegative, fc.boolean()).map(([at, value, figure, clears]) =>
+    onElement(({ id }) => ({
+      kind: 'set-element-value',
+      id,
+      value,
+      typed: clears ? null : figure,
+    }))(at),
+  ),
+  fc
+    .tuple(which, fc.boolean())
+    .map(([at, counts]) => onElement(({ id }) => ({ kind: 'count-element', id, counts }))(at)),
+)
+
 /** Any edit of any kind but `several` and `add-rows`, which are made of others. */
-export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, drawn, others)
+export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(
+  values,
+  phasors,
+  sums,
+  drawn,
+  circuits,
+  others,
+)

@@ -34,6 +34,10 @@ const head = fc.record(
       { requiredKeys: [] },
     ),
     drift: notNegative,
+    safety: fc.record(
+      { voltageLimit: notNegative, dischargeResistance: notNegative },
+      { requiredKeys: [] },
+    ),
     drawing: parts.drawing,
     report: fc
       .tuple(texts('criterion', 'conclusion'), fc.array(parts.hazard, { maxLength: 2 }))

@@ -71,21 +71,28 @@ test('random edits are often made, and of every kind', unhurried, () => {
     }
   }
   expect([...made].sort()).toEqual([
+    'add-element',
     'add-phasor',
     'add-reading',
     'add-sum',
     'clear-hand',
+    'count-element',
     'drag-tip',
     'duplicate-phasor',
+    'group-branches',
     'move-phasor',
     'move-sum',
     'place-phasor',
+    'remove-circuit',
+    'remove-element',
     'remove-hand-arrow',
     'remove-phasor',
     'remove-reading',
     'remove-sum',
     'set-details',
     'set-drawing',
+    'set-element',
+    'set-element-value',
     'set-hand-arrow',
     'set-job',
     'set-known',
@@ -93,6 +100,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
     'set-reading',
     'set-sum',
     'set-value',
+    'start-circuit',
   ])
 })
 

@@ -36,6 +36,10 @@ export function BoardVerbs(properties: {
         </p>
       )}
       {isAdjusted && <p className="board-remark">Drawn as adjusted</p>}
+      {scene.isSchematicLeftOut && <p className="board-remark">Circuit left out: no free place</p>}
+      {scene.predictedLeftOut !== undefined && (
+        <p className="board-remark">Part of the prediction lies beyond the paper</p>
+      )}
       {scene.isStampLeftOut && <p className="board-remark">Stamp left out: no free place</p>}
       {isOff && <p className="board-remark">The drawing reaches beyond its frame</p>}
       {/* What a hand drew is true to the scale that it was drawn at. */}

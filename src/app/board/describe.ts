@@ -1,5 +1,5 @@
 import { formatPolar, unitOf } from '../../core'
-import { formatScale, type Scene } from '../../drawing'
+import { describeCircuit, formatScale, type Scene } from '../../drawing'
 import type { Evaluation, Quantity, Sheet } from '../../sheet'
 
 /** The picture in words, for those who do not see it: every phasor with its value, and the scale. */
@@ -14,5 +14,7 @@ export function describeBoard(sheet: Sheet, evaluation: Evaluation, scene: Scene
   const scales = Object.entries(scene.unitsPerCentimetre).map(([quantity, scale]) =>
     formatScale(scale, quantity as Quantity),
   )
-  return `${phasors.join('; ')}. Scale: ${scales.join(', ')}.`
+  const drawn = `${phasors.join('; ')}. Scale: ${scales.join(', ')}.`
+  const circuit = describeCircuit(sheet)
+  return circuit === '' ? drawn : `${drawn} Circuit: ${circuit}.`
 }

@@ -29,6 +29,8 @@ export interface ViewOptions {
   readonly values?: State['values']
   /** The terminals of each phasor stand in its subscript. */
   readonly terminals?: boolean
+  /** What the circuit predicts is left out. */
+  readonly withoutPrediction?: boolean
 }
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
@@ -44,9 +46,9 @@ export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}
 /** The whole scene of an answer; laid out once for each view. */
 export function sceneOfAnswer(answer: Answer, theme: Theme, options: ViewOptions): Scene {
   const { values = 'read', ...view } = options
-  const { hidden = [], terminals = false, construction = {} } = view
+  const { hidden = [], terminals = false, construction = {}, withoutPrediction = false } = view
   const { parallels = false, arcs = false } = construction
-  const name = [theme, values, terminals, parallels, arcs, ...hidden].join(' ')
+  const name = [theme, values, terminals, parallels, arcs, withoutPrediction, ...hidden].join(' ')
   const own = scenes.get(answer) ?? new Map<string, Scene>()
   scenes.set(answer, own)
   const known = own.get(name)

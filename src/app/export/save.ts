@@ -53,9 +53,11 @@ export async function copyPicture(store: Store): Promise<void> {
 
 /** What of the view stands in what is saved: the terminals, and the construction lines on request. */
 function viewToSave(store: Store): ViewOptions {
-  const { areTerminalsShown, isConstructionSaved, construction } = store.getState().pen
+  const { areTerminalsShown, isConstructionSaved, construction, isPredictionHidden } =
+    store.getState().pen
   return {
     terminals: areTerminalsShown,
+    withoutPrediction: isPredictionHidden,
     ...(isConstructionSaved && { construction }),
   }
 }

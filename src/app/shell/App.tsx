@@ -2,6 +2,7 @@ import { Suspense } from 'react'
 import { AnswerPanel } from '../answer'
 import { Board } from '../board'
 import { CheckLine } from '../check'
+import { Circuit } from '../circuit'
 import { DrawingSettings, TitleBlock } from '../details'
 import { HandPanel } from '../hand'
 import { CopyBanner, KeepNotes } from '../keep'
@@ -33,6 +34,7 @@ export function App() {
         <HandPanel />
         <Suspense>
           <Readings />
+          <Circuit />
         </Suspense>
         <AnswerPanel />
         <section aria-label="Sheet">

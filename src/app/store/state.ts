@@ -59,6 +59,8 @@ export interface Pen {
   readonly isConstructionSaved: boolean
   /** The terminals of each phasor stand in its subscript: its positive direction, from first to last. */
   readonly areTerminalsShown: boolean
+  /** What the circuit predicts is not drawn. */
+  readonly isPredictionHidden: boolean
 }
 
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */

@@ -9,6 +9,8 @@ import type { Ground } from './place-labels'
 const CLEAR = 0.7
 /** An arc is taken as chords of at most so many degrees. */
 const CHORD_DEGREES = 8
+/** What is drawn: all but the sheet itself, and what is fenced in as a whole. */
+const DRAWN: ReadonlySet<Item['part']> = new Set(['arrow', 'gap', 'angle', 'predicted'])
 /** What stays free inside the frame. */
 const INSIDE_FRAME = 1
 
@@ -31,7 +33,7 @@ export function createGround(items: readonly Item[], frame: Box, fences: readonl
 }
 
 function takeItem(occupancy: Occupancy, item: Item): void {
-  if (item.part !== 'arrow' && item.part !== 'gap' && item.part !== 'angle') return
+  if (!DRAWN.has(item.part)) return
   switch (item.kind) {
     case 'lines':
       takeStrokes(occupancy, item.segments, (item.width ?? 0) / 2 + CLEAR)

@@ -6,6 +6,7 @@ import { createGround } from './ground'
 import { labelItems } from './items'
 import { placeLabels } from './place-labels'
 import type { Register } from './register'
+import type { Wish } from './wish'
 import { wishesOf } from './wishes'
 
 /**
@@ -14,6 +15,7 @@ import { wishesOf } from './wishes'
  *
  * @param items What is drawn so far.
  * @param fences Boxes that labels and leaders keep out of.
+ * @param others Labels of what is no part of the picture: they come last.
  */
 export function createLabels(
   items: readonly Item[],
@@ -22,8 +24,9 @@ export function createLabels(
   frame: Box,
   fences: readonly Box[],
   palette: Palette,
+  others: readonly Wish[] = [],
 ): { readonly items: readonly Item[]; readonly leftOut: number } {
-  const wishes = wishesOf(picture, register, frame, palette)
+  const wishes = [...wishesOf(picture, register, frame, palette), ...others]
   if (wishes.length === 0) return { items: [], leftOut: 0 }
   const placed = placeLabels(wishes, createGround(items, frame, fences))
   return { items: labelItems(placed, palette), leftOut: wishes.length - placed.length }

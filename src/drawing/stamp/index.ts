@@ -1,10 +1,10 @@
 import type { Evaluation, Sheet } from '../../sheet'
 import type { Box } from '../geometry'
 import { createGround } from '../labels/ground'
+import { roomNear } from '../rooms'
 import type { Item } from '../scene'
 import type { Palette } from '../theme'
 import { sizeOfStamp, stampItems } from './items'
-import { roomForStamp } from './rooms'
 import { stampWordsOf } from './words'
 
 /** A stamp as it stands on the sheet, and the boxes that labels keep out of. */
@@ -39,7 +39,7 @@ export function createStamp(
   if (words === undefined) return NO_STAMP
   const { occupancy, region } = createGround(items, frame, fences)
   for (const scale of SCALES) {
-    const room = roomForStamp(occupancy, region, sizeOfStamp(words, scale))
+    const room = roomNear('right', occupancy, region, sizeOfStamp(words, scale))
     if (room) {
       const stamped = stampItems(words, room, scale, palette, isFormer)
       return { items: stamped, boxes: [room], isLeftOut: false }

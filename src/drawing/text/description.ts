@@ -1,5 +1,6 @@
 import { formatAngle, formatQuantity, unitOf } from '../../core'
 import type { Evaluation, Sheet, Sum, UnitsPerCentimetre } from '../../sheet'
+import { describeCircuit } from '../schematic/description'
 import { QUANTITIES } from './quantities'
 import { formatScale } from './quantity-text'
 
@@ -16,7 +17,8 @@ export function describeDrawing(
   const sums = (sheet.sums ?? []).flatMap((sum) => describeSum(sheet, evaluation, sum) ?? [])
   const scale =
     scales.length === 0 ? 'Nothing is drawn yet.' : `Drawn to scale, ${scales.join(', ')}.`
-  return [scale, ...sums].join(' ')
+  const circuit = describeCircuit(sheet)
+  return [scale, ...sums, ...(circuit === '' ? [] : [`Circuit: ${circuit}.`])].join(' ')
 }
 
 function describeSum(sheet: Sheet, evaluation: Evaluation, sum: Sum): string | undefined {

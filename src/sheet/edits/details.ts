@@ -13,6 +13,7 @@ export interface SetDetails {
   readonly supply?: string | null
   readonly drift?: number | null
   readonly assumed?: NonNullable<Sheet['assumed']> | null
+  readonly safety?: NonNullable<Sheet['safety']> | null
 }
 
 /** Changes some fields of the title block; null takes a field away. */

@@ -3,7 +3,7 @@ import type { Id, Sheet } from '../types'
 import { type Change, withChange } from './change'
 
 /** The lists that edits add to, take from and reorder. */
-export type ListName = 'phasors' | 'readings' | 'instruments' | 'channels' | 'sums'
+export type ListName = 'phasors' | 'readings' | 'instruments' | 'channels' | 'sums' | 'elements'
 
 type Entry<Name extends ListName> = NonNullable<Sheet[Name]>[number]
 
@@ -13,6 +13,7 @@ const NAMES: { readonly [name in ListName]: string } = {
   instruments: 'instrument',
   channels: 'channel',
   sums: 'sum',
+  elements: 'element',
 }
 
 /** The sheet with another list; an empty one is left out, but for that of the phasors. */

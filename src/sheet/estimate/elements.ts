@@ -1,8 +1,8 @@
 import { isFiniteComplex, toPolar } from '../../core'
 import type { Drawing, Found } from '../../core/estimate'
+import { type MarkedValue, valuesOfKind } from '../circuit/values'
 import type { ElementEvaluation, Estimate, PolarValue } from '../evaluation'
 import type { CircuitElement } from '../types'
-import { type ElementValue, valuesOfKind } from './observe-typed'
 import type { SheetProblem } from './sheet-problem'
 import type { SolvedSheet } from './solved-sheet'
 
@@ -16,7 +16,7 @@ function impedanceOf(drawing: Drawing, element: number): PolarValue | undefined 
 }
 
 /** A capacitor has a resistance only where one was stated. */
-function valuesOf(element: CircuitElement): readonly ElementValue[] {
+function valuesOf(element: CircuitElement): readonly MarkedValue[] {
   const values = valuesOfKind(element.kind)
   const isLossless = element.kind === 'capacitor' && element.resistance === undefined
   return isLossless ? values.filter((value) => value !== 'resistance') : values

@@ -6,6 +6,7 @@ import type { Sheet } from '../types'
 import { agreementOf, outcomesOf } from './agreement'
 import { alternativesOf } from './alternatives'
 import { cautionsOf } from './cautions'
+import { evaluateCircuit } from './circuit'
 import { evaluateElements } from './elements'
 import { evaluatePhasor } from './phasors'
 import { problemOfSheet } from './sheet-problem'
@@ -34,6 +35,8 @@ export function evaluate(
   const sums = evaluateSums(sheet, phasors, problem, solved)
   const mixed = new Map(phasors.map((phasor) => [phasor.id, asReadElseBest(phasor)]))
   const outcomes = outcomesOf(problem, solved)
+  const elements = evaluateElements(problem, solved)
+  const circuit = evaluateCircuit(sheet, phasors, elements, problem)
   return {
     phasors,
     alternatives: alternativesOf(problem, solved),
@@ -47,7 +50,7 @@ export function evaluate(
       .filter(({ isChecked }) => isChecked)
       .map(({ reading, score }) => ({ reading, score }))
       .sort((a, b) => b.score - a.score),
-    elements: evaluateElements(problem, solved),
-    cautions: cautionsOf(phasors, problem, solved),
+    ...circuit.parts,
+    cautions: [...cautionsOf(phasors, problem, solved), ...circuit.cautions],
   }
 }

@@ -1,5 +1,6 @@
 import { magnitudeOf, type Typed } from '../../core'
 import { assumedOf } from '../assumed'
+import { countedValue, valuesOfKind } from '../circuit/values'
 import { withinLimit } from '../readings/limit-part'
 import type { CircuitElement, Phasor } from '../types'
 import type { Names } from './names'
@@ -76,28 +77,6 @@ export function observePhasor(
   return observations
 }
 
-/** The values of an element that its kind has, in the words of both the sheet and the estimator. */
-const VALUES_OF_KIND = {
-  resistor: ['resistance'],
-  coil: ['resistance', 'inductance'],
-  capacitor: ['capacitance', 'resistance'],
-  impedance: ['resistance', 'reactance'],
-} as const
-
-/** A value that an element may have. */
-export type ElementValue = 'resistance' | 'inductance' | 'capacitance' | 'reactance'
-
-/** Which values an element of this kind has. */
-export function valuesOfKind(kind: CircuitElement['kind']): readonly ElementValue[] {
-  return VALUES_OF_KIND[kind]
-}
-
-/** A value of an element as it was typed, outside its nameplate. */
-function typedValue(element: CircuitElement, name: ElementValue): Typed | undefined {
-  const values: { readonly [value in ElementValue]?: Typed } = element
-  return values[name]
-}
-
 /** What was typed of an element's values; what its nameplate says is no observation. */
 export function observeElement(
   element: CircuitElement,
@@ -106,7 +85,7 @@ export function observeElement(
   const place = names.element.get(element.id) ?? 0
   const { elementPercent } = assumedOf(names.sheet)
   return valuesOfKind(element.kind).flatMap((name) => {
-    const typed = typedValue(element, name)
+    const typed = countedValue(element, name)
     const needsFrequency = name === 'inductance' || name === 'capacitance'
     if (typed === undefined || (needsFrequency && !names.sheet.frequency?.value)) return []
     if (name === 'capacitance' && typed.value === 0) return []

@@ -92,6 +92,7 @@ export const sheetSchema: v.GenericSchema<unknown, Omit<Sheet, ListName | 'circu
   chosen: maybeList,
   hand: maybeList,
   drawing: v.exactOptional(drawingSchema),
+  safety: v.exactOptional(fields({ voltageLimit: maybeLimit, dischargeResistance: maybeLimit })),
   report: v.exactOptional(
     fields({
       hazards: v.exactOptional(list(hazardSchema)),

@@ -45,7 +45,7 @@ describe('the verdict', () => {
   })
 
   test('is that there are not enough readings where something is open', () => {
-    const readings = [reads('V', 100, 1), reads('V1', 60, 1)]
+    const readings = [reads('V', 40, 1), reads('V1', 24, 1)]
     const evaluation = evaluated(sheetWith({ ...triangle, readings }))
     expect(evaluation.agreement?.verdict).toBe('not-enough')
     const { magnitudeState, angleState, magnitude, angle } = found(evaluation, 'V2')
