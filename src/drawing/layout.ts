@@ -9,6 +9,7 @@ import { addArrow } from './items/arrows'
 import { axisItem } from './items/axis'
 import { gapItem } from './items/gaps'
 import { frameItem, gridItems, paperItem } from './items/paper'
+import { createRegions, NO_REGIONS } from './items/regions'
 import { createScaleBars } from './items/scale-bars'
 import { createTitleBlock } from './items/title-block'
 import { createLabels } from './labels'
@@ -43,6 +44,8 @@ export interface LayoutOptions {
   readonly hidden?: ReadonlySet<Id>
   /** The terminals of each phasor stand in its subscript (IEC 60375), where it has any. */
   readonly terminals?: boolean
+  /** The evaluation whose 95 % regions are drawn at the tips; none where nothing is said. */
+  readonly regions?: Evaluation
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
 }
@@ -73,7 +76,14 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     ? NOTHING_OPEN
     : createOpenDrawing(sheet, evaluation, placement, { frame, edges, hasLabels: labels }, palette)
   items.push(...open.arcs)
-  const fences = [...edges, ...open.boxes]
+  const regions =
+    only || options.regions === undefined
+      ? NO_REGIONS
+      : createRegions(placement.arrows, options.regions, placement.unitsPerCentimetre, frame, {
+          palette,
+          isFormer: evaluation.agreement === undefined,
+        })
+  const fences = [...edges, ...open.boxes, ...regions.boxes]
   if (construction) {
     const lines = constructionItems(sheet, evaluation, placement.arrows, construction, palette)
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
@@ -94,7 +104,8 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
           palette,
         )
       : { items: [], leftOut: 0 }
-  items.push(...open.labels, ...labelling.items)
+  // Labels lie on the regions and take no notice of them: none moves when they are asked for.
+  items.push(...regions.items, ...open.labels, ...labelling.items)
   return {
     ...size,
     ...placement,

@@ -3,6 +3,7 @@ import { shownAnswer, usePage } from '../store'
 import { Alternatives } from './Alternatives'
 import './answer.css'
 import { ReadingMoves } from './ReadingMoves'
+import { RegionsSwitch } from './RegionsSwitch'
 import { uncheckedNames } from './text'
 import { ValuesSwitch } from './ValuesSwitch'
 
@@ -37,6 +38,7 @@ export function AnswerPanel() {
             </p>
           )}
           <ValuesSwitch />
+          <RegionsSwitch />
           <Cautions cautions={evaluation.cautions ?? []} />
           <ReadingMoves sheet={sheet} evaluation={evaluation} />
           {unchecked.length > 0 && (

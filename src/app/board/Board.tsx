@@ -57,9 +57,10 @@ export function Board() {
       hidden,
       construction: pen.construction,
       terminals: pen.areTerminalsShown,
+      areRegionsShown: pen.areRegionsShown,
       values,
     }),
-    [hidden, pen.construction, pen.areTerminalsShown, values],
+    [hidden, pen.construction, pen.areTerminalsShown, pen.areRegionsShown, values],
   )
   const scene = useMemo(
     () => base ?? sceneOfAnswer(answer, theme, viewOptions),

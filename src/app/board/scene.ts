@@ -29,6 +29,8 @@ export interface ViewOptions {
   readonly values?: State['values']
   /** The terminals of each phasor stand in its subscript. */
   readonly terminals?: boolean
+  /** The 95 % regions of the best values are drawn at the tips. */
+  readonly areRegionsShown?: boolean
 }
 
 /** Whether an item belongs to the empty sheet, on which the arrows lie. */
@@ -43,17 +45,23 @@ export function drawnScene(sheet: Sheet, theme: Theme, options: ViewOptions = {}
 
 /** The whole scene of an answer; laid out once for each view. */
 export function sceneOfAnswer(answer: Answer, theme: Theme, options: ViewOptions): Scene {
-  const { values = 'read', ...view } = options
+  const { values = 'read', areRegionsShown = false, ...view } = options
   const { hidden = [], terminals = false, construction = {} } = view
   const { parallels = false, arcs = false } = construction
-  const name = [theme, values, terminals, parallels, arcs, ...hidden].join(' ')
+  const name = [theme, values, areRegionsShown, terminals, parallels, arcs, ...hidden].join(' ')
   const own = scenes.get(answer) ?? new Map<string, Scene>()
   scenes.set(answer, own)
   const known = own.get(name)
   if (known) return known
-  const { sheet, former } = answer
+  const { sheet, whole, former } = answer
+  const regions = areRegionsShown ? (whole ?? former) : undefined
   const evaluation = evaluationShown(answer, values)
-  const scene = layout(sheet, evaluation, { theme, ...view, ...(former && { former }) })
+  const scene = layout(sheet, evaluation, {
+    theme,
+    ...view,
+    ...(former && { former }),
+    ...(regions && { regions }),
+  })
   own.set(name, scene)
   return scene
 }

@@ -59,6 +59,8 @@ export interface Pen {
   readonly isConstructionSaved: boolean
   /** The terminals of each phasor stand in its subscript: its positive direction, from first to last. */
   readonly areTerminalsShown: boolean
+  /** The 95 % regions of the best values are drawn at the tips. */
+  readonly areRegionsShown: boolean
 }
 
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */

@@ -208,6 +208,7 @@ const restingPen: Pen = {
   construction: {},
   isConstructionSaved: false,
   areTerminalsShown: false,
+  areRegionsShown: false,
 }
 
 function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history'] {

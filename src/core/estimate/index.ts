@@ -47,4 +47,5 @@ export type {
 } from './phasor-problem'
 export { type Equations, type LeastSquaresProblem, NO_EQUATIONS } from './problem'
 export { createRandom, normalDeviate, type Random, rectangularDeviate } from './random'
+export { regionOf, type TipRegion } from './region'
 export { type ProblemPart, splitProblem } from './split'
