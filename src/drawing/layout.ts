@@ -89,9 +89,11 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
   }
   addDrawing(items, picture, palette, only)
-  const stamp = only
-    ? NO_STAMP
-    : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
+  // Its figures would tell what is hidden.
+  const stamp =
+    only || hidden?.size
+      ? NO_STAMP
+      : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
   items.push(...stamp.items)
   const labelling =
     labels && !only

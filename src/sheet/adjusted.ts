@@ -25,6 +25,23 @@ export function asAdjusted(sheet: Sheet, evaluation: Evaluation): Evaluation {
   )
 }
 
+/**
+ * The adjusted diagram until a new answer comes: best values of an older answer where it has them, what
+ * is known at once of the rest.
+ */
+export function asFormerlyAdjusted(
+  sheet: Sheet,
+  quick: Evaluation,
+  former: Evaluation,
+): Evaluation {
+  const before = new Map(former.phasors.map((phasor) => [phasor.id, phasor]))
+  const phasors = quick.phasors.map((phasor) => {
+    const best = before.get(phasor.id)
+    return best?.real === undefined ? phasor : best
+  })
+  return asAdjusted(sheet, { ...quick, phasors })
+}
+
 /** The evaluation as another drawing that the readings allow would have it. */
 export function asAlternative(
   sheet: Sheet,

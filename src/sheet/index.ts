@@ -1,4 +1,4 @@
-export { asAdjusted, asAlternative, withFormerValues } from './adjusted'
+export { asAdjusted, asAlternative, asFormerlyAdjusted, withFormerValues } from './adjusted'
 export { type AssumedLimits, assumedOf } from './assumed'
 export { serializeSheet } from './codec-file'
 export { parseLink, serializeLink } from './codec-link'

@@ -1,5 +1,5 @@
 import { stampWordsOf } from '../../drawing'
-import { shownAnswer, usePage } from '../store'
+import { hiddenSums, shownAnswer, usePage } from '../store'
 import { Alternatives } from './Alternatives'
 import './answer.css'
 import { ReadingMoves } from './ReadingMoves'
@@ -11,6 +11,8 @@ import { ValuesSwitch } from './ValuesSwitch'
 export function AnswerPanel() {
   const { sheet, whole, former } = usePage(shownAnswer)
   const progress = usePage((state) => state.progress)
+  const isHidden =
+    usePage(({ history, pen, chosenSum }) => hiddenSums(history.sheet, pen, chosenSum)).size > 0
   const evaluation = whole ?? former
   if (evaluation === undefined && progress.state !== 'failed' && progress.state !== 'slow') {
     return null
@@ -30,7 +32,12 @@ export function AnswerPanel() {
           {progress.text}
         </p>
       )}
-      {evaluation && (
+      {isHidden && (
+        <p className="unchecked">
+          Hidden until the last arrow is drawn by hand, or until you ask for what is calculated.
+        </p>
+      )}
+      {evaluation && !isHidden && (
         <div data-former={whole === undefined || undefined}>
           {words && (
             <p className="verdict" data-verdict={words.verdict}>

@@ -2,10 +2,11 @@ import { drawnScene } from '../board'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
 import {
   checkedSum,
+  formerPhasors,
   hiddenSums,
   nameOfSum,
   quantityOfSum,
-  shownEvaluation,
+  shownAnswer,
   shownSheet,
   usePage,
   usePageStore,
@@ -16,7 +17,7 @@ import { checkText } from './text'
 export function CheckLine() {
   const store = usePageStore()
   const sheet = usePage(shownSheet)
-  const evaluation = usePage(shownEvaluation)
+  const answer = usePage(shownAnswer)
   const kept = usePage((state) => state.history.sheet)
   const chosen = usePage((state) => state.chosenSum)
   const pen = usePage((state) => state.pen)
@@ -36,7 +37,12 @@ export function CheckLine() {
   // A drag keeps the scale of the drawing that it began on.
   const scale = drawnScene(kept, 'light').unitsPerCentimetre[quantityOfSum(sheet, sum)]
   const isHidden = hiddenSums(kept, pen, sum.id).has(sum.id)
-  const text = checkText(sheet, evaluation, sum, scale, isHidden)
+  const { evaluation, whole, former } = answer
+  const before =
+    whole === undefined && former
+      ? { evaluation: former, phasors: formerPhasors(answer) }
+      : undefined
+  const text = checkText(sheet, evaluation, sum, scale, isHidden, before)
   return (
     <section className="check" aria-label="Check" data-hand={text.figures.length > 4 || undefined}>
       <div>
@@ -61,8 +67,8 @@ export function CheckLine() {
         </p>
         <p className="under">{text.scale}</p>
       </div>
-      {text.figures.map(({ name, figure, under }) => (
-        <dl key={name}>
+      {text.figures.map(({ name, figure, under, isFormer }) => (
+        <dl key={name} data-former={isFormer}>
           <dt>{name}</dt>
           <dd className="figure">{figure}</dd>
           <dd className="under">{under}</dd>

@@ -30,9 +30,9 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
   const value = (
     part: 'magnitude' | 'angle' | 'real' | 'imaginary',
     caption: string,
-    cell: CellText,
+    { solved, ...cell }: CellText,
   ) => (
-    <td data-caption={caption} data-area={part}>
+    <td data-caption={caption} data-area={part} data-former={(solved && former) || undefined}>
       <Cell
         name={`${caption} of ${name}`}
         column={part}

@@ -17,6 +17,8 @@ export interface CellText {
   readonly typed: string
   /** Worked out from other cells, or assumed. */
   readonly derived: boolean
+  /** Nobody gave it: it was solved. */
+  readonly solved?: boolean
 }
 
 /** How a phasor's values came to be known, in the schedule's words. */
@@ -75,7 +77,9 @@ function magnitudeCell(
     formatQuantity(size, unit, digits.magnitude),
   )
   const typed = typedText(readings, phasor.magnitude)
-  return typed === undefined ? derived(shown) : { shown, typed, derived: false }
+  return typed === undefined
+    ? derived(shown, evaluation.magnitudeState === 'solved')
+    : { shown, typed, derived: false }
 }
 
 function angleCell({ phasor, evaluation, digits }: Row, readings: readonly Reading[]): CellText {
@@ -83,7 +87,9 @@ function angleCell({ phasor, evaluation, digits }: Row, readings: readonly Readi
   const direct = readings.filter(({ kind }) => kind === 'angle')
   const isWorkedOut = readings.length > direct.length
   const typed = isWorkedOut ? undefined : typedText(direct, phasor.angle)
-  return typed === undefined ? derived(shown) : { shown, typed, derived: false }
+  return typed === undefined
+    ? derived(shown, evaluation.angleState === 'solved')
+    : { shown, typed, derived: false }
 }
 
 /** Whether a reading of this kind says something of its phasor's angle, shown as degrees or not. */
@@ -106,11 +112,13 @@ function rectangularCell(
   }
   return derived(
     printed(evaluation[part], (value) => formatQuantity(value, unit, digits.magnitude)),
+    evaluation.magnitudeState === 'solved' || evaluation.angleState === 'solved',
   )
 }
 
-function derived(shown: string): CellText {
-  return shown === '' ? nothing : { shown, typed: shown, derived: true }
+function derived(shown: string, solved: boolean): CellText {
+  if (shown === '') return nothing
+  return { shown, typed: shown, derived: true, ...(solved && { solved }) }
 }
 
 function printed(value: number | undefined, print: (value: number) => string): string {
