@@ -20,6 +20,7 @@ export function CheckLine() {
   const answer = usePage(shownAnswer)
   const kept = usePage((state) => state.history.sheet)
   const chosen = usePage((state) => state.chosenSum)
+  const hasFailed = usePage(({ progress }) => progress.state === 'failed')
   const pen = usePage((state) => state.pen)
   const sum = checkedSum(sheet, chosen)
   if (!sum) {
@@ -39,7 +40,7 @@ export function CheckLine() {
   const isHidden = hiddenSums(kept, pen, sum.id).has(sum.id)
   const { evaluation, whole, former } = answer
   const before =
-    whole === undefined && former
+    whole === undefined && !hasFailed
       ? { evaluation: former, phasors: formerPhasors(answer) }
       : undefined
   const text = checkText(sheet, evaluation, sum, scale, isHidden, before)

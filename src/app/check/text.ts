@@ -22,7 +22,8 @@ export interface CheckText {
 
 /** What is shown of the sheet before until the whole answer comes. */
 export interface Former {
-  readonly evaluation: Evaluation
+  /** Undefined where no sheet before was worked out either. */
+  readonly evaluation: Evaluation | undefined
   /** The phasors that are shown with a value of it. */
   readonly phasors: ReadonlySet<Id>
 }
@@ -79,7 +80,7 @@ export function checkText(
     unit: unitOf(quantity),
     ...digitsOfSum(sheet, sum),
     perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
-    isJudged: (evaluation.agreement ?? former?.evaluation.agreement) !== undefined,
+    isJudged: (evaluation.agreement ?? former?.evaluation?.agreement) !== undefined,
   }
   const seen = sum.equals === 0 ? [] : [measured(context)]
   const hangs = sum.terms.some(({ phasor }) => former?.phasors.has(phasor))
@@ -223,11 +224,18 @@ function allowance({ found: { closingError, closes }, unit }: Context): readonly
   ]
 }
 
-/** The allowance of the sheet before, in the place of the one that is to come. */
+/** In the place of the allowance that is to come, so that nothing moves then: that of the sheet before. */
 function formerAllowance(context: Context, former: Former | undefined): readonly CheckFigure[] {
-  const found = former?.evaluation.sums.find(({ id }) => id === context.sum.id)
-  if (found === undefined || context.found.closingError === undefined) return []
-  return allowance({ ...context, found }).map((figure) => ({ ...figure, isFormer: true }))
+  if (former === undefined || context.found.closingError === undefined) return []
+  const found = former.evaluation?.sums.find(({ id }) => id === context.sum.id)
+  const before = found ? allowance({ ...context, found }) : []
+  return (before.length > 0 ? before : [AWAITED]).map((figure) => ({ ...figure, isFormer: true }))
+}
+
+const AWAITED: CheckFigure = {
+  name: 'Gap allowed',
+  figure: '–',
+  under: 'The limits are being worked out.',
 }
 
 /** The digits of a sum: the finest that any of its terms, or what it must equal, was given with. */

@@ -102,7 +102,18 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
         <KnownChoice id={phasor.id} name={name} known={text.known} />
         {best && (
           <p className="best" data-former={former || undefined}>
-            {best.state}
+            {best.marks.length === 1 ? (
+              best.state
+            ) : (
+              <>
+                <span className="visually-hidden">{best.state}</span>
+                {best.marks.map((mark) => (
+                  <span key={mark} aria-hidden="true">
+                    {mark}
+                  </span>
+                ))}
+              </>
+            )}
           </p>
         )}
       </td>

@@ -186,6 +186,8 @@ export interface BestText {
   readonly values: readonly string[]
   /** How each part came to be: `magnitude adjusted, angle solved`. */
   readonly state: string
+  /** The same in the few letters that the column has room for: `adjusted`, `∠ solved`. */
+  readonly marks: readonly string[]
 }
 
 /** What was worked out of a phasor; undefined where nothing was. */
@@ -205,7 +207,9 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
     magnitudeState === angleState
       ? magnitudeState
       : `magnitude ${magnitudeState}, angle ${angleState}`
-  return { values, state }
+  const marks =
+    magnitudeState === angleState ? [magnitudeState] : [magnitudeState, `∠ ${angleState}`]
+  return { values, state, marks }
 }
 
 /** A limit below this share of a size is rounding: the value is exact. */

@@ -91,6 +91,9 @@ describe('the check line', () => {
       'Gap allowed',
     ])
     expect(sure.filter(({ isFormer }) => isFormer)).toEqual([])
+    const nothing = { evaluation: undefined, phasors: new Set<string>() }
+    const awaited = checkText(sheet, quick(sheet), first, 5, false, nothing).figures
+    expect(awaited.at(-1)).toMatchObject({ name: 'Gap allowed', figure: '–', isFormer: true })
     const solved = { evaluation: whole, phasors: new Set(['V2']) }
     const hanging = checkText(sheet, quick(sheet), first, 5, false, solved).figures
     expect(hanging.filter(({ isFormer }) => !isFormer).map(({ name }) => name)).toEqual([
