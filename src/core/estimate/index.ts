@@ -33,6 +33,7 @@ export {
   type QuantitySpread,
   uncertaintyOf,
 } from './linearisation'
+export { type Missing, type MissingReadings, missingReadings } from './missing'
 export type {
   ClosedSum,
   ElementIndex,
