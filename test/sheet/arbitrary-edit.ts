@@ -161,6 +161,15 @@ const others: fc.Arbitrary<EditOf> = fc.oneof(
   ),
 )
 
+const chosen: fc.Arbitrary<EditOf> = fc.oneof(
+  fc
+    .tuple(which, notNegative, anyNumber)
+    .map(([at, magnitude, angle]) =>
+      onPhasor(({ id }) => ({ kind: 'choose', chosen: [{ phasor: id, magnitude, angle }] }))(at),
+    ),
+  fc.constant<EditOf>(() => ({ kind: 'choose', chosen: [] })),
+)
+
 const drawn: fc.Arbitrary<EditOf> = fc.oneof(
   fc.tuple(which, fc.boolean(), place, place).map(([at, closes, from, to]) =>
     onPhasor(({ id }, sheet) => {
@@ -192,4 +201,4 @@ const drawn: fc.Arbitrary<EditOf> = fc.oneof(
 )
 
 /** Any edit of any kind but `several` and `add-rows`, which are made of others. */
-export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, drawn, others)
+export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(values, phasors, sums, chosen, drawn, others)
