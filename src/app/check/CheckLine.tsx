@@ -45,7 +45,12 @@ export function CheckLine() {
       : undefined
   const text = checkText(sheet, evaluation, sum, scale, isHidden, before)
   return (
-    <section className="check" aria-label="Check" data-hand={text.figures.length > 4 || undefined}>
+    <section
+      className="check"
+      aria-label="Check"
+      data-hand={text.figures.length > 4 || undefined}
+      data-judged={sum.equals !== undefined || undefined}
+    >
       <div>
         <p className="name">{text.drawn}</p>
         <p className="figure">
