@@ -84,14 +84,21 @@ test('eight sound readings are typed, and the sheet is stamped: they agree', asy
   const shown = Number.parseFloat(best.replace(/^.*?: /, ''))
   expect(Math.abs(shown - (found?.magnitude ?? Number.NaN))).toBeLessThan(0.06)
 
+  await panel(page)
+    .getByRole('checkbox', { name: /95 % region at each tip/ })
+    .check()
   const text = await savedSvg(page)
   expect(text).toContain('>READINGS AGREE<')
+  expect(text).toContain('Ellipses: 95 % regions')
   expect(text).toMatch(/>gap [\d.]+ V of [\d.]+ V allowed · 2 checks</)
 
   await panel(page).getByRole('radio', { name: 'As adjusted' }).check()
   await expect(page.getByText('Drawn as adjusted')).toBeVisible()
-  await panel(page).getByRole('radio', { name: 'As read' }).check()
+  // A pen draws beside the readings as read, and the page says that it went back to them.
+  await page.getByRole('button', { name: 'Draw by hand' }).click()
   await expect(page.getByText('Drawn as adjusted')).toHaveCount(0)
+  await expect(page.getByText(/draws the values as read again/)).toBeVisible()
+  await expect(panel(page).getByText('READINGS AGREE')).toHaveCount(0)
 })
 
 test('one bad reading among eight is stamped, and listed first', async ({ page }) => {
