@@ -1,5 +1,5 @@
 import type { Locator, Page } from '@playwright/test'
-import { evaluate, type Sheet } from '../src/sheet'
+import { quick, type Sheet } from '../src/sheet'
 import { benchSheet } from './support/bench'
 import { figuresIn, textOf } from './support/figures'
 import { openPage, settledSheet } from './support/page'
@@ -69,7 +69,7 @@ test('a screen reader hears every phasor with its value', async ({ page }) => {
           - textbox "Angle of Vread": 60°
   `)
   const picture = page.getByRole('img', { name: 'Phasor diagram' })
-  for (const { id, magnitude, angle } of evaluate(benchSheet).phasors) {
+  for (const { id, magnitude, angle } of quick(benchSheet).phasors) {
     const said = await picture.evaluate((image) => {
       const id = image.getAttribute('aria-describedby') ?? ''
       return document.getElementById(id)?.textContent ?? ''
@@ -115,7 +115,7 @@ test('the result is announced after each edit', async ({ page }) => {
       sheet = await settledSheet(page, (now) => JSON.stringify(now) !== before)
       await expect(region).not.toHaveText(said)
       said = await textOf(region)
-      const { resultant, closingError } = evaluate(sheet).sums[0] ?? {}
+      const { resultant, closingError } = quick(sheet).sums[0] ?? {}
       const heard = figuresIn(said.slice(said.indexOf('calculated')))
       expect(heard[0]?.value, said).toBeCloseTo(resultant?.magnitude as number, 1)
       expect(heard[1]?.value, said).toBeCloseTo(resultant?.angle as number, 0)

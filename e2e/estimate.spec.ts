@@ -6,57 +6,48 @@ import type { Reading, Sheet } from '../src/sheet'
 import { evaluate } from '../src/sheet/estimate'
 import { checkFigure } from './support/check-line'
 import { openPage, settledSheet } from './support/page'
-import { nextReading } from './support/readings'
+import { nextReading, typeReading } from './support/readings'
 import { sheetOf } from './support/sheets'
 import { expect, test } from './support/test'
 
 /*
  * An invented job: a dehumidifier's fan motor behind a series choke, a resistor for measuring and a
- * capacitor. Four voltages, each read twice over: how large, and how far it leads the current.
+ * capacitor. Magnitudes first, then how far each voltage leads the current: the page stands ready for
+ * them in this order.
  */
-const labels = ['VR', 'Vchoke', 'VC', 'VS'] as const
+type Typing = readonly (readonly [readyFor: string, shown: string])[]
 
-const sound: readonly (readonly [string, string])[] = [
-  ['24.1', '0.4'],
-  ['61.3', '73.2'],
-  ['27.4', '-89.6'],
-  ['52.1', '36.6'],
+const sound: Typing = [
+  ['VR, magnitude', '24.1'],
+  ['Vchoke, magnitude', '61.3'],
+  ['VC, magnitude', '27.4'],
+  ['VS, magnitude', '52.1'],
+  ['VR, angle', '0.4'],
+  ['Vchoke, angle', '73.2'],
+  ['VC, angle', '-89.6'],
+  ['VS, angle', '36.6'],
 ]
 
-function job(): Sheet {
+/** A sum of voltages, all to be read, beside a current that is known. */
+function job(terms: readonly string[], order = [...terms, 'VS']): Sheet {
   return sheetOf({
     title: 'Dehumidifier 3, fan motor',
     reference: 'I',
     phasors: [
+      ...order.map((label) => ({ id: label, label, quantity: 'voltage' as const })),
       { id: 'I', label: 'I', quantity: 'current', magnitude: { value: 1.84, text: '1.84' } },
-      ...labels.map((label) => ({ id: label, label, quantity: 'voltage' as const })),
     ],
-    sums: [
-      {
-        id: 's1',
-        terms: [{ phasor: 'VR' }, { phasor: 'Vchoke' }, { phasor: 'VC' }],
-        equals: 'VS',
-      },
-    ],
+    sums: [{ id: 's1', terms: terms.map((phasor) => ({ phasor })), equals: 'VS' }],
   })
 }
 
+const fourVoltages = job(['VR', 'Vchoke', 'VC'])
+
 /** Types what the displays show, one after the other, wherever the page stands ready. */
-async function typeReadings(page: Page, shown: readonly (readonly [string, string])[]) {
-  for (const [at, label] of labels.entries()) {
-    for (const [kind, text] of [
-      ['magnitude', shown[at]?.[0] ?? ''],
-      ['angle', shown[at]?.[1] ?? ''],
-    ] as const) {
-      await page
-        .getByRole('combobox', { name: 'Phasor of the next reading' })
-        .selectOption({ label })
-      await page.getByRole('combobox', { name: 'Kind of the next reading' }).selectOption(kind)
-      await nextReading(page).fill(text)
-      await nextReading(page).press('Enter')
-      await expect(nextReading(page)).toHaveValue('')
-    }
-  }
+async function typeReadings(page: Page, shown: Typing): Promise<Sheet> {
+  await nextReading(page).click()
+  for (const [readyFor, text] of shown) await typeReading(page, readyFor, text)
+  return settledSheet(page, ({ readings }) => readings?.length === shown.length)
 }
 
 function panel(page: Page) {
@@ -72,9 +63,8 @@ async function savedSvg(page: Page): Promise<string> {
 }
 
 test('eight sound readings are typed, and the sheet is stamped: they agree', async ({ page }) => {
-  await openPage(page, job())
-  await typeReadings(page, sound)
-  const sheet = await settledSheet(page, ({ readings }) => readings?.length === 8)
+  await openPage(page, fourVoltages)
+  const sheet = await typeReadings(page, sound)
   const { agreement, sums, phasors } = evaluate(sheet)
   expect(agreement?.verdict).toBe('agree')
 
@@ -94,15 +84,29 @@ test('eight sound readings are typed, and the sheet is stamped: they agree', asy
   const shown = Number.parseFloat(best.replace(/^.*?: /, ''))
   expect(Math.abs(shown - (found?.magnitude ?? Number.NaN))).toBeLessThan(0.06)
 
+  await panel(page)
+    .getByRole('checkbox', { name: /95 % region at each tip/ })
+    .check()
   const text = await savedSvg(page)
   expect(text).toContain('>READINGS AGREE<')
+  expect(text).toContain('Ellipses: 95 % regions')
   expect(text).toMatch(/>gap [\d.]+ V of [\d.]+ V allowed · 2 checks</)
+
+  await panel(page).getByRole('radio', { name: 'As adjusted' }).check()
+  await expect(page.getByText('Drawn as adjusted')).toBeVisible()
+  // A pen draws beside the readings as read, and the page says that it went back to them.
+  await page.getByRole('button', { name: 'Draw by hand' }).click()
+  await expect(page.getByText('Drawn as adjusted')).toHaveCount(0)
+  await expect(page.getByText(/draws the values as read again/)).toBeVisible()
+  await expect(panel(page).getByText('READINGS AGREE')).toHaveCount(0)
 })
 
 test('one bad reading among eight is stamped, and listed first', async ({ page }) => {
-  await openPage(page, job())
-  await typeReadings(page, [sound[0], sound[1], ['37.4', '-89.6'], sound[3]] as typeof sound)
-  const sheet = await settledSheet(page, ({ readings }) => readings?.length === 8)
+  await openPage(page, fourVoltages)
+  const sheet = await typeReadings(
+    page,
+    sound.map(([of, text]) => [of, of === 'VC, magnitude' ? '37.4' : text]),
+  )
   expect(evaluate(sheet).agreement?.verdict).toBe('disagree')
 
   await expect(panel(page).getByText('READINGS DO NOT AGREE')).toBeVisible()
@@ -116,45 +120,31 @@ test('one bad reading among eight is stamped, and listed first', async ({ page }
 })
 
 test('with nothing left to check, the page says so and claims nothing', async ({ page }) => {
-  const { phasors, ...rest } = job()
-  await openPage(page, {
-    ...rest,
-    phasors: phasors.filter(({ id }) => id !== 'I' && id !== 'VC'),
-    reference: 'VR',
-    sums: [{ id: 's1', terms: [{ phasor: 'VR' }, { phasor: 'Vchoke' }], equals: 'VS' }],
-  })
+  await openPage(
+    page,
+    job(['VR', 'VC', 'Vchoke', 'Vcable'], ['VR', 'VC', 'VS', 'Vchoke', 'Vcable']),
+  )
   await expect(panel(page).getByText('NOT ENOUGH READINGS')).toBeVisible()
-  for (const [label, text] of [
-    ['VR', '24.1'],
-    ['Vchoke', '61.3'],
-    ['VS', '72.2'],
-  ] as const) {
-    await page.getByRole('combobox', { name: 'Phasor of the next reading' }).selectOption({ label })
-    await page.getByRole('combobox', { name: 'Kind of the next reading' }).selectOption('magnitude')
-    await nextReading(page).fill(text)
-    await nextReading(page).press('Enter')
-    await expect(nextReading(page)).toHaveValue('')
-  }
+  await typeReadings(page, [
+    ['VR, magnitude', '24.1'],
+    ['VC, magnitude', '27.4'],
+    ['VS, magnitude', '58.1'],
+    ['Vchoke, magnitude', '61.3'],
+    ['Vcable, magnitude', '6.2'],
+    ['VR, angle', '0.4'],
+    ['VC, angle', '-89.6'],
+    ['VS, angle', '35.9'],
+  ])
   await expect(panel(page).getByText('SOLVED, NOTHING LEFT TO CHECK')).toBeVisible()
   await expect(panel(page).getByText(/^Nothing checks reading 1: VR, magnitude/)).toBeVisible()
   await expect(checkFigure(page, 'Gap allowed')).toHaveCount(0)
 
-  // Three voltages make a triangle and its mirror: one click takes the other.
+  // What two voltages must make up, their sizes being known, is a triangle or its mirror.
   const pictures = panel(page).getByRole('listitem').getByRole('button')
   await expect(pictures).toHaveCount(2)
   await pictures.nth(1).click()
   await settledSheet(page, ({ chosen }) => (chosen?.length ?? 0) > 0)
   await expect(pictures).toHaveCount(2)
-})
-
-test('the adjusted diagram closes, and is for looking only', async ({ page }) => {
-  await openPage(page, job())
-  await typeReadings(page, sound)
-  await settledSheet(page, ({ readings }) => readings?.length === 8)
-  await panel(page).getByRole('radio', { name: 'As adjusted' }).check()
-  await expect(page.getByText('Drawn as adjusted')).toBeVisible()
-  await panel(page).getByRole('radio', { name: 'As read' }).check()
-  await expect(page.getByText('Drawn as adjusted')).toHaveCount(0)
 })
 
 test('the linear algebra stays out of the first load', async () => {

@@ -1,6 +1,6 @@
 import type { Locator, Page } from '@playwright/test'
 import { layout, type PlacedArrow, type Scene } from '../../src/drawing'
-import { evaluate, type Place, type Sheet } from '../../src/sheet'
+import { type Place, quick, type Sheet } from '../../src/sheet'
 import { expect } from './test'
 
 /** The paper as it lies on the screen, in CSS pixels of the window. */
@@ -18,7 +18,7 @@ export function boardOf(page: Page): Locator {
 
 /** A sheet laid out here, in Node, by the code that the page draws with. */
 export function sceneOf(sheet: Sheet): Scene {
-  return layout(sheet, evaluate(sheet))
+  return layout(sheet, quick(sheet))
 }
 
 /** The arrow of a scene by its key. */

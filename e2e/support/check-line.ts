@@ -1,5 +1,5 @@
 import type { Locator, Page } from '@playwright/test'
-import { evaluate, type Sheet } from '../../src/sheet'
+import { quick, type Sheet } from '../../src/sheet'
 import { expectFigures, textOf } from './figures'
 import { expect } from './test'
 
@@ -16,9 +16,9 @@ export function checkFigure(page: Page, name: string): Locator {
     .getByRole('definition')
 }
 
-/** Expects the check line to say of the first sum of a sheet what `evaluate` in Node says of it. */
+/** Expects the check line to say of the first sum of a sheet what `quick` says of it in Node. */
 export async function expectCheckedAs(page: Page, sheet: Sheet): Promise<void> {
-  const [found] = evaluate(sheet).sums
+  const [found] = quick(sheet).sums
   const { resultant, measured, closingError } = found ?? {}
   if (!resultant || measured?.magnitude === undefined || measured.angle === undefined) {
     throw new Error('The sheet has no sum with a measured value.')

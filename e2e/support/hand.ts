@@ -1,5 +1,5 @@
 import type { Locator, Page } from '@playwright/test'
-import { evaluate, type Place, type Sheet } from '../../src/sheet'
+import { type Place, quick, type Sheet } from '../../src/sheet'
 import { arrowOf, sceneOf } from './board'
 import { checkFigure } from './check-line'
 import { expectFigures, textOf } from './figures'
@@ -58,9 +58,9 @@ export async function drawIt(page: Page): Promise<void> {
   await expect(page.getByRole('dialog', { name: 'What did you draw?' })).toHaveCount(0)
 }
 
-/** Expects the page to say of each hand arrow, and of the whole, what `evaluate` in Node says. */
+/** Expects the page to say of each hand arrow, and of the whole, what `quick` says in Node. */
 export async function expectVerifiedAs(page: Page, sheet: Sheet): Promise<void> {
-  const { hand, sums } = evaluate(sheet)
+  const { hand, sums } = quick(sheet)
   const names = ['VR', 'VL', 'VC', 'closing arrow of VS']
   expect(sheet.hand?.map(({ stands }) => stands)).toEqual(['VR', 'VL', 'VC', 'closing'])
   for (const [at, name] of names.entries()) {

@@ -9,6 +9,7 @@ import { addArrow } from './items/arrows'
 import { axisItem } from './items/axis'
 import { gapItem } from './items/gaps'
 import { frameItem, gridItems, paperItem } from './items/paper'
+import { createRegions, NO_REGIONS } from './items/regions'
 import { createScaleBars } from './items/scale-bars'
 import { createTitleBlock } from './items/title-block'
 import { createLabels } from './labels'
@@ -49,6 +50,8 @@ export interface LayoutOptions {
   readonly terminals?: boolean
   /** Leaves out what the circuit predicts, which is else drawn in thin broken lines under what was measured. */
   readonly withoutPrediction?: boolean
+  /** The evaluation whose 95 % regions are drawn at the tips; none where nothing is said. */
+  readonly regions?: Evaluation
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
 }
@@ -89,7 +92,14 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     ? NOTHING_OPEN
     : createOpenDrawing(sheet, evaluation, placement, { frame, edges, hasLabels: labels }, palette)
   items.push(...open.arcs)
-  const fences = [...edges, ...open.boxes]
+  const regions =
+    only || options.regions === undefined
+      ? NO_REGIONS
+      : createRegions(placement.arrows, options.regions, placement.unitsPerCentimetre, frame, {
+          palette,
+          isFormer: evaluation.agreement === undefined,
+        })
+  const fences = [...edges, ...open.boxes, ...regions.boxes]
   if (construction) {
     const lines = constructionItems(sheet, evaluation, placement.arrows, construction, palette)
     for (const { key, item } of lines) if (!only || only.has(key)) items.push(item)
@@ -100,9 +110,11 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
     only || !labels ? NO_SCHEMATIC : createSchematic(sheet, { items, frame, fences }, palette)
   items.push(...schematic.items)
   fences.push(...schematic.boxes)
-  const stamp = only
-    ? NO_STAMP
-    : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
+  // Its figures would tell what is hidden.
+  const stamp =
+    only || hidden?.size
+      ? NO_STAMP
+      : createStamp(sheet, evaluation, options.former, { items, frame, fences }, palette)
   items.push(...stamp.items)
   const labelling =
     labels && !only
@@ -116,7 +128,8 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
           predictedWishes(sheet, predicted, palette),
         )
       : { items: [], leftOut: 0 }
-  items.push(...open.labels, ...labelling.items)
+  // Labels lie on the regions and take no notice of them: none moves when they are asked for.
+  items.push(...regions.items, ...open.labels, ...labelling.items)
   return {
     ...size,
     ...placement,

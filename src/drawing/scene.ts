@@ -20,6 +20,7 @@ interface ItemCommon {
     | 'arrow'
     | 'angle'
     | 'gap'
+    | 'region'
     | 'construction'
     | 'aid'
     | 'label'

@@ -25,6 +25,23 @@ export function asAdjusted(sheet: Sheet, evaluation: Evaluation): Evaluation {
   )
 }
 
+/**
+ * The adjusted diagram until a new answer comes: best values of an older answer where it has them, what
+ * is known at once of the rest.
+ */
+export function asFormerlyAdjusted(
+  sheet: Sheet,
+  quick: Evaluation,
+  former: Evaluation,
+): Evaluation {
+  const before = new Map(former.phasors.map((phasor) => [phasor.id, phasor]))
+  const phasors = quick.phasors.map((phasor) => {
+    const best = before.get(phasor.id)
+    return best?.real === undefined ? phasor : best
+  })
+  return asAdjusted(sheet, { ...quick, phasors })
+}
+
 /** The evaluation as another drawing that the readings allow would have it. */
 export function asAlternative(
   sheet: Sheet,
@@ -56,10 +73,10 @@ export function withFormerValues(
   former: Evaluation | undefined,
 ): Evaluation {
   if (former === undefined) return quick
-  const before = new Map(former.phasors.map((phasor) => [phasor.id, phasor]))
+  const before = phasorsById(former)
   let isChanged = false
   const phasors = quick.phasors.map((phasor) => {
-    const filled = fill(phasor, before.get(phasor.id))
+    const filled = fillOnce(phasor, before.get(phasor.id))
     if (filled !== phasor) isChanged = true
     return filled
   })
@@ -74,8 +91,38 @@ export function withFormerValues(
   return { ...quick, phasors, sums }
 }
 
-function fill(phasor: PhasorEvaluation, former: PhasorEvaluation | undefined): PhasorEvaluation {
+const byId = new WeakMap<Evaluation, ReadonlyMap<string, PhasorEvaluation>>()
+
+/** In a drag the former answer stays the same from frame to frame. */
+function phasorsById(evaluation: Evaluation): ReadonlyMap<string, PhasorEvaluation> {
+  const known = byId.get(evaluation)
+  if (known) return known
+  const phasors = new Map(evaluation.phasors.map((phasor) => [phasor.id, phasor]))
+  byId.set(evaluation, phasors)
+  return phasors
+}
+
+interface Fill {
+  readonly former: PhasorEvaluation
+  readonly filled: PhasorEvaluation
+}
+
+const fills = new WeakMap<PhasorEvaluation, Fill>()
+
+/** In a drag nearly all phasors stay the same, the objects themselves: so do the filled ones. */
+function fillOnce(
+  phasor: PhasorEvaluation,
+  former: PhasorEvaluation | undefined,
+): PhasorEvaluation {
   if (former === undefined) return phasor
+  const known = fills.get(phasor)
+  if (known?.former === former) return known.filled
+  const filled = fill(phasor, former)
+  fills.set(phasor, { former, filled })
+  return filled
+}
+
+function fill(phasor: PhasorEvaluation, former: PhasorEvaluation): PhasorEvaluation {
   const takesSize = phasor.magnitude === undefined && former.magnitudeState === 'solved'
   const takesAngle =
     phasor.angle === undefined && phasor.magnitude !== 0 && former.angleState === 'solved'

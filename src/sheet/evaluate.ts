@@ -4,11 +4,6 @@ import type { Evaluation, PhasorEvaluation, PolarValue, SumEvaluation } from './
 import { evaluateHand } from './hand/evaluate-hand'
 import type { Id, Phasor, PhasorId, Sheet, Sum } from './types'
 
-/** What the program says of a sheet. */
-export function evaluate(sheet: Sheet): Evaluation {
-  return quick(sheet)
-}
-
 /**
  * The half of the evaluation that keeps up with a drag: the phasors as typed and read, and of each sum
  * the exact resultant and how far it is from what was measured, and what a hand drew beside what it

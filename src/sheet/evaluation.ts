@@ -8,6 +8,16 @@ export interface PolarValue {
   readonly imaginary: number
 }
 
+/** The 95 % region of a phasor's tip, 2.45 standard uncertainties each way: an ellipse, in the phasor's unit. */
+export interface TipRegion {
+  /** Half its length. */
+  readonly major: number
+  /** Half its breadth. */
+  readonly minor: number
+  /** Degrees in (−90°, 90°], anticlockwise, by which its length is turned from the real axis. */
+  readonly turn: number
+}
+
 /** What is known of a phasor's part. */
 export type PartState = 'given' | 'solved' | 'adjusted' | 'open'
 
@@ -22,6 +32,8 @@ export interface PhasorEvaluation {
   readonly magnitudeLimit?: number
   /** Expanded uncertainty of the angle in degrees, coverage 95 %. */
   readonly angleLimit?: number
+  /** Where the true tip lies, about that of the best value; left out where a part is open. */
+  readonly region?: TipRegion
   /** Before any adjustment. */
   readonly asRead: { readonly magnitude?: number; readonly angle?: number }
   readonly magnitudeState: PartState

@@ -1,6 +1,6 @@
 import { readdirSync, readFileSync } from 'node:fs'
 import { describe, expect, test } from 'vitest'
-import { type Evaluation, evaluate, parseSheetText, type Sheet } from '../../src/sheet'
+import { type Evaluation, parseSheetText, quick, type Sheet } from '../../src/sheet'
 import { expectPublished, nameOf, outputOf, published } from './cases'
 
 /** What of an evaluation a published figure is beside: a part of a phasor, or of a sum's resultant. */
@@ -220,7 +220,7 @@ test('every sheet has a check, and every check a sheet', () => {
 
 describe.each(Object.entries(CHECKS))('the sheet of %s', (id, { figures = {}, closures = [] }) => {
   const from = published(id)
-  const evaluation = evaluate(sheetOfCase(id))
+  const evaluation = quick(sheetOfCase(id))
 
   test(`names the case, its source and how it reached us: ${nameOf(from)}`, () => {
     const { title, job } = sheetOfCase(id)
@@ -243,7 +243,7 @@ describe.each(Object.entries(CHECKS))('the sheet of %s', (id, { figures = {}, cl
 })
 
 test('swapped leads are the same as a term taken off (R02)', () => {
-  const [first, second] = evaluate(sheetOfCase('R02')).sums
+  const [first, second] = quick(sheetOfCase('R02')).sums
   expect(second?.resultant?.magnitude).toBeCloseTo(first?.resultant?.magnitude ?? 0, 12)
   expect(second?.resultant?.angle).toBeCloseTo(first?.resultant?.angle ?? 0, 12)
 })

@@ -172,6 +172,15 @@ const others: fc.Arbitrary<EditOf> = fc.oneof(
   ),
 )
 
+const chosen: fc.Arbitrary<EditOf> = fc.oneof(
+  fc
+    .tuple(which, notNegative, anyNumber)
+    .map(([at, magnitude, angle]) =>
+      onPhasor(({ id }) => ({ kind: 'choose', chosen: [{ phasor: id, magnitude, angle }] }))(at),
+    ),
+  fc.constant<EditOf>(() => ({ kind: 'choose', chosen: [] })),
+)
+
 const drawn: fc.Arbitrary<EditOf> = fc.oneof(
   fc.tuple(which, fc.boolean(), place, place).map(([at, closes, from, to]) =>
     onPhasor(({ id }, sheet) => {
@@ -288,6 +297,7 @@ export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(
   values,
   phasors,
   sums,
+  chosen,
   drawn,
   circuits,
   others,

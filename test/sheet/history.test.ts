@@ -75,6 +75,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
     'add-phasor',
     'add-reading',
     'add-sum',
+    'choose',
     'clear-hand',
     'count-element',
     'drag-tip',

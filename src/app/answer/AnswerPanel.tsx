@@ -1,8 +1,9 @@
 import { stampWordsOf } from '../../drawing'
-import { shownAnswer, usePage } from '../store'
+import { hiddenSums, shownAnswer, usePage } from '../store'
 import { Alternatives } from './Alternatives'
 import './answer.css'
 import { ReadingMoves } from './ReadingMoves'
+import { RegionsSwitch } from './RegionsSwitch'
 import { uncheckedNames } from './text'
 import { ValuesSwitch } from './ValuesSwitch'
 
@@ -10,6 +11,8 @@ import { ValuesSwitch } from './ValuesSwitch'
 export function AnswerPanel() {
   const { sheet, whole, former } = usePage(shownAnswer)
   const progress = usePage((state) => state.progress)
+  const isHidden =
+    usePage(({ history, pen, chosenSum }) => hiddenSums(history.sheet, pen, chosenSum)).size > 0
   const evaluation = whole ?? former
   if (evaluation === undefined && progress.state !== 'failed' && progress.state !== 'slow') {
     return null
@@ -29,7 +32,12 @@ export function AnswerPanel() {
           {progress.text}
         </p>
       )}
-      {evaluation && (
+      {isHidden && (
+        <p className="unchecked">
+          Hidden until the last arrow is drawn by hand, or until you ask for what is calculated.
+        </p>
+      )}
+      {evaluation && !isHidden && (
         <div data-former={whole === undefined || undefined}>
           {words && (
             <p className="verdict" data-verdict={words.verdict}>
@@ -37,6 +45,7 @@ export function AnswerPanel() {
             </p>
           )}
           <ValuesSwitch />
+          <RegionsSwitch />
           <Cautions cautions={evaluation.cautions ?? []} />
           <ReadingMoves sheet={sheet} evaluation={evaluation} />
           {unchecked.length > 0 && (

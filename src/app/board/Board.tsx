@@ -1,6 +1,6 @@
 import { type KeyboardEvent, useId, useMemo, useRef, useState } from 'react'
 import { Layer, Stage } from 'react-konva/lib/ReactKonvaCore'
-import type { Grip, Scene, Stroke } from '../../drawing'
+import type { Grip, Item, Scene, Stroke } from '../../drawing'
 import { useFonts } from '../fonts'
 import { HandVerbs, StrokeForm } from '../hand'
 import { answerOf, hiddenSums, shownSheet, usePage, usePageStore } from '../store'
@@ -57,10 +57,18 @@ export function Board() {
       hidden,
       construction: pen.construction,
       terminals: pen.areTerminalsShown,
+      areRegionsShown: pen.areRegionsShown,
       withoutPrediction: pen.isPredictionHidden,
       values,
     }),
-    [hidden, pen.construction, pen.areTerminalsShown, pen.isPredictionHidden, values],
+    [
+      hidden,
+      pen.construction,
+      pen.areTerminalsShown,
+      pen.areRegionsShown,
+      pen.isPredictionHidden,
+      values,
+    ],
   )
   const scene = useMemo(
     () => base ?? sceneOfAnswer(answer, theme, viewOptions),
@@ -81,11 +89,13 @@ export function Board() {
             (hasFonts || item.kind !== 'text') &&
             !(item.arrow !== undefined && moving.moved.has(item.arrow)),
         )
-        // While something moves, the verdict is of what was there before.
+        // While something moves, the verdict and what was solved are of what was there before.
         .map((item) =>
-          item.part === 'stamp' && moving.moved.size > 0 ? greyed(item, theme) : item,
+          moving.moved.size > 0 && (isOfAnswer(item) || moving.former.has(item.arrow ?? ''))
+            ? greyed(item, theme)
+            : item,
         ),
-    [scene, moving.moved, hasFonts, theme],
+    [scene, moving.moved, moving.former, hasFonts, theme],
   )
 
   const words = useMemo(
@@ -190,6 +200,10 @@ export function Board() {
       />
     </section>
   )
+}
+
+function isOfAnswer({ part }: Item): boolean {
+  return part === 'stamp' || part === 'region'
 }
 
 function isSameGrip(one: Grip | undefined, other: Grip | undefined): boolean {

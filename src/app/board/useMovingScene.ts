@@ -9,12 +9,14 @@ import {
 } from '../../drawing'
 import type { Place } from '../../sheet'
 import { answerOf, usePage } from '../store'
-import type { ViewOptions } from './scene'
+import { formerArrows, greyedOf, type ViewOptions } from './scene'
 
 /** The part of the scene that a drag changes, apart from what stands still. */
 export interface MovingScene {
   /** The keys of all arrows that the drag touches. */
   readonly moved: ReadonlySet<string>
+  /** The keys of the arrows of the scene before that show what was solved before the drag. */
+  readonly former: ReadonlySet<string>
   /** Items drawn anew in each frame. */
   readonly live: readonly Item[]
   /** Items that keep their shape, and how far they have been carried, in millimetres. */
@@ -34,8 +36,8 @@ interface Sorted extends Displacement {
   readonly within: ReadonlySet<string>
 }
 
-const atRest: MovingScene = { moved: new Set(), live: [], carried: [], after: undefined }
 const none: ReadonlySet<string> = new Set()
+const atRest: MovingScene = { moved: none, former: none, live: [], carried: [], after: undefined }
 
 /** The moving part of the scene while a drag that began from `base` has a draft. */
 export function useMovingScene(
@@ -51,15 +53,19 @@ export function useMovingScene(
 
   return useMemo(() => {
     if (!base || !draft) return atRest
-    const { evaluation } = answerOf(draft.sheet)
+    const answer = answerOf(draft.sheet)
+    const { evaluation } = answer
     const options = { theme, labels: false, frozen: base, ...view }
     sorted.current ??= maybeSort(base, layout(draft.sheet, evaluation, { ...options, only: none }))
     if (!sorted.current) return atRest
     const { live, moved, groups, within } = sorted.current
     const after = layout(draft.sheet, evaluation, { ...options, only: live, within })
+    const former = formerArrows(base.arrows, answer)
+    const items = after.items.filter((item) => item.arrow !== undefined && live.has(item.arrow))
     return {
       moved,
-      live: after.items.filter((item) => item.arrow !== undefined && live.has(item.arrow)),
+      former,
+      live: former.size === 0 ? items : greyedOf(items, former, theme),
       carried: groups.map(({ key, items }) => ({ key, items, by: carriedBy(base, after, key) })),
       after,
     }

@@ -2,10 +2,11 @@ import { drawnScene } from '../board'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
 import {
   checkedSum,
+  formerPhasors,
   hiddenSums,
   nameOfSum,
   quantityOfSum,
-  shownEvaluation,
+  shownAnswer,
   shownSheet,
   usePage,
   usePageStore,
@@ -16,9 +17,10 @@ import { checkText } from './text'
 export function CheckLine() {
   const store = usePageStore()
   const sheet = usePage(shownSheet)
-  const evaluation = usePage(shownEvaluation)
+  const answer = usePage(shownAnswer)
   const kept = usePage((state) => state.history.sheet)
   const chosen = usePage((state) => state.chosenSum)
+  const hasFailed = usePage(({ progress }) => progress.state === 'failed')
   const pen = usePage((state) => state.pen)
   const sum = checkedSum(sheet, chosen)
   if (!sum) {
@@ -36,9 +38,19 @@ export function CheckLine() {
   // A drag keeps the scale of the drawing that it began on.
   const scale = drawnScene(kept, 'light').unitsPerCentimetre[quantityOfSum(sheet, sum)]
   const isHidden = hiddenSums(kept, pen, sum.id).has(sum.id)
-  const text = checkText(sheet, evaluation, sum, scale, isHidden)
+  const { evaluation, whole, former } = answer
+  const before =
+    whole === undefined && !hasFailed
+      ? { evaluation: former, phasors: formerPhasors(answer) }
+      : undefined
+  const text = checkText(sheet, evaluation, sum, scale, isHidden, before)
   return (
-    <section className="check" aria-label="Check" data-hand={text.figures.length > 4 || undefined}>
+    <section
+      className="check"
+      aria-label="Check"
+      data-hand={text.figures.length > 4 || undefined}
+      data-judged={sum.equals !== undefined || undefined}
+    >
       <div>
         <p className="name">{text.drawn}</p>
         <p className="figure">
@@ -61,8 +73,8 @@ export function CheckLine() {
         </p>
         <p className="under">{text.scale}</p>
       </div>
-      {text.figures.map(({ name, figure, under }) => (
-        <dl key={name}>
+      {text.figures.map(({ name, figure, under, isFormer }) => (
+        <dl key={name} data-former={isFormer}>
           <dt>{name}</dt>
           <dd className="figure">{figure}</dd>
           <dd className="under">{under}</dd>

@@ -7,7 +7,7 @@ import {
   unitOf,
 } from '../../core'
 import { type Digits, digitsOf, digitsOfResult, formatScale, readingsByPhasor } from '../../drawing'
-import type { Evaluation, Sheet, Sum, SumEvaluation } from '../../sheet'
+import type { Evaluation, Id, Sheet, Sum, SumEvaluation } from '../../sheet'
 import { labelOf, quantityOfSum } from '../store'
 import type { CheckFigure } from './figure'
 import { handFigures } from './hand-figures'
@@ -18,6 +18,14 @@ export interface CheckText {
   readonly drawn: string
   readonly scale: string
   readonly figures: readonly CheckFigure[]
+}
+
+/** What is shown of the sheet before until the whole answer comes. */
+export interface Former {
+  /** Undefined where no sheet before was worked out either. */
+  readonly evaluation: Evaluation | undefined
+  /** The phasors that are shown with a value of it. */
+  readonly phasors: ReadonlySet<Id>
 }
 
 interface Context {
@@ -39,6 +47,7 @@ interface Context {
  * the sum was constructed by hand, that comes first, and every pair of the three is compared.
  *
  * @param isHidden What is calculated stays hidden, as while the sum is being constructed.
+ * @param former What hangs on it is marked.
  */
 export function checkText(
   sheet: Sheet,
@@ -46,6 +55,7 @@ export function checkText(
   sum: Sum,
   unitsPerCentimetre: number | undefined,
   isHidden = false,
+  former?: Former,
 ): CheckText {
   const quantity = quantityOfSum(sheet, sum)
   const count = sum.terms.length
@@ -70,19 +80,22 @@ export function checkText(
     unit: unitOf(quantity),
     ...digitsOfSum(sheet, sum),
     perMillimetre: unitsPerCentimetre === undefined ? undefined : unitsPerCentimetre / 10,
-    isJudged: evaluation.agreement !== undefined,
+    isJudged: (evaluation.agreement ?? former?.evaluation?.agreement) !== undefined,
   }
   const seen = sum.equals === 0 ? [] : [measured(context)]
+  const hangs = sum.terms.some(({ phasor }) => former?.phasors.has(phasor))
+  const marked = (figure: CheckFigure) => (hangs ? { ...figure, isFormer: true as const } : figure)
   if (isHidden) return { ...head, figures: [...drawn, HIDDEN, ...seen] }
   return {
     ...head,
     figures: [
       ...drawn,
-      calculated(context),
+      marked(calculated(context)),
       ...seen,
-      ...(hand?.differences ?? []),
-      difference(context),
+      ...(hand?.differences ?? []).map(marked),
+      marked(difference(context)),
       ...allowance(context),
+      ...formerAllowance(context, former),
     ],
   }
 }
@@ -209,6 +222,20 @@ function allowance({ found: { closingError, closes }, unit }: Context): readonly
       under: closes ? 'the sum closes within its limits' : 'the sum does not close',
     },
   ]
+}
+
+/** In the place of the allowance that is to come, so that nothing moves then: that of the sheet before. */
+function formerAllowance(context: Context, former: Former | undefined): readonly CheckFigure[] {
+  if (former === undefined || context.found.closingError === undefined) return []
+  const found = former.evaluation?.sums.find(({ id }) => id === context.sum.id)
+  const before = found ? allowance({ ...context, found }) : []
+  return (before.length > 0 ? before : [AWAITED]).map((figure) => ({ ...figure, isFormer: true }))
+}
+
+const AWAITED: CheckFigure = {
+  name: 'Gap allowed',
+  figure: '–',
+  under: 'The limits are being worked out.',
 }
 
 /** The digits of a sum: the finest that any of its terms, or what it must equal, was given with. */

@@ -2,17 +2,17 @@ import type { Scene } from '../../drawing'
 import type { Sheet } from '../../sheet'
 import { drawnScene, paintItems, sceneOfAnswer, type ViewOptions } from '../board'
 import { loadFonts } from '../fonts'
-import { answerOf } from '../store'
+import { answerOf, quickAnswer } from '../store'
 
 const dotsPerMillimetre = 300 / 25.4
 
 /**
- * The scene that is given out: as read and always in the colours of paper, whatever the screen shows. A
- * verdict that is of an older sheet is left out.
+ * The scene that is given out: as read and always in the colours of paper, whatever the screen shows.
+ * Whatever is of an older sheet, the verdict and what was solved, is left out.
  */
 export function printedScene(sheet: Sheet, view: ViewOptions = {}): Scene {
-  const { former, ...known } = answerOf(sheet)
-  return former ? sceneOfAnswer(known, 'light', view) : drawnScene(sheet, 'light', view)
+  const { whole } = answerOf(sheet)
+  return whole ? drawnScene(sheet, 'light', view) : sceneOfAnswer(quickAnswer(sheet), 'light', view)
 }
 
 /** The drawing as a PNG at 300 dots an inch; fails where the browser cannot make one. */

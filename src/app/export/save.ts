@@ -51,12 +51,18 @@ export async function copyPicture(store: Store): Promise<void> {
   })
 }
 
-/** What of the view stands in what is saved: the terminals, and the construction lines on request. */
+/** What of the view stands in what is saved: terminals and regions, and construction lines on request. */
 function viewToSave(store: Store): ViewOptions {
-  const { areTerminalsShown, isConstructionSaved, construction, isPredictionHidden } =
-    store.getState().pen
+  const {
+    areTerminalsShown,
+    areRegionsShown,
+    isConstructionSaved,
+    construction,
+    isPredictionHidden,
+  } = store.getState().pen
   return {
     terminals: areTerminalsShown,
+    areRegionsShown,
     withoutPrediction: isPredictionHidden,
     ...(isConstructionSaved && { construction }),
   }

@@ -30,9 +30,9 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
   const value = (
     part: 'magnitude' | 'angle' | 'real' | 'imaginary',
     caption: string,
-    cell: CellText,
+    { solved, ...cell }: CellText,
   ) => (
-    <td data-caption={caption} data-area={part}>
+    <td data-caption={caption} data-area={part} data-former={(solved && former) || undefined}>
       <Cell
         name={`${caption} of ${name}`}
         column={part}
@@ -102,7 +102,18 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
         <KnownChoice id={phasor.id} name={name} known={text.known} />
         {best && (
           <p className="best" data-former={former || undefined}>
-            {best.state}
+            {best.marks.length === 1 ? (
+              best.state
+            ) : (
+              <>
+                <span className="visually-hidden">{best.state}</span>
+                {best.marks.map((mark) => (
+                  <span key={mark} aria-hidden="true">
+                    {mark}
+                  </span>
+                ))}
+              </>
+            )}
           </p>
         )}
       </td>

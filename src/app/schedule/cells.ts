@@ -24,6 +24,8 @@ export interface CellText {
   readonly typed: string
   /** Worked out from other cells, or assumed. */
   readonly derived: boolean
+  /** Nobody gave it: it was solved. */
+  readonly solved?: boolean
 }
 
 /** How a phasor's values came to be known, in the schedule's words. */
@@ -82,7 +84,9 @@ function magnitudeCell(
     formatQuantity(size, unit, digits.magnitude),
   )
   const typed = typedText(readings, phasor.magnitude)
-  return typed === undefined ? derived(shown) : { shown, typed, derived: false }
+  return typed === undefined
+    ? derived(shown, evaluation.magnitudeState === 'solved')
+    : { shown, typed, derived: false }
 }
 
 function angleCell({ phasor, evaluation, digits }: Row, readings: readonly Reading[]): CellText {
@@ -90,7 +94,9 @@ function angleCell({ phasor, evaluation, digits }: Row, readings: readonly Readi
   const direct = readings.filter(({ kind }) => kind === 'angle')
   const isWorkedOut = readings.length > direct.length
   const typed = isWorkedOut ? undefined : typedText(direct, phasor.angle)
-  return typed === undefined ? derived(shown) : { shown, typed, derived: false }
+  return typed === undefined
+    ? derived(shown, evaluation.angleState === 'solved')
+    : { shown, typed, derived: false }
 }
 
 /** Whether a reading of this kind says something of its phasor's angle, shown as degrees or not. */
@@ -113,11 +119,13 @@ function rectangularCell(
   }
   return derived(
     printed(evaluation[part], (value) => formatQuantity(value, unit, digits.magnitude)),
+    evaluation.magnitudeState === 'solved' || evaluation.angleState === 'solved',
   )
 }
 
-function derived(shown: string): CellText {
-  return shown === '' ? nothing : { shown, typed: shown, derived: true }
+function derived(shown: string, solved: boolean): CellText {
+  if (shown === '') return nothing
+  return { shown, typed: shown, derived: true, ...(solved && { solved }) }
 }
 
 function printed(value: number | undefined, print: (value: number) => string): string {
@@ -185,6 +193,8 @@ export interface BestText {
   readonly values: readonly string[]
   /** How each part came to be: `magnitude adjusted, angle solved`. */
   readonly state: string
+  /** The same in the few letters that the column has room for: `adjusted`, `∠ solved`. */
+  readonly marks: readonly string[]
 }
 
 /** What was worked out of a phasor; undefined where nothing was. */
@@ -204,7 +214,9 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
     magnitudeState === angleState
       ? magnitudeState
       : `magnitude ${magnitudeState}, angle ${angleState}`
-  return { values, state }
+  const marks =
+    magnitudeState === angleState ? [magnitudeState] : [magnitudeState, `∠ ${angleState}`]
+  return { values, state, marks }
 }
 
 /** A limit below this share of a size is rounding: the value is exact. */

@@ -1,5 +1,6 @@
 import {
   asAdjusted,
+  asFormerlyAdjusted,
   type Evaluation,
   type Id,
   quick,
@@ -39,14 +40,35 @@ export function continueAnswer(from: Sheet, sheet: Sheet): void {
   answers.set(sheet, { sheet, evaluation, ...(former && { former }) })
 }
 
-/** The evaluation of an answer as the board shows it: as read, or adjusted where that is known. */
+/** What is known of a sheet at once, nothing of an older one in it. */
+export function quickAnswer(sheet: Sheet): Answer {
+  return { sheet, evaluation: quick(sheet) }
+}
+
+/** The evaluation of an answer as the board shows it: as read, or adjusted where that was ever known. */
 export function evaluationShown(answer: Answer, values: State['values']): Evaluation {
-  if (values === 'read' || answer.whole === undefined) return answer.evaluation
+  const { sheet, evaluation, whole, former } = answer
+  const best = whole ?? former
+  if (values === 'read' || best === undefined) return evaluation
   const known = adjusted.get(answer)
   if (known) return known
-  const evaluation = asAdjusted(answer.sheet, answer.whole)
-  adjusted.set(answer, evaluation)
-  return evaluation
+  const shown = whole ? asAdjusted(sheet, whole) : asFormerlyAdjusted(sheet, evaluation, best)
+  adjusted.set(answer, shown)
+  return shown
+}
+
+const nothingFormer: ReadonlySet<Id> = new Set()
+
+/** The phasors that are shown with a value of the sheet before, until the whole answer comes. */
+export function formerPhasors(answer: Answer, values: State['values'] = 'read'): ReadonlySet<Id> {
+  const { evaluation, whole, former } = answer
+  if (whole !== undefined || former === undefined) return nothingFormer
+  const shown = values === 'adjusted' ? former : evaluation
+  return new Set(
+    shown.phasors.flatMap(({ id, magnitudeState, angleState }) =>
+      values === 'adjusted' || magnitudeState === 'solved' || angleState === 'solved' ? [id] : [],
+    ),
+  )
 }
 
 /** The answer for the sheet as the page shows it. */

@@ -61,6 +61,8 @@ export interface Pen {
   readonly areTerminalsShown: boolean
   /** What the circuit predicts is not drawn. */
   readonly isPredictionHidden: boolean
+  /** The 95 % regions of the best values are drawn at the tips. */
+  readonly areRegionsShown: boolean
 }
 
 /** All that the page remembers. What can be derived from it is derived: see the selectors. */

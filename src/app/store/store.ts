@@ -28,7 +28,7 @@ export interface Actions {
   redo(): void
   select(selection: Selection | undefined): void
   chooseSum(id: string): void
-  /** Changes how the board is drawn on. */
+  /** Changes how the board is drawn on. A pen that is taken up draws beside the readings as read. */
   setPen(change: Partial<Pen>): void
   /**
    * Opens another sheet; the one that was open stays on the shelf. Where the sheet of that identity
@@ -46,7 +46,7 @@ export interface Actions {
   receiveAnswer(sheet: Sheet, evaluation: Evaluation): void
   /** Says how the whole answer for the open sheet comes along. */
   setProgress(progress: Progress): void
-  /** Shows the board as read or as adjusted. */
+  /** Shows the board as read or as adjusted. The adjusted values are not drawn on: the pen is put down. */
   showValues(values: State['values']): void
 }
 
@@ -133,7 +133,11 @@ export function createStore(
       },
       select: (selection) => set({ selection }),
       chooseSum: (id) => set({ chosenSum: id }),
-      setPen: (change) => set(({ pen }) => ({ pen: { ...pen, ...change } })),
+      setPen: (change) => {
+        set(({ pen }) => ({ pen: { ...pen, ...change } }))
+        if (change.mode === undefined || get().values === 'read') return
+        set({ values: 'read', notice: { tone: 'news', text: DRAWN_AS_READ } })
+      },
       open: (opened, from, text, known = createIdentity()) => {
         const { history, shelf, origin: before, identity: left } = get()
         const shelved = shelf.find(({ identity: { id } }) => id === known.id)
@@ -195,10 +199,20 @@ export function createStore(
 
       receiveAnswer: (sheet, evaluation) => set({ answer: keepAnswer(sheet, evaluation) }),
       setProgress: (progress) => set({ progress }),
-      showValues: (values) => set({ values }),
+      showValues: (values) => {
+        const { mode } = get().pen
+        set({ values })
+        if (values === 'read' || mode === undefined) return
+        get().setPen({ mode: undefined })
+        set({ notice: { tone: 'news', text: PEN_IS_DOWN } })
+      },
     }
   })
 }
+
+const DRAWN_AS_READ = 'The board draws the values as read again: a pen draws beside these.'
+const PEN_IS_DOWN =
+  'The pen is put down: the adjusted values are for looking only. Show the values as read to draw on.'
 
 /** The pen as it lies: nothing is drawn. */
 const restingPen: Pen = {
@@ -209,6 +223,7 @@ const restingPen: Pen = {
   isConstructionSaved: false,
   areTerminalsShown: false,
   isPredictionHidden: false,
+  areRegionsShown: false,
 }
 
 function historyOf(sheet: Sheet, shelved: Shelved | undefined): State['history'] {

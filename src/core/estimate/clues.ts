@@ -1,4 +1,4 @@
-import { angleOf, degreesFromRadians, magnitudeOf, wrapDegrees } from '..'
+import { angleOf, cosDegrees, degreesFromRadians, magnitudeOf, sinDegrees, wrapDegrees } from '..'
 import { combinedUncertainty } from './coverage'
 import type { Observable, Observation, PhasorIndex, PhasorProblem } from './phasor-problem'
 
@@ -142,4 +142,16 @@ export function cluesOf(problem: PhasorProblem): Clues {
     }
   }
   return { magnitudes, angles, powers, sines, resistances, reactances }
+}
+
+/** |V| · |I| in VA as a clue gives it, where the angle between them, in degrees, does or does not help. */
+export function apparentPower(
+  { power, reactive, factor }: PowerClue,
+  lead: number | undefined,
+): number | undefined {
+  if (power !== undefined && reactive !== undefined) return Math.hypot(power, reactive)
+  if (power !== undefined && factor) return power / factor
+  if (lead === undefined) return undefined
+  if (power !== undefined) return power / cosDegrees(lead)
+  return reactive === undefined ? undefined : reactive / sinDegrees(lead)
 }

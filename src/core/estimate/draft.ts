@@ -11,18 +11,20 @@ import {
   wrapDegrees,
   ZERO,
 } from '..'
-import { type AngleClue, type Clues, clampedArc, type PowerClue, type SineClue } from './clues'
-import { circlesMeet, lineMeetsCircle, linesMeet } from './geometry'
+import {
+  type AngleClue,
+  apparentPower,
+  type Clues,
+  clampedArc,
+  type PowerClue,
+  type SineClue,
+} from './clues'
 import { solveNetwork } from './network'
 import type { ClosedSum, ElementModel, PhasorIndex, PhasorProblem } from './phasor-problem'
 
-/** Several ways to go on; each changes the draft that it is given. */
-export type Choice = readonly ((draft: Draft) => void)[]
-
 /**
  * A drawing in the making: magnitudes and angles (degrees, in a frame that may yet be turned), and
- * elements' values, as far as they are known. It follows up everything that has but one consequence,
- * and offers a choice where there are two.
+ * elements' values, as far as they are known. It follows up everything that has but one consequence.
  */
 export class Draft {
   readonly #problem: PhasorProblem
@@ -83,7 +85,7 @@ export class Draft {
     if (!known.includes(undefined)) return
     const impedances = this.#problem.elements.map((_, each) => this.#impedance(each))
     for (const [phasor, value] of solveNetwork(this.#problem, known, impedances)) {
-      this.#setPhasor(phasor, value)
+      this.setPhasor(phasor, value)
     }
   }
 
@@ -104,7 +106,8 @@ export class Draft {
     } while (this.#changed)
   }
 
-  #relate(phasor: PhasorIndex, against: PhasorIndex, degrees: number): void {
+  /** Notes how far a phasor is ahead of another, in degrees. */
+  relate(phasor: PhasorIndex, against: PhasorIndex, degrees: number): void {
     const clue = { phasor, against, degrees: wrapDegrees(degrees) }
     this.#found.push(clue)
     this.#followAngle(clue)
@@ -116,7 +119,8 @@ export class Draft {
     if (other !== undefined) this.setAngle(phasor, other + degrees)
   }
 
-  #setPhasor(which: PhasorIndex, value: Complex): void {
+  /** Sets what is not known yet of a phasor. */
+  setPhasor(which: PhasorIndex, value: Complex): void {
     const { magnitude, angle } = toPolar(value)
     this.setMagnitude(which, magnitude)
     this.setAngle(which, angle)
@@ -199,24 +203,15 @@ export class Draft {
         this.#followAngle({ phasor: voltage, against: current, degrees })
       }
     }
-    const apparent = this.#apparent(clue)
+    const apparent = apparentPower(clue, this.#lead(voltage, current))
     if (apparent === undefined) return
     const [v, i] = [this.magnitudes[voltage], this.magnitudes[current]]
     if (v !== undefined) this.setMagnitude(current, apparent / v)
     if (i !== undefined) this.setMagnitude(voltage, apparent / i)
   }
 
-  #apparent({ voltage, current, power, reactive, factor }: PowerClue): number | undefined {
-    if (power !== undefined && reactive !== undefined) return Math.hypot(power, reactive)
-    if (power !== undefined && factor) return power / factor
-    const lead = this.#lead(voltage, current)
-    if (lead === undefined) return undefined
-    if (power !== undefined) return power / cosDegrees(lead)
-    return reactive === undefined ? undefined : reactive / sinDegrees(lead)
-  }
-
   /** What the other terms leave for these. */
-  #gap(sum: ClosedSum, except: readonly PhasorIndex[]): Complex {
+  gap(sum: ClosedSum, except: readonly PhasorIndex[]): Complex {
     let gap = ZERO
     for (const { phasor, sign } of sum) {
       const value = this.phasor(phasor)
@@ -226,101 +221,24 @@ export class Draft {
     return gap
   }
 
-  #openTerms(sum: ClosedSum): ClosedSum {
+  /** The terms of a sum that are not known whole. */
+  openTerms(sum: ClosedSum): ClosedSum {
     return sum.filter(({ phasor }) => this.phasor(phasor) === undefined)
   }
 
   #followSum(sum: ClosedSum): void {
-    const [term, another] = this.#openTerms(sum)
+    const [term, another] = this.openTerms(sum)
     if (term === undefined || another !== undefined) return
-    const gap = this.#gap(sum, [term.phasor])
-    this.#setPhasor(term.phasor, { re: term.sign * gap.re, im: term.sign * gap.im })
+    const gap = this.gap(sum, [term.phasor])
+    this.setPhasor(term.phasor, { re: term.sign * gap.re, im: term.sign * gap.im })
   }
 
-  /** The next question that has a few answers; nothing where only a guess helps. */
-  choice(): Choice | undefined {
-    return this.#choiceOfSums() ?? this.#choiceOfPowers() ?? this.#choiceOfSines()
-  }
-
-  #choiceOfSums(): Choice | undefined {
-    for (const sum of this.#problem.sums) {
-      const open = this.#openTerms(sum)
-      const [first, second] = open
-      if (open.length !== 2 || first === undefined || second === undefined) continue
-      const choice = this.#twoTerms(sum, first, second) ?? this.#twoTerms(sum, second, first)
-      if (choice !== undefined && choice.length > 0) return choice
-    }
-    return undefined
-  }
-
-  #twoTerms(
-    sum: ClosedSum,
-    first: ClosedSum[number],
-    second: ClosedSum[number],
-  ): Choice | undefined {
-    const gap = this.#gap(sum, [first.phasor, second.phasor])
-    const [a, b] = [this.magnitudes[first.phasor], this.magnitudes[second.phasor]]
-    const [alpha, beta] = [this.angles[first.phasor], this.angles[second.phasor]]
-    if (a !== undefined && b !== undefined) {
-      return circlesMeet(a, b, gap).map((tip) => (draft) => {
-        draft.#setPhasor(first.phasor, { re: first.sign * tip.re, im: first.sign * tip.im })
-      })
-    }
-    if (alpha !== undefined && b !== undefined) {
-      const lengths = lineMeetsCircle(fromPolar(first.sign, alpha), gap, b)
-      return lengths.map((length) => (draft) => draft.setMagnitude(first.phasor, length))
-    }
-    if (alpha === undefined || beta === undefined) return undefined
-    const factors = linesMeet(fromPolar(first.sign, alpha), fromPolar(second.sign, beta), gap)
-    if (factors === undefined) return undefined
-    return [
-      (draft) => {
-        draft.setMagnitude(first.phasor, factors[0])
-        draft.setMagnitude(second.phasor, factors[1])
-      },
-    ]
-  }
-
-  #choiceOfPowers(): Choice | undefined {
-    for (const { voltage, current, power, reactive, factor } of this.#clues.powers) {
-      if (this.#isRelated(voltage, current)) continue
-      const [v, i] = [this.magnitudes[voltage], this.magnitudes[current]]
-      const apparent = v === undefined || i === undefined ? undefined : v * i
-      const cosine = factor ?? (power !== undefined && apparent ? power / apparent : undefined)
-      if (cosine !== undefined) {
-        const lead = clampedArc(Math.acos, cosine)
-        return this.#eitherAngle(voltage, current, [lead, -lead])
-      }
-      if (reactive === undefined || !apparent) continue
-      const lead = clampedArc(Math.asin, reactive / apparent)
-      return this.#eitherAngle(voltage, current, [lead, 180 - lead])
-    }
-    return undefined
-  }
-
-  #choiceOfSines(): Choice | undefined {
-    for (const { phasor, against, sine, either, turn } of this.#clues.sines) {
-      if (this.#isRelated(phasor, against)) continue
-      const lead = clampedArc(Math.asin, sine)
-      const angles = either ? [lead, -lead, 180 - lead, lead - 180] : [lead, 180 - lead]
-      return this.#eitherAngle(
-        phasor,
-        against,
-        angles.map((angle) => angle - turn),
-      )
-    }
-    return undefined
-  }
-
-  #isRelated(phasor: PhasorIndex, against: PhasorIndex): boolean {
+  /** Whether the angle between two phasors is known. */
+  isRelated(phasor: PhasorIndex, against: PhasorIndex): boolean {
     if (this.angles[phasor] !== undefined && this.angles[against] !== undefined) return true
     return this.#found.some((clue: SineClue | AngleClue) => {
       const pair = [clue.phasor, clue.against]
       return pair.includes(phasor) && pair.includes(against)
     })
-  }
-
-  #eitherAngle(phasor: PhasorIndex, against: PhasorIndex, degrees: readonly number[]): Choice {
-    return degrees.map((lead) => (draft) => draft.#relate(phasor, against, lead))
   }
 }

@@ -137,13 +137,14 @@ export class Drawing {
     return [...groups.values()]
   }
 
-  /** Covariance of a phasor's two parts; nothing where one of them is open. */
+  /** Covariance of a phasor's two parts, about its best value; nothing where one of them is open. */
   tipCovariance(phasor: number): TipCovariance | undefined {
     const parts = [
       { kind: 'real', phasor },
       { kind: 'imaginary', phasor },
     ] as const
     if (parts.some((part) => !this.#candidate.isFixed(part))) return undefined
+    if (this.#draws) return this.#covarianceByDraws(phasor, this.#draws)
     const [a, b] = parts.map((part) => this.sharesOf(this.#candidate.gradientOf(part).gradient))
     if (a === undefined || b === undefined) return undefined
     let both = 0
@@ -178,6 +179,20 @@ export class Drawing {
         !this.#candidate.isBelowZero({ kind: 'reactance', element }, sign)
       )
     })
+  }
+
+  #covarianceByDraws(phasor: number, draws: Matrix): TipCovariance {
+    const { layout } = this.#candidate.equations
+    const best = this.#candidate.solution.x
+    let [real, imaginary, both] = [0, 0, 0]
+    for (let row = 0; row < draws.rows; row++) {
+      const re = draws.get(row, layout.real(phasor)) - valueAt(best, layout.real(phasor))
+      const im = draws.get(row, layout.imaginary(phasor)) - valueAt(best, layout.imaginary(phasor))
+      real += (re * re) / draws.rows
+      imaginary += (im * im) / draws.rows
+      both += (re * im) / draws.rows
+    }
+    return { real, imaginary, both }
   }
 
   #foundByDraws(observable: Observable, best: number, draws: Matrix): Found {

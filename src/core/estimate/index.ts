@@ -33,6 +33,7 @@ export {
   type QuantitySpread,
   uncertaintyOf,
 } from './linearisation'
+export { type Missing, type MissingReadings, missingReadings } from './missing'
 export type {
   ClosedSum,
   ElementIndex,
@@ -47,4 +48,5 @@ export type {
 } from './phasor-problem'
 export { type Equations, type LeastSquaresProblem, NO_EQUATIONS } from './problem'
 export { createRandom, normalDeviate, type Random, rectangularDeviate } from './random'
+export { regionOf, type TipRegion } from './region'
 export { type ProblemPart, splitProblem } from './split'

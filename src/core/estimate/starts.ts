@@ -1,4 +1,5 @@
 import { differenceDegrees, fromPolar } from '..'
+import { choiceOf } from './choices'
 import { type Clues, cluesOf } from './clues'
 import { Draft } from './draft'
 import type { PhasorEquations } from './equations'
@@ -27,6 +28,7 @@ interface Leaf {
 
 /** How an unknown is guessed: at the usual place first, anywhere later. */
 interface Guesser {
+  readonly clues: Clues
   readonly problem: PhasorProblem
   readonly random: Random | undefined
 }
@@ -103,7 +105,7 @@ function isPassive(draft: Draft, problem: PhasorProblem): boolean {
 /** Completes a draft in every way that its choices offer, guessing where there is none. */
 function complete(draft: Draft, guesser: Guesser, most: number, guesses = 0): readonly Leaf[] {
   draft.follow()
-  const choice = draft.choice()
+  const choice = choiceOf(draft, guesser.problem, guesser.clues)
   if (choice === undefined) {
     return guess(draft, guesser)
       ? complete(draft, guesser, most, guesses + 1)
@@ -151,7 +153,7 @@ function bestFrame(problem: PhasorProblem, clues: Clues): PhasorIndex {
   let best = reference
   let fewest = Number.POSITIVE_INFINITY
   for (const frame of [reference, ...byRelations].slice(0, MOST_FRAMES)) {
-    const [leaf] = complete(framed(problem, clues, frame), { problem, random: undefined }, 1)
+    const [leaf] = complete(framed(problem, clues, frame), { problem, clues, random: undefined }, 1)
     if (leaf !== undefined && leaf.guesses < fewest) {
       fewest = leaf.guesses
       best = frame
@@ -218,7 +220,7 @@ export function startsOf(problem: PhasorProblem, equations: PhasorEquations, rou
   const clues = cluesOf(problem)
   const frame = bestFrame(problem, clues)
   const random = round === 0 ? undefined : createRandom(round)
-  const leaves = complete(framed(problem, clues, frame), { problem, random }, MOST_PLACES)
+  const leaves = complete(framed(problem, clues, frame), { problem, clues, random }, MOST_PLACES)
   return {
     mobility: mobilityOf(problem, clues, equations),
     places: leaves.map(({ draft }) => placeOf(draft, problem, equations)),

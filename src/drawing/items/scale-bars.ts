@@ -1,4 +1,4 @@
-import type { Quantity, UnitsPerCentimetre } from '../../sheet'
+import type { Place, Quantity, UnitsPerCentimetre } from '../../sheet'
 import { measureText } from '../font/measure'
 import { type Box, joinBoxes, NO_BOX } from '../geometry'
 import type { Item, TextRun } from '../scene'
@@ -10,7 +10,8 @@ const ROW_HEIGHT = 7
 const INSET = 7
 const BAR = 10
 const TICK = 1.3
-const TEXT_SIZE = 3.5
+/** Height of the text beside the bars, in millimetres. */
+export const SCALE_TEXT_SIZE = 3.5
 
 /** The scale bars: one for each quantity that is drawn, and the box that each takes. */
 export interface ScaleBars {
@@ -23,6 +24,11 @@ export function scaleBarsHeight(count: number): number {
   return count === 0 ? 0 : INSET + count * ROW_HEIGHT
 }
 
+/** Where the bar of a row begins: rows count upwards from the lowest. */
+export function barPlace(row: number, frame: Box): Place {
+  return { x: frame.left + INSET, y: frame.bottom + INSET + row * ROW_HEIGHT }
+}
+
 /** Bars 10 mm long in the lower left corner, each saying what it stands for. */
 export function createScaleBars(
   unitsPerCentimetre: UnitsPerCentimetre,
@@ -33,17 +39,16 @@ export function createScaleBars(
   const boxes: Box[] = []
   const items: Item[] = []
   drawn.forEach((quantity, index) => {
-    const y = frame.bottom + INSET + (drawn.length - 1 - index) * ROW_HEIGHT
-    const x = frame.left + INSET
+    const { x, y } = barPlace(drawn.length - 1 - index, frame)
     const text: TextRun = {
       text: formatScale(unitsPerCentimetre[quantity] ?? 1, quantity),
       face: 'sans',
-      size: TEXT_SIZE,
+      size: SCALE_TEXT_SIZE,
     }
     items.push(barItem(x, y, quantity, palette), {
       part: 'scale-bar',
       kind: 'text',
-      at: { x: x + BAR + 3, y: y - 0.36 * TEXT_SIZE },
+      at: { x: x + BAR + 3, y: y - 0.36 * SCALE_TEXT_SIZE },
       anchor: 'start',
       runs: [text],
       fill: palette.ink,

@@ -1,4 +1,5 @@
 import type { Caution, PhasorEvaluation } from '../evaluation'
+import { openCautions } from './open'
 import type { SheetProblem } from './sheet-problem'
 import type { SolvedPart, SolvedSheet } from './solved-sheet'
 
@@ -42,31 +43,6 @@ function cautionsOfPart(solved: SolvedPart, problem: SheetProblem): readonly Cau
       text: `Small errors change the diagram of ${phasors} out of proportion: its limits come from many random draws.`,
     },
   ]
-}
-
-/** One sentence on the first open value of each part: what would settle it. */
-function openCautions(
-  phasors: readonly PhasorEvaluation[],
-  problem: SheetProblem,
-  solved: SolvedSheet,
-): readonly Caution[] {
-  return solved.parts.flatMap(({ part, isTooLarge }) => {
-    const open = part.phasors
-      .flatMap((place) => phasors[place ?? -1] ?? [])
-      .find(
-        ({ magnitudeState, angleState, magnitude }) =>
-          magnitudeState === 'open' || (angleState === 'open' && magnitude !== 0),
-      )
-    if (open === undefined || isTooLarge) return []
-    const what = open.magnitudeState === 'open' ? 'magnitude' : 'angle'
-    const label = labelOf(problem.names.phasor.get(open.id), problem) ?? open.id
-    return [
-      {
-        about: open.id,
-        text: `Nothing fixes the ${what} of ${label}: a reading of it would.`,
-      },
-    ]
-  })
 }
 
 /** What whoever reads the answer should know. */

@@ -1,9 +1,9 @@
 import { differenceDegrees, fromPolar } from '../../core'
-import type { Drawing, Found } from '../../core/estimate'
+import { type Drawing, type Found, regionOf } from '../../core/estimate'
 import type { PartState, PhasorEvaluation } from '../evaluation'
 import type { Phasor } from '../types'
 import type { SheetProblem } from './sheet-problem'
-import { observablesAt, type SolvedSheet } from './solved-sheet'
+import { observablesAt, type Place, type SolvedSheet } from './solved-sheet'
 
 /** A best value this near to what was read, relative to it, was not adjusted. */
 const UNMOVED = 1e-9
@@ -60,10 +60,18 @@ export function evaluatePhasor(
     ...rectangularOf(phasor, magnitude, angle),
     ...(magnitude.limit === undefined ? {} : { magnitudeLimit: magnitude.limit }),
     ...(angle.limit === undefined ? {} : { angleLimit: angle.limit }),
+    ...regionIn(place, magnitude.value ?? 0),
     asRead: read,
     magnitudeState: magnitude.state,
     angleState: angle.state,
   }
+}
+
+/** What is exact has no region: what is left is the solver's rounding. */
+function regionIn(place: Place | undefined, size: number): Pick<PhasorEvaluation, 'region'> {
+  const covariance = place?.drawing.tipCovariance(place.place)
+  const region = covariance && regionOf(covariance)
+  return region && region.major > UNMOVED * size ? { region } : {}
 }
 
 function rectangularOf(phasor: Phasor, magnitude: Part, angle: Part) {

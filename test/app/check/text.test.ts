@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { checkText } from '../../../src/app/check/text'
 import { quick, type Sheet } from '../../../src/sheet'
+import { evaluate } from '../../../src/sheet/estimate'
 import { phasor, sheetOf, sum } from '../../drawing/sheets'
 
 function textOf(sheet: Sheet, unitsPerCentimetre: number | undefined = 5) {
@@ -75,6 +76,29 @@ describe('the check line', () => {
       under: expect.stringMatching(/no angle yet/),
     })
     expect(difference).toMatchObject({ figure: '−1.0 V', under: '−2.0 %' })
+  })
+
+  it('keeps the allowance of the sheet before, marked, until the new one comes', () => {
+    const sheet = sheetOf(withSupply, { sums: [sum('s', ['V1', 'V2'], { equals: 'VS' })] })
+    const [first] = sheet.sums ?? []
+    if (!first) throw new Error('The sheet has no sum.')
+    const whole = evaluate(sheet)
+    const sure = checkText(sheet, whole, first, 5).figures
+    const former = { evaluation: whole, phasors: new Set<string>() }
+    const waiting = checkText(sheet, quick(sheet), first, 5, false, former).figures
+    expect(waiting.map(({ name }) => name)).toEqual(sure.map(({ name }) => name))
+    expect(waiting.filter(({ isFormer }) => isFormer).map(({ name }) => name)).toEqual([
+      'Gap allowed',
+    ])
+    expect(sure.filter(({ isFormer }) => isFormer)).toEqual([])
+    const nothing = { evaluation: undefined, phasors: new Set<string>() }
+    const awaited = checkText(sheet, quick(sheet), first, 5, false, nothing).figures
+    expect(awaited.at(-1)).toMatchObject({ name: 'Gap allowed', figure: '–', isFormer: true })
+    const solved = { evaluation: whole, phasors: new Set(['V2']) }
+    const hanging = checkText(sheet, quick(sheet), first, 5, false, solved).figures
+    expect(hanging.filter(({ isFormer }) => !isFormer).map(({ name }) => name)).toEqual([
+      'Measured',
+    ])
   })
 
   it('leaves the millimetres out where nothing is drawn', () => {

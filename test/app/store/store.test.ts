@@ -62,4 +62,22 @@ describe('the store', () => {
     expect(store.getState().notice?.offer).toBe('undo')
     expect(shownSheet(store.getState()).sums?.[0]?.terms).toEqual([{ phasor: 'V1' }])
   })
+
+  it('draws as read again where a pen is taken up, and says so', () => {
+    const store = createStore(sheet, 'new')
+    store.getState().showValues('adjusted')
+    store.getState().setPen({ mode: 'hand' })
+    expect(store.getState().values).toBe('read')
+    expect(store.getState().notice?.text).toContain('as read again')
+  })
+
+  it('puts the pen down where the adjusted values are shown, and says so', () => {
+    const store = createStore(sheet, 'new')
+    store.getState().setPen({ mode: 'hand' })
+    expect(store.getState().notice).toBeUndefined()
+    store.getState().showValues('adjusted')
+    expect(store.getState().pen.mode).toBeUndefined()
+    expect(store.getState().values).toBe('adjusted')
+    expect(store.getState().notice?.text).toContain('pen is put down')
+  })
 })

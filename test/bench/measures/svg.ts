@@ -1,5 +1,5 @@
 import { layout, svg } from '../../../src/drawing'
-import { evaluate, type Sheet } from '../../../src/sheet'
+import { quick, type Sheet } from '../../../src/sheet'
 import { type Measure, millisecondsOf, ratioOfMedians } from '../measure'
 
 /** A thousand phasors, every one a term of one sum. */
@@ -41,7 +41,7 @@ export const svgAgainstJoining: Measure = {
   goal: 3,
   measure: () => {
     const sheet = thousand()
-    const scene = layout(sheet, evaluate(sheet))
+    const scene = layout(sheet, quick(sheet))
     const text = svg(scene, '{}')
     const parts = takeApart(text)
     if (join(parts) !== text) throw new Error('The two documents are not the same.')

@@ -4,8 +4,8 @@ import { loopKinds, TANGENT_BAND } from './loops'
 import { recover } from './recovery'
 
 const LOOPS = 40
-/** Fresh in every run; set SEED to replay a failure. */
-const seed = Number(process.env.SEED ?? Math.floor(Math.random() * 2 ** 31))
+/** The same in every run; the bench takes fresh ones. SEED names another. */
+const seed = Number(process.env.SEED ?? 712_004_933)
 
 describe(`random solvable loops, seed ${seed}`, () => {
   test.each(Object.entries(loopKinds))(

@@ -56,7 +56,7 @@ describe('the verdict', () => {
       undefined,
     ])
     expect(evaluation.cautions?.map(({ text }) => text)).toEqual([
-      'Nothing fixes the angle of V1: a reading of it would.',
+      'Nothing fixes the angle of V1 or the magnitude and angle of V2: a reading of the magnitude of V2 would.',
     ])
   })
 

@@ -1,11 +1,11 @@
 import fc from 'fast-check'
 import { fromPolar, wrapDegrees } from '../../../src/core'
 import {
-  evaluate,
   type HandArrow,
   type HandEvaluation,
   type Phasor,
   type Place,
+  quick,
   type Sheet,
 } from '../../../src/sheet'
 import { sheetOf } from '../sheets'
@@ -104,7 +104,7 @@ export function sheetOfBuilt(built: Built, degrees = 0, factor = 1): Sheet {
 
 /** What is said of one hand arrow. Throws where nothing is. */
 export function saidOf(sheet: Sheet, id: string): Required<HandEvaluation> {
-  const found = evaluate(sheet).hand.find((each) => each.id === id)
+  const found = quick(sheet).hand.find((each) => each.id === id)
   if (found?.ownError === undefined) throw new Error(`nothing is compared for ${id}`)
   return found as Required<HandEvaluation>
 }

@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { evaluate, largestContribution, type Place, type Sheet } from '../../../src/sheet'
+import { largestContribution, type Place, quick, type Sheet } from '../../../src/sheet'
 import { polar, sheetOf } from '../sheets'
 import { anyBuilt, saidOf, sheetOfBuilt } from './constructions'
 
@@ -108,11 +108,11 @@ describe('a hand arrow', () => {
   })
 
   it('says nothing without a scale, and compares nothing with what is open', () => {
-    expect(evaluate(triangle([first], { drawing: {} })).hand).toEqual([{ id: 'h1' }])
+    expect(quick(triangle([first], { drawing: {} })).hand).toEqual([{ id: 'h1' }])
     const open = triangle([first], {
       phasors: [{ id: 'V1', label: 'V1', quantity: 'voltage' }, polar('V2', '40', '90')],
     })
-    expect(evaluate(open).hand).toEqual([{ id: 'h1', magnitude: 30.5, angle: 0 }])
+    expect(quick(open).hand).toEqual([{ id: 'h1', magnitude: 30.5, angle: 0 }])
   })
 
   it('is held to the tolerance that the sheet states', () => {
@@ -124,22 +124,22 @@ describe('a hand arrow', () => {
   })
 
   it('is not there where nothing was drawn', () => {
-    expect(evaluate(triangle(undefined)).hand).toEqual([])
+    expect(quick(triangle(undefined)).hand).toEqual([])
   })
 })
 
 describe('the arrow that contributes most to the miss', () => {
   it('is the one whose own error lies along it, not the one that inherits it', () => {
     const sheet = triangle([first, second, closing])
-    const most = largestContribution(sheet, evaluate(sheet), 's1')
+    const most = largestContribution(sheet, quick(sheet), 's1')
     expect(most?.arrow.id).toBe('h1')
     expect(most?.amount).toBeCloseTo(0.5, 12)
   })
 
   it('is nobody where nothing is missed', () => {
     const sheet = triangle([{ ...first, to: at(110, 50) }])
-    expect(largestContribution(sheet, evaluate(sheet), 's1')).toBeUndefined()
-    expect(largestContribution(triangle(undefined), evaluate(sheet), 's1')).toBeUndefined()
+    expect(largestContribution(sheet, quick(sheet), 's1')).toBeUndefined()
+    expect(largestContribution(triangle(undefined), quick(sheet), 's1')).toBeUndefined()
   })
 })
 
@@ -149,7 +149,7 @@ describe('in any construction', () => {
       fc.property(anyBuilt, (built) => {
         const sheet = sheetOfBuilt(built)
         const perMillimetre = built.scale / 10
-        const exact = evaluate(sheet)
+        const exact = quick(sheet)
         let tip = { re: 0, im: 0 }
         built.strokes.forEach(({ sign }, index) => {
           const arrow = sheet.hand?.[index]
@@ -175,7 +175,7 @@ describe('in any construction', () => {
       fc.property(anyBuilt, (loose) => {
         const strokes = loose.strokes.map((each) => ({ ...each, aside: { x: 0, y: 0 } }))
         const sheet = sheetOfBuilt({ ...loose, strokes })
-        const said = evaluate(sheet).hand
+        const said = quick(sheet).hand
         const total = saidOf(sheet, 'h')
         const sum = said.reduce(
           (all, { ownError }) => ({
@@ -201,7 +201,7 @@ describe('in any construction', () => {
         fc.double({ min: -180, max: 180, noNaN: true }),
         fc.double({ min: 0.1, max: 10, noNaN: true }),
         (built, degrees, factor) => {
-          const verdicts = (sheet: Sheet) => evaluate(sheet).hand.map(({ within }) => within)
+          const verdicts = (sheet: Sheet) => quick(sheet).hand.map(({ within }) => within)
           const before = verdicts(sheetOfBuilt(built))
           expect(before).not.toContain(undefined)
           expect(verdicts(sheetOfBuilt(built, degrees, factor))).toEqual(before)
@@ -218,7 +218,7 @@ describe('in any construction', () => {
           scale: built.scale * factor,
           strokes: built.strokes.map((each) => ({ ...each, magnitude: each.magnitude * factor })),
         }
-        const verdicts = (sheet: Sheet) => evaluate(sheet).hand.map(({ within }) => within)
+        const verdicts = (sheet: Sheet) => quick(sheet).hand.map(({ within }) => within)
         expect(verdicts(sheetOfBuilt(grown))).toEqual(verdicts(sheetOfBuilt(built)))
       }),
     )
