@@ -102,7 +102,12 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
         <KnownChoice id={phasor.id} name={name} known={text.known} />
         {best && (
           <p className="best" data-former={former || undefined}>
-            {best.state}
+            {best.states.map(({ of, state }) => (
+              <span key={of}>
+                {of !== '' && <span className="visually-hidden">{of} </span>}
+                {state}
+              </span>
+            ))}
           </p>
         )}
       </td>

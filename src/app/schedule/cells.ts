@@ -176,8 +176,8 @@ function knownOf(
 export interface BestText {
   /** Each best value with its limit. */
   readonly values: readonly string[]
-  /** How each part came to be: `magnitude adjusted, angle solved`. */
-  readonly state: string
+  /** How each part came to be; one line where both came to be alike. */
+  readonly states: readonly { readonly of: string; readonly state: string }[]
 }
 
 /** What was worked out of a phasor; undefined where nothing was. */
@@ -193,11 +193,14 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
       ? []
       : [withLimit(angle, angleLimit, '°', ROUNDING * 180)]),
   ]
-  const state =
+  const states =
     magnitudeState === angleState
-      ? magnitudeState
-      : `magnitude ${magnitudeState}, angle ${angleState}`
-  return { values, state }
+      ? [{ of: '', state: magnitudeState }]
+      : [
+          { of: 'magnitude', state: magnitudeState },
+          { of: 'angle', state: angleState },
+        ]
+  return { values, states }
 }
 
 /** A limit below this share of a size is rounding: the value is exact. */
