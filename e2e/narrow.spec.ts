@@ -1,5 +1,6 @@
 import type { Page } from '@playwright/test'
 import { emptySheet, type Sheet } from '../src/sheet'
+import { brakeSheet } from './support/circuit'
 import { fullSheet, longSheet } from './support/full'
 import { openPage } from './support/page'
 import { screens } from './support/screens'
@@ -10,6 +11,7 @@ const sheets: readonly (readonly [string, Sheet | undefined])[] = [
   ['an empty sheet', emptySheet()],
   ['a full sheet', fullSheet],
   ['the longest texts', longSheet],
+  ['a circuit', brakeSheet()],
 ]
 
 for (const [name, sheet] of sheets) {

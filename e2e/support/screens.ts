@@ -1,6 +1,7 @@
 import type { Page } from '@playwright/test'
 import { emptySheet } from '../../src/sheet'
 import { benchSheet } from './bench'
+import { brakeSheet, circuitOf } from './circuit'
 import { fullSheet } from './full'
 import { openPage } from './page'
 import { cell } from './schedule'
@@ -44,6 +45,24 @@ export const screens: readonly Screen[] = [
       await cell(page, 'Magnitude', 'V2').press('Enter')
       await expect(page.getByRole('alert')).toBeVisible()
       await expect(page.getByRole('group', { name: 'The row of V2' })).toBeVisible()
+    },
+  },
+  {
+    name: 'a circuit with a bad capacitor',
+    part: '.circuit',
+    reach: async (page) => {
+      await afresh(
+        page,
+        brakeSheet([
+          { id: 'r1', of: 'I', kind: 'magnitude', shown: '1.130' },
+          { id: 'r2', of: 'I', kind: 'angle', shown: '74.3', sense: 'leads' },
+          { id: 'r3', of: 'VR', kind: 'magnitude', shown: '53.1' },
+          { id: 'r4', of: 'VC', kind: 'magnitude', shown: '274.6' },
+        ]),
+      )
+      await circuitOf(page).getByText('Assumed tolerance, wet places, discharging').click()
+      await circuitOf(page).getByLabel('More of coil').click()
+      await expect(circuitOf(page).getByText(/below tolerance/)).toBeVisible()
     },
   },
   {

@@ -2,7 +2,6 @@ import { partedFrom, type Sheet, wiringOf } from '../../sheet'
 import { answerOf, usePage, usePageStore } from '../store'
 import { AddElement } from './AddElement'
 import { Branches } from './Branches'
-import { CircuitCautions } from './CircuitCautions'
 import { CircuitSettings } from './CircuitSettings'
 import './circuit.css'
 import { Comparison } from './Comparison'
@@ -41,7 +40,6 @@ function Built({ sheet }: { readonly sheet: Sheet }) {
           <Impedances sheet={sheet} evaluation={evaluation} />
           <Powers sheet={sheet} evaluation={evaluation} />
           <Diagrams sheet={sheet} evaluation={evaluation ?? answer.evaluation} />
-          <CircuitCautions sheet={sheet} wiring={wiring} evaluation={evaluation} />
         </div>
       )}
       <DeleteCircuit />

@@ -58,8 +58,26 @@ export function ElementRow(properties: {
       </div>
       <ElementValues element={element} name={name} sheet={sheet} />
       <Found sheet={sheet} element={element} evaluation={evaluation} />
+      <ElementCautions element={element} evaluation={evaluation} />
       <ElementMore sheet={sheet} element={element} name={name} />
     </fieldset>
+  )
+}
+
+/** What the figures of an element call for; all cautions of the sheet stand with its best values. */
+function ElementCautions(properties: {
+  readonly element: CircuitElement
+  readonly evaluation: Evaluation | undefined
+}) {
+  const { element, evaluation } = properties
+  const own = (evaluation?.cautions ?? []).filter(({ about }) => about === element.id)
+  if (own.length === 0) return null
+  return (
+    <ul className="cautions">
+      {own.map(({ text }) => (
+        <li key={text}>{text}</li>
+      ))}
+    </ul>
   )
 }
 

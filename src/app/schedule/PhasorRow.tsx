@@ -102,18 +102,12 @@ export const PhasorRow = memo(function PhasorRow(properties: PhasorRowProperties
         <KnownChoice id={phasor.id} name={name} known={text.known} />
         {best && (
           <p className="best" data-former={former || undefined}>
-            {best.marks.length === 1 ? (
-              best.state
-            ) : (
-              <>
-                <span className="visually-hidden">{best.state}</span>
-                {best.marks.map((mark) => (
-                  <span key={mark} aria-hidden="true">
-                    {mark}
-                  </span>
-                ))}
-              </>
-            )}
+            {best.states.map(({ of, state }) => (
+              <span key={of}>
+                {of !== '' && <span className="visually-hidden">{of} </span>}
+                {state}
+              </span>
+            ))}
           </p>
         )}
       </td>

@@ -191,10 +191,8 @@ function knownOf(
 export interface BestText {
   /** Each best value with its limit. */
   readonly values: readonly string[]
-  /** How each part came to be: `magnitude adjusted, angle solved`. */
-  readonly state: string
-  /** The same in the few letters that the column has room for: `adjusted`, `∠ solved`. */
-  readonly marks: readonly string[]
+  /** How each part came to be; one line where both came to be alike. */
+  readonly states: readonly { readonly of: string; readonly state: string }[]
 }
 
 /** What was worked out of a phasor; undefined where nothing was. */
@@ -210,13 +208,14 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
       ? []
       : [withLimit(angle, angleLimit, '°', ROUNDING * 180)]),
   ]
-  const state =
+  const states =
     magnitudeState === angleState
-      ? magnitudeState
-      : `magnitude ${magnitudeState}, angle ${angleState}`
-  const marks =
-    magnitudeState === angleState ? [magnitudeState] : [magnitudeState, `∠ ${angleState}`]
-  return { values, state, marks }
+      ? [{ of: '', state: magnitudeState }]
+      : [
+          { of: 'magnitude', state: magnitudeState },
+          { of: 'angle', state: angleState },
+        ]
+  return { values, states }
 }
 
 /** A limit below this share of a size is rounding: the value is exact. */
