@@ -13,9 +13,11 @@ export { evaluate, quick } from './evaluate'
 export type * from './evaluation'
 export { emptySheet, exampleSheet } from './example'
 export { type ShownFigure, shownFigures } from './figures'
+export { fingerprintOf } from './fingerprint'
 export { type Contribution, largestContribution, tipErrorOf } from './hand/contribution'
 export { type Seat, seatsOf } from './hand/seats'
 export { toleranceOf } from './hand/tolerance'
+export { hazardsFrom, missingHazards, usualHazards } from './hazards'
 export { type Held, heldBy } from './held'
 export { commit, createHistory, type History, redo, type Step, undo } from './history'
 export * from './limits'
@@ -44,5 +46,12 @@ export { referenceOf } from './reference'
 export { type Remark, remarksOn } from './remarks'
 export { type RowsRead, readRows, tableOf } from './rows'
 export { formatErrors, type SheetError, type SheetResult } from './sheet-result'
+export {
+  type Signature,
+  type SignatureKind,
+  signatureOf,
+  voidedBetween,
+  voidedSignatureOf,
+} from './signatures'
 export { extractSheetText } from './svg-metadata'
 export type * from './types'

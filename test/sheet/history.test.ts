@@ -71,6 +71,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
     }
   }
   expect([...made].sort()).toEqual([
+    'add-hazard',
     'add-phasor',
     'add-reading',
     'add-sum',
@@ -81,16 +82,19 @@ test('random edits are often made, and of every kind', unhurried, () => {
     'move-sum',
     'place-phasor',
     'remove-hand-arrow',
+    'remove-hazard',
     'remove-phasor',
     'remove-reading',
     'remove-sum',
     'set-details',
     'set-drawing',
     'set-hand-arrow',
+    'set-hazard',
     'set-job',
     'set-known',
     'set-phasor',
     'set-reading',
+    'set-report',
     'set-sum',
     'set-value',
   ])

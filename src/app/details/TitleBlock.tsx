@@ -3,7 +3,7 @@ import type { Job } from '../../sheet'
 import { usePage, usePageStore } from '../store'
 import { Field } from './Field'
 
-const jobFields: readonly (readonly [keyof Job, string])[] = [
+const jobFields: readonly (readonly [Exclude<keyof Job, 'voided'>, string])[] = [
   ['number', 'Job number'],
   ['site', 'Site'],
   ['circuit', 'Circuit'],
