@@ -26,6 +26,9 @@ interface ItemCommon {
     | 'scale-bar'
     | 'title-block'
     | 'stamp'
+    | 'report'
+    | 'check-line'
+    | 'qr-code'
   /** The key of the placed arrow that it belongs to. */
   readonly arrow?: string
 }

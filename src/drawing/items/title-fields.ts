@@ -12,8 +12,10 @@ const COLUMNS = 3
 /**
  * The fields of a sheet below its title, row by row, named as ISO 7200 names them (from memory): what
  * the sheet fills, and always revision index, frequency with "rms", and sheet number.
+ *
+ * @param sheetNumber Which of how many sheets it is.
  */
-export function fieldRowsOf(sheet: Sheet): Field[][] {
+export function fieldRowsOf(sheet: Sheet, sheetNumber = 'Sheet 1 of 1'): Field[][] {
   const job = sheet.job ?? {}
   const optional: [string, string | undefined][] = [
     ['Identification number', job.number],
@@ -36,7 +38,7 @@ export function fieldRowsOf(sheet: Sheet): Field[][] {
   rows.push([
     { caption: 'Revision index', value: sheet.revision?.trim() || '0' },
     { caption: 'Frequency and values', value: frequency ? `${frequency} · rms` : 'rms' },
-    { caption: 'Sheet number', value: 'Sheet 1 of 1' },
+    { caption: 'Sheet number', value: sheetNumber },
   ])
   return rows
 }
