@@ -54,4 +54,8 @@ export {
   voidedSignatureOf,
 } from './signatures'
 export { extractSheetText } from './svg-metadata'
+export { readingsTable } from './tables/readings-table'
+export { scheduleTable } from './tables/schedule-table'
+export { sumsTable } from './tables/sums-table'
+export type { Cell, Table } from './tables/table'
 export type * from './types'
