@@ -36,7 +36,7 @@ export function paragraph(text: string, width: number): Block {
 
 /** A remark in small quiet letters. */
 export function note(text: string, width: number): Block {
-  return { pieces: [...lines(text, STYLES.note, width, INK.quiet), gap(1)] }
+  return { pieces: lines(text, STYLES.note, width, INK.quiet), space: 1.2 }
 }
 
 /** The heading of a section. */

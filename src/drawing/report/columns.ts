@@ -4,10 +4,10 @@ import type { TextRun } from '../scene'
 import { STYLES } from './style'
 import { type TextStyle, widestPiece, widthOf } from './wrap'
 
-/** What stands in a cell: plain text, set as `runs` where these fit on one line. */
+/** What stands in a cell: plain text, or that text in words of several faces, if each of these fits. */
 export interface Cell {
   readonly text: string
-  readonly runs?: readonly TextRun[]
+  readonly words?: readonly (readonly TextRun[])[]
 }
 
 /** A column of a table. */
@@ -71,10 +71,11 @@ function needsOf({ title }: Column, cells: readonly (Cell | undefined)[]): Need 
   }, head)
 }
 
-function needOf({ text, runs }: Cell, style: TextStyle): Need {
-  if (runs) {
-    const width = measureText(runs)
-    return { full: width, word: width }
+function needOf({ text, words }: Cell, style: TextStyle): Need {
+  if (words) {
+    const widths = words.map(measureText)
+    const spaces = (widths.length - 1) * widthOf(' ', style)
+    return { full: sum(widths) + spaces, word: Math.max(0, ...widths) }
   }
   const full = text.split('\n').reduce((most, line) => Math.max(most, widthOf(line, style)), 0)
   return { full, word: widestPiece(text, style) }

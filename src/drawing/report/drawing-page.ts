@@ -8,17 +8,17 @@ import { type Page, paperOf, type ReportOptions } from './page'
 /**
  * The drawing as a page, at exactly the scale that it states, on the paper that the sheet names.
  *
- * @param options Also how many pages belong together, of which the drawing is the first; else it stands alone.
+ * @param options Also how many pages belong together and which of them it is; else it stands alone.
  */
 export function drawingPage(
   sheet: Sheet,
   evaluation: Evaluation,
-  options: ReportOptions & { readonly count?: number } = {},
+  options: ReportOptions & { readonly count?: number; readonly number?: number } = {},
 ): Page {
-  const { count = 1, fingerprint, terminals, hidden } = options
+  const { count = 1, number = 1, fingerprint, terminals, hidden } = options
   const scene = drawnScene(sheet, evaluation, {
     theme: 'print',
-    sheetNumber: `Sheet 1 of ${count}`,
+    sheetNumber: `Sheet ${number} of ${count}`,
     ...(terminals !== undefined && { terminals }),
     ...(hidden && { hidden }),
   })
@@ -27,9 +27,9 @@ export function drawingPage(
     width: scene.width,
     height: scene.height,
     items: [...scene.items, ...footItems(scene, fingerprint)],
-    title: `Drawing: ${sheet.title.trim() || 'Untitled'}, sheet 1 of ${count}`,
+    title: `Drawing: ${sheet.title.trim() || 'Untitled'}, sheet ${number} of ${count}`,
     description: scene.description,
-    number: 1,
+    number,
     count,
     remarks: remarksOn(scene),
   }

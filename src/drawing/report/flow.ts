@@ -40,6 +40,8 @@ const ROUNDING = 1e-6
  */
 export function flow(blocks: readonly Block[], columns: readonly Box[]): FilledPage[] {
   const pages: Item[][] = []
+  const [first] = columns
+  const fullHeight = first === undefined ? 0 : first.top - first.bottom
   let column = columns.length
   let y = 0
   let isTop = true
@@ -63,8 +65,7 @@ export function flow(blocks: readonly Block[], columns: readonly Box[]): FilledP
 
   blocks.forEach((block, index) => {
     const { pieces, head = [], space = 0 } = block
-    const fullHeight = columns[0] === undefined ? 0 : columns[0].top - columns[0].bottom
-    const wanted = heightOf(pieces) + heightKeptWith(blocks, index)
+    const wanted = heightOf(pieces) + heightKeptWith(blocks, index, fullHeight)
     const isBreakable = heightOf(head) + wanted > fullHeight
     const needed = isBreakable ? heightOf(pieces.slice(0, 3)) : wanted
     if (room() < (isTop ? 0 : space) + needed) next()
@@ -79,10 +80,11 @@ export function flow(blocks: readonly Block[], columns: readonly Box[]): FilledP
 }
 
 /** How much of what follows a heading stays with it: up to the first block that is none. */
-function heightKeptWith(blocks: readonly Block[], index: number): number {
-  if (!blocks[index]?.isHeading) return 0
-  const following = blocks[index + 1]
+function heightKeptWith(blocks: readonly Block[], index: number, fullHeight: number): number {
+  const following = blocks[index]?.isHeading ? blocks[index + 1] : undefined
   if (following === undefined) return 0
-  const own = (following.space ?? 0) + heightOf(following.pieces.slice(0, 3))
-  return own + heightKeptWith(blocks, index + 1)
+  const { pieces, space = 0 } = following
+  const whole = heightOf(pieces)
+  const own = whole > 0.5 * fullHeight ? heightOf(pieces.slice(0, 3)) : whole
+  return space + own + heightKeptWith(blocks, index + 1, fullHeight)
 }

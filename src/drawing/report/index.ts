@@ -1,3 +1,4 @@
+export { constructionPages } from './construction-pages'
 export { drawingPage } from './drawing-page'
 export {
   type ModuleMatrix,

@@ -1,5 +1,6 @@
-import { formatAngle, formatLimit, formatQuantity } from '../../core'
+import { type FormatOptions, formatAngle, formatQuantity } from '../../core'
 import type { Id, Phasor, Quantity, Reading, Sheet, Sum } from '../../sheet'
+import type { TextRun } from '../scene'
 import { labelRuns } from '../text/label-runs'
 import type { Cell } from './columns'
 import { STYLES } from './style'
@@ -12,9 +13,33 @@ export function cell(text: string | undefined): Cell {
   return text === undefined || text.trim() === '' ? NOTHING : { text }
 }
 
+/** The em of a symbol in a line of text, in millimetres. */
+const SYMBOL_SIZE = 1.12 * STYLES.body.size
+
 /** A label, set as a symbol with its subscript. */
 export function labelCell(label: string): Cell {
-  return { text: label, runs: labelRuns(label, 1.12 * STYLES.body.size) }
+  return { text: label, words: [labelRuns(label, SYMBOL_SIZE)] }
+}
+
+/** Several labels with signs between them, set as symbols: `V1 + V2 = V`. */
+export function symbolsCell(text: string, labels: ReadonlySet<string>): Cell {
+  const words = text
+    .split(' ')
+    .map((word) => symbolRuns(word, labels) ?? [{ ...STYLES.body, text: word }])
+  return { text, words }
+}
+
+/** The runs of a label, with a sign before it or a comma behind it; undefined where it is none. */
+function symbolRuns(word: string, labels: ReadonlySet<string>): TextRun[] | undefined {
+  const [, sign = '', label = '', stop = ''] = /^(−?)(.*?)([,:]?)$/u.exec(word) ?? []
+  if (!labels.has(label)) return undefined
+  const plain = (text: string) => (text === '' ? [] : [{ ...STYLES.body, text }])
+  return [...plain(sign), ...labelRuns(label, SYMBOL_SIZE), ...plain(stop)]
+}
+
+/** The labels of all phasors. */
+export function labelsOf(sheet: Sheet): ReadonlySet<string> {
+  return new Set(sheet.phasors.map(({ label }) => label))
 }
 
 /** How a phasor is called. */
@@ -75,14 +100,21 @@ export function nameOfReading(sheet: Sheet, id: Id): string {
 /** A limit below this share of a size is rounding: the value is exact. */
 const ROUNDING = 1e-9
 
-/** A value with its limit, to no more digits than that supports: `48.21 V ± 0.35 V`. */
+/**
+ * A value with its limit, both to the second digit of the limit and in one unit: `48.21 V ± 0.35 V`,
+ * `133.6 mH ± 1.8 mH`. The limit is rounded up.
+ */
 export function limitedText(value: number, limit: number | undefined, unit: string): string {
   const isAngle = unit === '°'
-  const size = isAngle ? 180 : Math.abs(value)
-  const known = limit !== undefined && limit <= ROUNDING * size ? 0 : limit
-  const digits = known === undefined ? {} : { limit: known }
-  const text = isAngle ? formatAngle(value, digits) : formatQuantity(value, unit, digits)
-  return known === undefined || known === 0 ? text : `${text} ${formatLimit(known, unit)}`
+  const print = (size: number, digits: FormatOptions) =>
+    isAngle ? formatAngle(size, digits) : formatQuantity(size, unit, digits)
+  if (limit === undefined) return print(value, {})
+  if (limit <= ROUNDING * (isAngle ? 180 : Math.abs(value))) return print(value, { limit: 0 })
+  const resolution = 10 ** (Math.floor(Math.log10(limit)) - 1)
+  // What lies within a rounding error above is no reason for a wider limit.
+  const up = Math.ceil(limit / resolution - 1e-9) * resolution
+  const off = print(up, { resolution, like: Math.max(Math.abs(value), up) })
+  return `${print(value, { resolution })} ± ${off}`
 }
 
 /** A figure with its sign, plus or true minus; one that is nothing has none. */

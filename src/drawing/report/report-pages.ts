@@ -1,15 +1,10 @@
 import type { Evaluation, Sheet } from '../../sheet'
-import { frameItem, paperItem } from '../items/paper'
-import { frameOf, paperSizeOf } from '../paper'
-import type { Scene } from '../scene'
 import { columnsOf } from './columns-of-page'
 import { drawingPage, drawnScene } from './drawing-page'
-import { type FilledPage, flow } from './flow'
-import { footItems } from './foot'
+import { flow } from './flow'
 import { type Page, type Paper, paperOf, type ReportOptions } from './page'
 import { SECTIONS } from './sections'
-import { stripItems } from './strip'
-import { INK } from './style'
+import { sizeOf, textPage } from './text-page'
 
 const KIND = 'Job report'
 
@@ -37,46 +32,9 @@ export function reportPages(
   )
   const filled = flow(blocks, columns)
   const count = filled.length + 1
+  const common = { kind: KIND, paper, count, fingerprint: options.fingerprint }
   return [
     drawingPage(sheet, evaluation, { ...options, count }),
-    ...filled.map((page, index) =>
-      textPage(sheet, page, { paper, number: index + 2, count, fingerprint: options.fingerprint }),
-    ),
+    ...filled.map((page, index) => textPage(sheet, page, { ...common, number: index + 2 })),
   ]
-}
-
-/** The size of a paper in millimetres. */
-function sizeOf({ format, orientation }: Paper): Pick<Scene, 'width' | 'height'> {
-  return paperSizeOf({ paper: format, orientation })
-}
-
-function textPage(
-  sheet: Sheet,
-  { items }: FilledPage,
-  {
-    paper,
-    number,
-    count,
-    fingerprint,
-  }: { paper: Paper; number: number; count: number; fingerprint: string | undefined },
-): Page {
-  const size = sizeOf(paper)
-  const frame = frameOf(size)
-  const sheetNumber = `Sheet ${number} of ${count}`
-  return {
-    ...paper,
-    ...size,
-    items: [
-      paperItem(size, INK),
-      frameItem(frame, INK),
-      ...stripItems(sheet, KIND, sheetNumber, frame),
-      ...items,
-      ...footItems(size, fingerprint),
-    ],
-    title: `${KIND}: ${sheet.title.trim() || 'Untitled'}, sheet ${number} of ${count}`,
-    description: `Sheet ${number} of ${count} of the job report.`,
-    number,
-    count,
-    remarks: [],
-  }
 }

@@ -55,7 +55,7 @@ export function fieldList(
     pieces: [
       ...(index === 0 ? [] : [rule(width, RULES.row, INK.grid)]),
       ...rowPieces(
-        [{ text: caption, runs: [{ ...STYLES.caption, text: caption }] }, { text: value }],
+        [{ text: caption, words: [[{ ...STYLES.caption, text: caption }]] }, { text: value }],
         columns,
         widths,
         STYLES.body,
@@ -103,9 +103,21 @@ function rowPieces(
   return [gap(PADDING), ...pieces, gap(PADDING)]
 }
 
-function cellLines({ text, runs }: Cell, style: TextStyle, width: number): Line[] {
-  if (runs && measureText(runs) <= width) return [runs]
+function cellLines({ text, words }: Cell, style: TextStyle, width: number): Line[] {
+  if (words?.every((word) => measureText(word) <= width)) return wrapWords(words, style, width)
   return wrapText(text, style, width).map((line) => [{ ...style, text: line }])
+}
+
+/** Words as lines, with a plain space between two. */
+function wrapWords(words: readonly Line[], style: TextStyle, width: number): Line[] {
+  const space = { ...style, text: ' ' }
+  const lines: TextRun[][] = []
+  for (const word of words) {
+    const line = lines.at(-1)
+    if (line && measureText([...line, space, ...word]) <= width) line.push(space, ...word)
+    else lines.push([...word])
+  }
+  return lines
 }
 
 function linePiece(

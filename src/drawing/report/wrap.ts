@@ -16,8 +16,19 @@ export function wrapText(text: string, style: TextStyle, width: number): string[
   return text
     .replace(/\r\n?/g, '\n')
     .split('\n')
-    .flatMap((line) => wrapLine(line.replace(/\s+/gu, ' ').trim(), style, width))
-    .map(isolate)
+    .flatMap((line) => wrapLine(bind(line.replace(/\s+/gu, ' ').trim()), style, width))
+    .map((line) => isolate(line.replaceAll(BOUND, ' ')))
+}
+
+/** The space that no line is broken at; on the page it is a plain one, so that it is found as such. */
+const BOUND = '\u00a0'
+
+/** Keeps a figure with its unit, ± with what follows, and an angle with its sign. */
+function bind(text: string): string {
+  return text
+    .replace(/(?<=[\d–]) (?=[pnµmkMGT]?(?:V|VA|A|Ω|W|var|Hz|H|F|s|m|%|σ)(?![\p{L}\d]))/gu, BOUND)
+    .replace(/(?<=[±∠−+<>=]) (?=[\d−jπ.])/gu, BOUND)
+    .replace(/ (?=∠)/gu, BOUND)
 }
 
 /** The width of a line in millimetres. */
@@ -27,7 +38,7 @@ export function widthOf(text: string, style: TextStyle): number {
 
 /** The width of the widest piece of a text that is best not broken, in millimetres. */
 export function widestPiece(text: string, style: TextStyle): number {
-  return piecesOf(text.replace(/\s+/gu, ' ')).reduce(
+  return piecesOf(bind(text.replace(/\s+/gu, ' '))).reduce(
     (widest, piece) => Math.max(widest, widthOf(piece.trimEnd(), style)),
     0,
   )

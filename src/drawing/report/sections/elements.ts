@@ -2,7 +2,7 @@ import { unitOf } from '../../../core'
 import type { CircuitElement, ElementEvaluation, Sheet } from '../../../sheet'
 import { heading } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, labelOf, limitedText } from '../names'
+import { cell, labelOf, labelsOf, limitedText, symbolsCell } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 
@@ -43,7 +43,10 @@ function rowOf(
   return [
     cell(element.label ?? element.id),
     cell(element.kind),
-    cell(`${labelOf(sheet, element.voltage)}, ${labelOf(sheet, element.current)}`),
+    symbolsCell(
+      `${labelOf(sheet, element.voltage)}, ${labelOf(sheet, element.current)}`,
+      labelsOf(sheet),
+    ),
     cell(
       QUANTITIES.flatMap(([name, symbol, unit]) => {
         const value = marked?.[name]

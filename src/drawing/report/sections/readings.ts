@@ -70,16 +70,19 @@ const NAMES: { readonly [kind in Reading['kind']]: string } = {
 
 /** What the display showed, with the unit where the digits do not say it. */
 function shownText(sheet: Sheet, reading: Reading): string {
-  const text = readingText(reading).replace(/^-/, '−')
-  const [, figure = '', rest = ''] = /^([\d.,−+\s]*\d)(.*)$/s.exec(text) ?? []
+  const text = readingText(reading)
+  const shown = 'shown' in reading ? String(reading.shown) : ''
+  const isBare = /\d\.?$/.test(shown)
+  const figure = `${shown}${isBare ? unitOfReading(sheet, reading) : ''}`.replace(/^-/, '−')
+  const whole = shown === '' ? text : `${figure}${text.slice(shown.length)}`
+  return `${NAMES[reading.kind]}${whole}${besides(sheet, reading)}`
+}
+
+function unitOfReading(sheet: Sheet, reading: Reading): string {
+  if (reading.kind !== 'magnitude') return UNITS[reading.kind]
   const quantity = phasorOf(sheet, reading.of)?.quantity ?? 'other'
-  const own = reading.kind === 'magnitude' && reading.shunt !== undefined ? 'V' : unitOf(quantity)
-  const unit = reading.kind === 'magnitude' ? (own === '' ? '' : ` ${own}`) : UNITS[reading.kind]
-  const isBare =
-    figure !== '' &&
-    !/^\s*[\p{L}°Ω]/u.test(rest.replace(/^\s*(leads|lags|of|peak|rms|turns?|ratio|shunt)\b/, ''))
-  const shown = isBare && unit !== '' ? `${figure}${unit}${rest}` : text
-  return `${NAMES[reading.kind]}${shown}${besides(sheet, reading)}`
+  const unit = reading.shunt === undefined ? unitOf(quantity) : 'V'
+  return unit === '' ? '' : ` ${unit}`
 }
 
 /** What it was taken against or with, and how often. */

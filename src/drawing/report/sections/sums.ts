@@ -11,7 +11,17 @@ import { digitsOfResult, formatPaperLength } from '../../text/phasor-text'
 import { type Digits, digitsOf, readingsByPhasor } from '../../text/resolution'
 import { heading } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, equationOf, labelOf, NOTHING, nameOfSum, quantityOfSum, signed } from '../names'
+import {
+  cell,
+  equationOf,
+  labelOf,
+  labelsOf,
+  NOTHING,
+  nameOfSum,
+  quantityOfSum,
+  signed,
+  symbolsCell,
+} from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 
@@ -56,7 +66,7 @@ function rowOf(
   const name = nameOfSum(sheet, sum)
   const named = sum.label === undefined ? equation : `${name}: ${equation}`
   return [
-    cell(named),
+    symbolsCell(named, labelsOf(sheet)),
     resultant === undefined
       ? cell(`open: ${openIn(sheet, sum, found)}`)
       : cell(polar(resultant, unit, digits)),
