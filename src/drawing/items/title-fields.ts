@@ -1,4 +1,4 @@
-import type { Sheet } from '../../sheet'
+import { type Sheet, type SignatureKind, signatureOf, voidedSignatureOf } from '../../sheet'
 import { formatFrequency } from '../text/quantity-text'
 
 /** A field of the title block. */
@@ -23,8 +23,8 @@ export function fieldRowsOf(sheet: Sheet, sheetNumber = 'Sheet 1 of 1'): Field[]
     ['Supplementary title', job.circuit],
     ['Site', job.site],
     ['Creator', job.testedBy],
-    ['Checked by', job.checkedBy],
-    ['Approval person', job.approvedBy],
+    ['Checked by', signedText(sheet, 'checked')],
+    ['Approval person', signedText(sheet, 'approved')],
   ]
   const filled = optional.flatMap(([caption, value = '']) =>
     value.trim() === '' ? [] : [{ caption, value: value.trim() }],
@@ -41,4 +41,12 @@ export function fieldRowsOf(sheet: Sheet, sheetNumber = 'Sheet 1 of 1'): Field[]
     { caption: 'Sheet number', value: sheetNumber },
   ])
   return rows
+}
+
+/** Who signed and on which day, or whose signature no longer holds. */
+function signedText(sheet: Sheet, kind: SignatureKind): string | undefined {
+  const signature = signatureOf(sheet, kind)
+  const voided = voidedSignatureOf(sheet, kind)
+  if (signature === undefined) return voided && `VOID: ${voided.by}`
+  return signature.date === undefined ? signature.by : `${signature.by}, ${signature.date}`
 }
