@@ -3,5 +3,16 @@
  * imported at need elsewhere is named here too.
  */
 export async function fetchLater(): Promise<void> {
-  await Promise.allSettled([import('papaparse'), import('./share/qr-code')])
+  await Promise.allSettled([
+    import('papaparse'),
+    import('./share/qr-code'),
+    import('./link/read-file'),
+    import('./details/TitleFields'),
+    import('./details/DrawingFields'),
+    import('./report/Hazards'),
+    import('./report/FindingFields'),
+    import('./report/ReportDialog'),
+    import('../drawing/pdf'),
+    import('./report/print-fonts').then(({ loadPrintFonts }) => loadPrintFonts()),
+  ])
 }
