@@ -43,19 +43,27 @@ function* streamsIn(text: string): Generator<Stream> {
       continue
     }
     const start = Math.max(text.lastIndexOf('obj', at), at - LONGEST_DICTIONARY)
+    const dictionary = text.slice(start, at)
     const from = at + STREAM.length + line[0].length
-    const end = text.indexOf(END, endByLength(text.slice(start, at), from, text))
-    if (end < 0) return
-    yield { dictionary: text.slice(start, at), from, to: end }
-    at = end + END.length
+    const to = endByLength(dictionary, from, text) ?? endByWord(from, text)
+    if (to === undefined) return
+    yield { dictionary, from, to }
+    at = text.indexOf(END, to) + END.length
   }
 }
 
-/** Where a stream ends at the earliest: packed bytes may happen to spell its end. */
-function endByLength(dictionary: string, from: number, text: string): number {
-  const length = Number(/\/Length\s+(\d{1,9})(?!\s+\d+\s+R)/.exec(dictionary)?.[1] ?? 0)
-  const end = from + length
-  return text.slice(end, end + END.length + 2).includes(END) ? end : from
+/** Where a stream ends as its dictionary says; undefined where that is not so, or stands elsewhere. */
+function endByLength(dictionary: string, from: number, text: string): number | undefined {
+  const length = /\/Length\s+(\d{1,9})(?!\d|\s+\d+\s+R)/.exec(dictionary)?.[1]
+  const to = from + Number(length)
+  return /^\s{0,2}endstream/.test(text.slice(to, to + 12)) ? to : undefined
+}
+
+/** Where a stream ends by the word behind it, and the line end before that. */
+function endByWord(from: number, text: string): number | undefined {
+  const end = text.indexOf(END, from)
+  if (end < 0) return undefined
+  return end - (/\r?\n$/.exec(text.slice(end - 2, end))?.[0].length ?? 0)
 }
 
 function isFile({ dictionary }: Stream): boolean {

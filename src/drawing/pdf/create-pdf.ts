@@ -12,7 +12,7 @@ export interface PdfOptions {
   readonly fonts: PdfFonts
   /** The sheet as JSON, which the PDF carries as an attached file. */
   readonly sheetText?: string
-  /** Paints what the typefaces lack; without it such a text is spelled. */
+  /** Paints what the typefaces lack; without it a note stands in its place. */
   readonly paintText?: PaintText
   readonly author?: string
   /** When it is made; now where nothing is said. */

@@ -71,7 +71,7 @@ function addFace(document: jsPDF, face: Face, bytes: Uint8Array): PdfFace {
         return sum + (glyph === 0 ? 0 : metadata.widthOfGlyph(glyph) / 1000)
       }, 0),
     stand: (letter, forUnit) => {
-      metadata.toUnicode[glyphOf(letter.charCodeAt(0))] = forUnit
+      if (letter !== '') metadata.toUnicode[glyphOf(letter.charCodeAt(0))] = forUnit
     },
   }
 }

@@ -1,6 +1,6 @@
 import type { TextRun } from '../scene'
-import type { PdfFace } from './faces'
 import { type Lettering, letter, type Missing, type Setting, takeFace } from './lettering'
+import { visualOrder } from './visual-order'
 
 /** A text as a picture with a clear ground: PNG bytes or a data address, and where it lies about its baseline. */
 export interface PaintedText {
@@ -29,27 +29,30 @@ const NARROWEST = 0.7
 /**
  * Draws what the typefaces lack as a picture, with letters over it that cannot be seen and stand for its
  * characters, so that the text is found and copied in the order in which it is read. Where nothing can
- * paint, as outside a browser, a note that spells the characters takes the picture's place.
+ * paint, as outside a browser, a note in brackets takes the picture's place.
  */
 export function createMissing(paint: PaintText | undefined): Missing {
   const spares = new Map<number, string>()
-  const spareFor = (unit: number, face: PdfFace): string | undefined => {
+  const spareFor = (unit: number): string => {
     const known = spares.get(unit)
     if (known !== undefined) return known
-    if (spares.size >= SPARES) return undefined
-    const letterOfUnit = String.fromCharCode(FIRST_SPARE + spares.size)
-    spares.set(unit, letterOfUnit)
-    face.stand(letterOfUnit, unit)
-    return letterOfUnit
+    // Where all are given out, the rest is seen, and not found.
+    if (spares.size >= SPARES) return ''
+    const spare = String.fromCharCode(FIRST_SPARE + spares.size)
+    spares.set(unit, spare)
+    return spare
   }
   return {
     draw: (lettering, run, setting, room) => {
       const picture = paint?.(run, setting.fill)
       if (picture) drawPicture(lettering, picture, setting, room)
       else drawNote(lettering, run, setting, room)
-      const { sans } = lettering.faces
-      const units = run.text.split('').flatMap((unit) => spareFor(unit.charCodeAt(0), sans) ?? [])
-      drawUnseen(lettering, units.join(''), run.size, setting, room)
+      const units = visualOrder(run.text)
+        .split('')
+        .map((unit) => unit.charCodeAt(0))
+      drawUnseen(lettering, units.map(spareFor).join(''), run.size, setting, room)
+      // The library has taken each spare letter for the character that it is drawn by.
+      for (const unit of units) lettering.faces.sans.stand(spareFor(unit), unit)
     },
   }
 }
@@ -73,17 +76,13 @@ function drawPicture(
   document.addImage(data, 'PNG', left, bottom - height, own, height, undefined, 'FAST', turn)
 }
 
-/** The characters spelled, as many as there is room for. */
+/** What stands where nothing can paint, the first that there is room for: the sheet itself has the text. */
+const NOTES = ['[see the attached sheet]', '[see sheet]', '[…]'] as const
+
 function drawNote(lettering: Lettering, run: TextRun, setting: Setting, room: number): void {
   const { sans } = lettering.faces
-  const characters = [...run.text].filter((character) => character.trim() !== '')
-  const codes = characters.map(
-    (character) =>
-      `U+${(character.codePointAt(0) ?? 0).toString(16).toUpperCase().padStart(4, '0')}`,
-  )
-  const notes = [`[${codes.join(' ')}]`, `[${characters.length} letters: see the sheet]`, `[…]`]
   const fits = (note: string) => sans.widthOf(note) * run.size * NARROWEST <= room
-  const note = notes.find(fits) ?? '[…]'
+  const note = NOTES.find(fits) ?? '[…]'
   letter(lettering, { ...run, text: note }, sans, setting, room)
 }
 
