@@ -5,6 +5,7 @@ import { useEarlier } from '../keep/useEarlier'
 import { usePage, usePageStore } from '../store'
 import { Field } from './Field'
 import { VoidedSignatures } from './VoidedSignatures'
+import './title.css'
 
 interface JobField {
   readonly field: Exclude<keyof Job, 'voided'>
@@ -77,9 +78,9 @@ export function TitleFields() {
       </div>
       <VoidedSignatures sheet={sheet} />
       <p className="fingerprint">
-        Fingerprint of the data <output className="figures">{fingerprintOf(sheet)}</output>. It is
-        printed on the report: whoever has the same sheet finds the same one, and any change gives
-        another. Signatures and paper are left out of it.
+        Fingerprint of the data <output>{fingerprintOf(sheet)}</output>. It is printed on the
+        report: whoever has the same sheet finds the same one, and any change gives another.
+        Signatures and paper are left out of it.
       </p>
     </>
   )

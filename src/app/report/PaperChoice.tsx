@@ -5,7 +5,7 @@ import type { Choice, Kind } from './pages'
 const kinds: readonly Kind[] = ['report', 'construction']
 const kindNames: { readonly [kind in Kind]: string } = {
   report: 'job report',
-  construction: 'construction sheet and its answer sheet',
+  construction: 'construction sheets',
 }
 const formats: readonly Paper['format'][] = ['A4', 'A3', 'Letter']
 const orientations: readonly Paper['orientation'][] = ['landscape', 'portrait']

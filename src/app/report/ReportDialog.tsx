@@ -55,9 +55,6 @@ export function ReportDialog({ onClose }: { readonly onClose: () => void }) {
         </div>
         <Said />
         <PaperChoice choice={choice} onChoose={setChoice} />
-        <p className="report-scale">
-          Print at 100 %, without scaling: the check line on the page then measures 100 mm.
-        </p>
         <Remarks pages={pages} isSettled={answer.whole !== undefined} />
         <div className="page-previews">
           {pages.map((page) => (
@@ -69,11 +66,19 @@ export function ReportDialog({ onClose }: { readonly onClose: () => void }) {
   )
 }
 
-/** What the page said since the dialog was opened, where it can be read and heard. */
+/** How to print; once the page has something to say, that, where it can be read and heard. */
 function Said() {
   const notice = usePage((state) => state.notice)
   const [before] = useState(notice)
-  return <div className="report-said">{notice !== before && <Notice />}</div>
+  return (
+    <div className="report-said">
+      {notice === undefined || notice === before ? (
+        <p>Print at 100 %, without scaling: the check line on each page then measures 100 mm.</p>
+      ) : (
+        <Notice />
+      )}
+    </div>
+  )
 }
 
 /** What does not fit, of all pages, before anything is printed. */

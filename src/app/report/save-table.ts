@@ -30,11 +30,11 @@ export async function copyTable(store: Store, name: Table['name']): Promise<void
       (table) => new Blob([toTabbed(table)], { type: 'text/plain' }),
     )
     await navigator.clipboard.write([new ClipboardItem({ 'text/plain': text })])
-    notify({ tone: 'news', text: `The ${name} is copied: paste it into a spreadsheet.` })
+    notify({ tone: 'news', text: `Copied the ${name}: paste into a spreadsheet.` })
   } catch {
     notify({
       tone: 'problem',
-      text: `The ${name} was not copied: the browser keeps the page off the clipboard. Save it as CSV instead.`,
+      text: `Nothing was copied of the ${name}: the browser keeps the page off the clipboard. Save a CSV file instead.`,
     })
   }
 }
