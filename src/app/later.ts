@@ -12,6 +12,7 @@ export async function fetchLater(): Promise<void> {
     import('./report/Hazards'),
     import('./report/FindingFields'),
     import('./report/ReportDialog'),
+    import('./report/save-pdf'),
     import('../drawing/pdf'),
     import('./report/print-fonts').then(({ loadPrintFonts }) => loadPrintFonts()),
   ])

@@ -1,5 +1,5 @@
 import { useMemo, useState } from 'react'
-import { copyPicture, savePng, saveSvg } from '../export/save'
+import { drawingVerbs } from '../export'
 import { Dialog } from '../shell/Dialog'
 import { Menu } from '../shell/Menu'
 import { Notice } from '../shell/Notice'
@@ -7,7 +7,7 @@ import { answerOf, usePage, usePageStore } from '../store'
 import { PagePreview } from './PagePreview'
 import { PaperChoice } from './PaperChoice'
 import { type Choice, pagesOf } from './pages'
-import { saveDrawingPdf, savePdf } from './save-pdf'
+import { savePdf } from './save-pdf'
 import { copyTable, saveTable, tables } from './save-table'
 import { usePrinting } from './usePrinting'
 import './report.css'
@@ -31,15 +31,7 @@ export function ReportDialog({ onClose }: { readonly onClose: () => void }) {
           <button type="button" className="verb" onClick={() => savePdf(store, choice)}>
             Save PDF
           </button>
-          <Menu
-            verb="Drawing alone"
-            entries={[
-              { verb: 'SVG, true to scale', onChoose: () => saveSvg(store) },
-              { verb: 'PDF, true to scale', onChoose: () => saveDrawingPdf(store) },
-              { verb: 'PNG picture', onChoose: () => savePng(store) },
-              { verb: 'Picture to the clipboard', onChoose: () => copyPicture(store) },
-            ]}
-          />
+          <Menu verb="Drawing alone" entries={drawingVerbs(store)} />
           <Menu
             verb="Tables"
             entries={tables.flatMap((name) => [
