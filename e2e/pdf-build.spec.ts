@@ -1,7 +1,7 @@
 import { readdir, readFile } from 'node:fs/promises'
 import { join } from 'node:path'
 import { expect, test } from '@playwright/test'
-import { projectFolder } from '../src/command/project-folder.mjs'
+import { projectFolder } from '../src/command/run.mjs'
 
 const folder = join(projectFolder, 'dist')
 
@@ -33,7 +33,7 @@ test('the PDF, its typefaces and the report are no part of the first load', asyn
   const first = await firstScripts()
   expect(first.size).toBeGreaterThan(1)
   // Sentences that no shortening of names touches: the library's, and one of the report's own.
-  for (const sentence of ['/FontDescriptor', 'replaces no local rule and no permit']) {
+  for (const sentence of ['/FontDescriptor', 'Drawn values are read off the paper']) {
     const holders = [...texts].filter(([, text]) => text.includes(sentence)).map(([name]) => name)
     expect(holders).toHaveLength(1)
     expect(first.has(holders[0] ?? '')).toBe(false)
