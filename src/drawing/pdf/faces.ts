@@ -76,11 +76,17 @@ function addFace(document: jsPDF, face: Face, bytes: Uint8Array): PdfFace {
   }
 }
 
-/** Bytes as the library takes them: a character each. */
+const binaries = new WeakMap<Uint8Array, string>()
+
+/** Bytes as the library takes them: a character each. The same typefaces are asked for again and again. */
 function toBinary(bytes: Uint8Array): string {
+  const known = binaries.get(bytes)
+  if (known !== undefined) return known
   const parts: string[] = []
   for (let from = 0; from < bytes.length; from += 8192) {
     parts.push(String.fromCharCode(...bytes.subarray(from, from + 8192)))
   }
-  return parts.join('')
+  const binary = parts.join('')
+  binaries.set(bytes, binary)
+  return binary
 }
