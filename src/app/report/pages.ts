@@ -1,7 +1,7 @@
 import { constructionPages, type Page, type Paper, reportPages } from '../../drawing/report'
 import { fingerprintOf, quick, type Sheet } from '../../sheet'
-import { linkTo } from '../share'
 import { maybeQrCode } from '../share/qr-code'
+import { linkTo } from '../share/system-share'
 import type { Answer } from '../store'
 
 /** What is printed. */
