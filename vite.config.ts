@@ -7,6 +7,9 @@ import { policyPlugin } from './.config/policy-plugin.ts'
 /** What every page needs and a new release seldom changes: a chunk that browsers keep. */
 const frame = /\/node_modules\/(react|react-dom|react-reconciler|scheduler|konva|react-konva)\//
 
+/** What the PDF library would draw web pages with: pages of a report need none of it. */
+const unused = ['canvg', 'dompurify', 'html2canvas']
+
 export default defineConfig({
   plugins: [react(), policyPlugin(), iconPlugin(), offlinePlugin()],
   // Relative addresses, so that the page works from any sub-path.
@@ -18,6 +21,7 @@ export default defineConfig({
     // The notices that the packages' licences ask for travel with the page.
     license: { fileName: 'licences.md' },
     rolldownOptions: {
+      external: unused,
       output: { codeSplitting: { groups: [{ name: 'frame', test: frame }] } },
     },
   },

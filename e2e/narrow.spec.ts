@@ -18,7 +18,12 @@ for (const [name, sheet] of sheets) {
   test(`${name}: nothing scrolls sideways, down to 320 px`, async ({ page }) => {
     await page.setViewportSize({ width: 1280, height: 800 })
     await openPage(page, sheet)
-    for (const group of ['Title block', 'Paper, scale and reference']) {
+    for (const group of [
+      'Title block',
+      'Before you measure',
+      'Criterion and conclusion',
+      'Paper, scale and reference',
+    ]) {
       await page.getByText(group, { exact: true }).click()
     }
     for (const width of [1280, 820, 390, 320]) {

@@ -45,6 +45,7 @@ test('asks for nothing at all once it is loaded', async ({ page, context }) => {
     for (const [menu, entry] of [
       ['Share', 'Save to a file'],
       ['Save drawing', 'SVG, true to scale'],
+      ['Save drawing', 'PDF, true to scale'],
       ['Save drawing', 'PNG picture'],
     ] as const) {
       const coming = page.waitForEvent('download')
@@ -55,6 +56,12 @@ test('asks for nothing at all once it is loaded', async ({ page, context }) => {
     await verb(page, 'Paste rows').click()
     await page.getByRole('dialog').getByRole('textbox').fill('V9\t12\t30')
     await page.keyboard.press('Escape')
+    await verb(page, 'Report').click()
+    await expect(page.locator('.page-paper > svg').first()).toBeVisible()
+    await verb(page, 'Close').click()
+    await page.getByText('Title block', { exact: true }).click()
+    await page.getByText('Before you measure', { exact: true }).click()
+    await verb(page, 'Add the usual ones').click()
     await verb(page, 'My sheets').click()
     await expect(page.locator('.sheet-title')).toHaveText(['Quiet'])
     await verb(page, 'Done').click()

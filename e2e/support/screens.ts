@@ -1,5 +1,5 @@
 import type { Page } from '@playwright/test'
-import { emptySheet } from '../../src/sheet'
+import { emptySheet, type Sheet } from '../../src/sheet'
 import { benchSheet } from './bench'
 import { brakeSheet, circuitOf } from './circuit'
 import { fullSheet } from './full'
@@ -29,6 +29,15 @@ async function afresh(page: Page, sheet?: Parameters<typeof openPage>[1]): Promi
 
 async function pressVerb(page: Page, name: string): Promise<void> {
   await page.getByRole('button', { name, exact: true }).click()
+}
+
+/** A sheet whose check no longer holds. */
+const signedSheet: Sheet = {
+  ...benchSheet,
+  job: {
+    ...benchSheet.job,
+    voided: [{ kind: 'checked', by: 'A. Berg', date: '2026-11-30', revision: '0' }],
+  },
 }
 
 /** Every screen that the page has. */
@@ -73,6 +82,29 @@ export const screens: readonly Screen[] = [
       await page.getByText('Title block', { exact: true }).click()
       await page.getByText('Paper, scale and reference', { exact: true }).click()
       await expect(page.getByRole('textbox', { name: 'Job number' })).toBeVisible()
+    },
+  },
+  {
+    name: 'the hazards, and signatures that are void',
+    part: '[aria-label="Sheet"]',
+    reach: async (page) => {
+      await afresh(page, signedSheet)
+      await page.getByText('Title block', { exact: true }).click()
+      await page.getByText('Before you measure', { exact: true }).click()
+      await page.getByText('Criterion and conclusion', { exact: true }).click()
+      await pressVerb(page, 'Add the usual ones')
+      await expect(page.getByRole('group', { name: 'Hazard 5' })).toBeVisible()
+      await expect(page.getByRole('list', { name: 'Voided signatures' })).toBeVisible()
+    },
+  },
+  {
+    name: 'the report as it will be printed',
+    part: 'dialog',
+    reach: async (page) => {
+      await afresh(page, benchSheet)
+      await pressVerb(page, 'Report')
+      await expect(page.locator('.page-paper > svg').first()).toBeVisible()
+      await expect(page.getByText('Everything fits.')).toBeVisible()
     },
   },
   {

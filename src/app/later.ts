@@ -7,5 +7,14 @@ export async function fetchLater(): Promise<void> {
     import('papaparse'),
     import('./share/qr-code'),
     import('./circuit/Circuit'),
+    import('./link/read-file'),
+    import('./details/TitleFields'),
+    import('./details/DrawingFields'),
+    import('./report/Hazards'),
+    import('./report/FindingFields'),
+    import('./report/ReportDialog'),
+    import('./report/save-pdf'),
+    import('../drawing/pdf'),
+    import('./report/print-fonts').then(({ loadPrintFonts }) => loadPrintFonts()),
   ])
 }

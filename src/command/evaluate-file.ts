@@ -1,7 +1,10 @@
 import { readFile, stat } from 'node:fs/promises'
 import {
   type Evaluation,
+  extractSheetFromPdf,
   extractSheetText,
+  fingerprintOf,
+  isPdf,
   MAXIMUM_FILE_BYTES,
   parseSheetText,
   type SheetError,
@@ -19,16 +22,17 @@ interface Origin {
 /** One line of output: what the program says of a sheet, or what is wrong with it. */
 export type Answer = Origin & (Evaluation | { readonly errors: readonly SheetError[] })
 
-/** An answer with the title of its sheet, which is empty where there is none. */
+/** An answer with the title of its sheet, which is empty where there is none, and its fingerprint. */
 export interface Evaluated {
   readonly title: string
+  readonly fingerprint?: string
   readonly answer: Answer
 }
 
 /**
- * Evaluates the sheets of a file, in order: one in a JSON file or in the metadata of an SVG drawing, one
- * a line in a file that ends in `.jsonl`, blank lines passed over. `file` is how the answers name it,
- * `path` where it lies. A file that cannot be read is answered like a sheet that is not valid.
+ * Evaluates the sheets of a file, in order: one in a JSON file, in the metadata of an SVG drawing or
+ * attached to a PDF, one a line in a file that ends in `.jsonl`, blank lines passed over. `file` is how
+ * the answers name it, `path` where it lies. A file that cannot be read is answered like a sheet that is not valid.
  */
 export async function* evaluateFile(file: string, path: string): AsyncGenerator<Evaluated> {
   try {
@@ -55,11 +59,16 @@ async function readSheet(path: string): Promise<SheetResult> {
   const { size } = await stat(path)
   if (size > LARGEST_DRAWING)
     return refusal('This is too large for a sheet: at most 5 MB are read.')
-  const text = await readFile(path, 'utf8')
+  const bytes = await readFile(path)
+  if (isPdf(bytes)) return parsed(extractSheetFromPdf(bytes), 'print')
+  const text = bytes.toString('utf8')
   if (!text.trimStart().startsWith('<')) return parseSheetText(text)
-  const carried = extractSheetText(text)
+  return parsed(extractSheetText(text), 'drawing')
+}
+
+function parsed(carried: string | undefined, what: 'print' | 'drawing'): SheetResult {
   return carried === undefined
-    ? refusal('This drawing carries no sheet: open the sheet it was made from and save it again.')
+    ? refusal(`This ${what} carries no sheet: open the sheet it was made from and save it again.`)
     : parseSheetText(carried)
 }
 
@@ -70,7 +79,11 @@ function refusal(message: string): SheetResult {
 function answerTo(origin: Origin, result: SheetResult): Evaluated {
   if (!result.ok) return { title: '', answer: { ...origin, errors: result.errors } }
   const { sheet } = result
-  return { title: sheet.title, answer: { ...origin, ...evaluate(sheet) } }
+  return {
+    title: sheet.title,
+    fingerprint: fingerprintOf(sheet),
+    answer: { ...origin, ...evaluate(sheet) },
+  }
 }
 
 const REASONS: { readonly [code: string]: string } = {

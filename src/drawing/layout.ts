@@ -54,6 +54,8 @@ export interface LayoutOptions {
   readonly regions?: Evaluation
   /** Lines of the construction to be drawn; none where nothing is said. */
   readonly construction?: ConstructionLines
+  /** What the title block says of the sheet's number: `Sheet 1 of 3`. */
+  readonly sheetNumber?: string
 }
 
 /**
@@ -87,7 +89,7 @@ export function layout(sheet: Sheet, evaluation: Evaluation, options: LayoutOpti
   const misses = missesOf(sheet, evaluation, hidden)
   const picture = createPicture(sheet, placement.arrows, misses)
   const items: Item[] = []
-  const edges = only ? [] : addSheet(items, sheet, placement, picture, palette)
+  const edges = only ? [] : addSheet(items, sheet, placement, picture, palette, options.sheetNumber)
   const open = only
     ? NOTHING_OPEN
     : createOpenDrawing(sheet, evaluation, placement, { frame, edges, hasLabels: labels }, palette)
@@ -158,10 +160,11 @@ function addSheet(
   placement: Placement,
   picture: Picture,
   palette: Palette,
+  sheetNumber: string | undefined,
 ): Box[] {
   const size = paperSizeOf(sheet.drawing)
   const frame = frameOf(size)
-  const block = createTitleBlock(sheet, frame, palette)
+  const block = createTitleBlock(sheet, frame, palette, sheetNumber)
   const bars = createScaleBars(placement.unitsPerCentimetre, frame, palette)
   items.push(
     paperItem(size, palette),

@@ -29,6 +29,9 @@ interface ItemCommon {
     | 'stamp'
     | 'schematic'
     | 'predicted'
+    | 'report'
+    | 'check-line'
+    | 'qr-code'
   /** The key of the placed arrow that it belongs to. */
   readonly arrow?: string
 }

@@ -1,7 +1,10 @@
 import type { Agreement, Quantity } from '../sheet'
 
-/** Which of the two sets of colours a scene is laid out in; what is exported is always light. */
-export type Theme = 'light' | 'dark'
+/**
+ * Which set of colours a scene is laid out in; what is exported is always light, and what is printed
+ * leaves the paper white.
+ */
+export type Theme = 'light' | 'dark' | 'print'
 
 /** The colours of a drawing: one ink, three greys, a hue for each quantity and one for gaps. */
 export interface Palette {
@@ -75,7 +78,13 @@ const dark: Palette = {
   },
 }
 
+const palettes: { readonly [theme in Theme]: Palette } = {
+  light,
+  dark,
+  print: { ...light, paper: '#ffffff' },
+}
+
 /** The colours of a theme. */
 export function paletteOf(theme: Theme): Palette {
-  return theme === 'dark' ? dark : light
+  return palettes[theme]
 }

@@ -8,7 +8,7 @@ export const FIELD_ORDER: readonly string[] = `
   paper orientation origin unitsPerCentimetre tolerance
   frequency reference supply assumed drift
   phasors readings instruments channels sums elements
-  number site circuit conditions testedBy checkedBy approvedBy
+  number site circuit conditions testedBy checkedBy checkedDate approvedBy approvedDate voided
   threePhase chosen hand drawing report
   mistake original by date reason notes
   hazards hazard control risk supervision criterion conclusion

@@ -64,6 +64,16 @@ import {
   removeElement,
 } from './edits/remove-element'
 import { type RemovePhasor, removePhasor } from './edits/remove-phasor'
+import {
+  type AddHazard,
+  addHazard,
+  type RemoveHazard,
+  removeHazard,
+  type SetHazard,
+  type SetReport,
+  setHazard,
+  setReport,
+} from './edits/report'
 import { type ReversePhasor, reversePhasor } from './edits/reverse-phasor'
 import {
   type CountElement,
@@ -88,6 +98,7 @@ import {
   setSum,
 } from './edits/sums'
 import { findErrors } from './parse-sheet'
+import { withVoidedSignatures } from './signatures'
 import type { Sheet } from './types'
 
 /** Several edits as one step: all of them, or none where one fails. */
@@ -136,6 +147,10 @@ interface EditByKind {
   readonly 'set-element': SetElement
   readonly 'set-element-value': SetElementValue
   readonly 'count-element': CountElement
+  readonly 'set-report': SetReport
+  readonly 'add-hazard': AddHazard
+  readonly 'set-hazard': SetHazard
+  readonly 'remove-hazard': RemoveHazard
   readonly choose: Choose
   readonly several: Several
 }
@@ -202,20 +217,26 @@ const KINDS: { readonly [kind in keyof EditByKind]: EditKind<EditByKind[kind]> }
   'set-element': setElement,
   'set-element-value': setElementValue,
   'count-element': countElement,
+  'set-report': setReport,
+  'add-hazard': addHazard,
+  'set-hazard': setHazard,
+  'remove-hazard': removeHazard,
   choose,
   several,
 }
 
 /**
  * The sheet after an edit, or one plain sentence that says why it cannot be made. The given sheet is
- * never changed; what an edit does not touch is shared with it. Throws only for an edit whose kind
+ * never changed; what an edit does not touch is shared with it. Signatures that stood for what the edit
+ * changes are voided with it, and the revision is raised. Throws only for an edit whose kind
  * does not exist, which no user can cause.
  */
 export function apply(sheet: Sheet, edit: Edit): Result<Sheet> {
-  const changed = applyUnchecked(sheet, toCanonical(edit))
-  if (!changed.ok || isLight(edit)) return changed
-  const [error] = findErrors(changed.value)
-  return error === undefined ? changed : failure(error.message)
+  const made = applyUnchecked(sheet, toCanonical(edit))
+  if (!made.ok) return made
+  const changed = withVoidedSignatures(sheet, made.value)
+  const [error] = isLight(edit) ? [] : findErrors(changed)
+  return error === undefined ? success(changed) : failure(error.message)
 }
 
 /** A few words for an edit of this sheet, as in "Undo: Change the angle of Vcoil". */

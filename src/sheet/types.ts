@@ -285,6 +285,16 @@ export interface Hazard {
   readonly supervision?: string
 }
 
+/** A signature that no longer holds, since the sheet was changed after it. */
+export interface VoidedSignature {
+  readonly kind: 'checked' | 'approved'
+  readonly by: string
+  /** The day on which it was given, ISO 8601. */
+  readonly date?: string
+  /** The revision that it was given for. */
+  readonly revision?: string
+}
+
 /** Which job the sheet belongs to; dates are ISO 8601. */
 export interface Job {
   readonly number?: string
@@ -293,8 +303,13 @@ export interface Job {
   readonly conditions?: string
   readonly testedBy?: string
   readonly checkedBy?: string
+  readonly checkedDate?: string
   readonly approvedBy?: string
+  readonly approvedDate?: string
+  /** The day of the test. */
   readonly date?: string
+  /** The oldest first. */
+  readonly voided?: readonly VoidedSignature[]
   readonly notes?: string
 }
 

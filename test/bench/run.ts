@@ -11,6 +11,7 @@ import { estimateForty, estimateSix, growthOfEstimate } from './measures/estimat
 import { bytesOfFirstLoad, firstShaftsOnScreen } from './measures/first-load'
 import { charactersOfLink, linkAgainstDeflate } from './measures/link'
 import { picking2000 } from './measures/picking'
+import { reportAgainstEmptyPages } from './measures/report'
 import { resultantAgainstLoop, resultantAgainstMathjs } from './measures/resultant'
 import { svgAgainstJoining } from './measures/svg'
 
@@ -20,6 +21,7 @@ const measures: readonly Measure[] = [
   resultantAgainstLoop,
   resultantAgainstMathjs,
   svgAgainstJoining,
+  reportAgainstEmptyPages,
   linkAgainstDeflate,
   charactersOfLink,
   bytesOfFirstLoad,

@@ -4,7 +4,13 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { emptySheet, exampleSheet, type Sheet, serializeSheet } from '../../src/sheet'
+import {
+  emptySheet,
+  exampleSheet,
+  fingerprintOf,
+  type Sheet,
+  serializeSheet,
+} from '../../src/sheet'
 import { evaluate } from '../../src/sheet/estimate'
 
 const project = fileURLToPath(new URL('../..', import.meta.url))
@@ -21,6 +27,10 @@ beforeAll(() => {
   write('circuit.json', serializeSheet(circuit))
   write('deep/Ünïcode name.json', `\ufeff${text}`)
   write('drawing.svg', `<?xml version="1.0"?><svg><metadata><![CDATA[${text}]]></metadata></svg>`)
+  write(
+    'print.pdf',
+    `%PDF-1.7\n1 0 obj\n<< /Type /EmbeddedFile >>\nstream\n${text}\nendstream\nendobj\n%%EOF\n`,
+  )
   write('bare.svg', '<svg/>')
   write('many.jsonl', `${line}\r\n\n{"format":"phasogon-sheet"\n${line}`)
   write('wrong.json', text.replace('"value": 22.4', '"value": -22.4'))
@@ -112,6 +122,21 @@ test(
     })
     expect(complaint).toBe('')
     expect(status).toBe(0)
+  },
+)
+
+test(
+  'the fingerprint on a print can be checked from the file and from the print',
+  unhurried,
+  () => {
+    const { lines, status } = run('--fingerprint', 'sheet.json', 'print.pdf', 'bare.svg')
+    const fingerprint = fingerprintOf(exampleSheet)
+    expect(lines).toEqual([
+      { file: 'sheet.json', ...example, fingerprint },
+      { file: 'print.pdf', ...example, fingerprint },
+      { file: 'bare.svg', errors: [{ path: '', message: expect.stringContaining('no sheet') }] },
+    ])
+    expect(status).toBe(2)
   },
 )
 

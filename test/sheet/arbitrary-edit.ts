@@ -20,6 +20,7 @@ import {
   typedAngle,
   typedNotNegative,
 } from './arbitrary-figure'
+import { hazard } from './arbitrary-parts'
 import { date, label, text } from './arbitrary-text'
 
 /** An edit that waits for the sheet it is made on; undefined where that sheet has nothing to edit so. */
@@ -292,6 +293,49 @@ const circuits: fc.Arbitrary<EditOf> = fc.oneof(
     .map(([at, counts]) => onElement(({ id }) => ({ kind: 'count-element', id, counts }))(at)),
 )
 
+const reported: fc.Arbitrary<EditOf> = fc.oneof(
+  fc.tuple(text, text).map(
+    ([criterion, conclusion]): EditOf =>
+      () => ({
+        kind: 'set-report',
+        report: { criterion, conclusion: conclusion || null },
+      }),
+  ),
+  fc.tuple(hazard, which).map(
+    ([added, at]): EditOf =>
+      (sheet) => ({
+        kind: 'add-hazard',
+        hazard: added,
+        at: at % (1 + (sheet.report?.hazards?.length ?? 0)),
+      }),
+  ),
+  fc.tuple(which, text, fc.constantFrom('low' as const, 'high' as const)).map(
+    ([which, control, risk]): EditOf =>
+      (sheet) => {
+        const count = sheet.report?.hazards?.length ?? 0
+        const change = { control, risk, supervision: null }
+        return count === 0 ? undefined : { kind: 'set-hazard', at: which % count, change }
+      },
+  ),
+  which.map(
+    (at): EditOf =>
+      (sheet) => {
+        const count = sheet.report?.hazards?.length ?? 0
+        return count === 0 ? undefined : { kind: 'remove-hazard', at: at % count }
+      },
+  ),
+)
+
+const signed: fc.Arbitrary<EditOf> = fc
+  .tuple(fc.constantFrom('checked' as const, 'approved' as const), text, date)
+  .map(
+    ([kind, by, day]): EditOf =>
+      () => ({
+        kind: 'set-job',
+        job: { [`${kind}By`]: by, [`${kind}Date`]: day },
+      }),
+  )
+
 /** Any edit of any kind but `several` and `add-rows`, which are made of others. */
 export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(
   values,
@@ -300,5 +344,7 @@ export const anyEdit: fc.Arbitrary<EditOf> = fc.oneof(
   chosen,
   drawn,
   circuits,
+  reported,
+  signed,
   others,
 )

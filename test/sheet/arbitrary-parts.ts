@@ -13,6 +13,7 @@ import type {
   Reading,
   Sum,
   ThreePhase,
+  VoidedSignature,
 } from '../../src/sheet'
 import {
   anyNumber,
@@ -399,6 +400,17 @@ export const drawing: fc.Arbitrary<Drawing> = loose(
     },
     { requiredKeys: [] },
   ),
+)
+
+/** A signature that no longer holds. */
+export const voided: fc.Arbitrary<VoidedSignature> = fc.record(
+  {
+    kind: fc.constantFrom('checked' as const, 'approved' as const),
+    by: text,
+    date,
+    revision: text,
+  },
+  { requiredKeys: ['kind', 'by'] },
 )
 
 /** A hazard and its control. */

@@ -16,7 +16,15 @@ const job = fc
       'approvedBy',
       'notes',
     ),
-    fc.record({ date }, { requiredKeys: [] }),
+    fc.record(
+      {
+        date,
+        checkedDate: date,
+        approvedDate: date,
+        voided: fc.array(parts.voided, { maxLength: 2 }),
+      },
+      { requiredKeys: [] },
+    ),
     unknownFields,
   )
   .map(([known, dated, unknown]) => ({ ...unknown, ...known, ...dated }))

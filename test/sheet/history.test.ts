@@ -72,6 +72,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
   }
   expect([...made].sort()).toEqual([
     'add-element',
+    'add-hazard',
     'add-phasor',
     'add-reading',
     'add-sum',
@@ -87,6 +88,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
     'remove-circuit',
     'remove-element',
     'remove-hand-arrow',
+    'remove-hazard',
     'remove-phasor',
     'remove-reading',
     'remove-sum',
@@ -95,10 +97,12 @@ test('random edits are often made, and of every kind', unhurried, () => {
     'set-element',
     'set-element-value',
     'set-hand-arrow',
+    'set-hazard',
     'set-job',
     'set-known',
     'set-phasor',
     'set-reading',
+    'set-report',
     'set-sum',
     'set-value',
     'start-circuit',

@@ -60,7 +60,7 @@ export function OpenDialog({ onClose }: { readonly onClose: () => void }) {
               type="file"
               multiple
               className="visually-hidden"
-              accept=".svg,.json,image/svg+xml,application/json"
+              accept=".svg,.json,.pdf,image/svg+xml,application/json,application/pdf"
               onChange={async (event) => {
                 await openFiles(store, keeping, [...(event.target.files ?? [])])
                 onClose()
@@ -72,8 +72,8 @@ export function OpenDialog({ onClose }: { readonly onClose: () => void }) {
           </button>
         </div>
         <p>
-          A sheet saved to a file opens here again, and so does a drawing saved as SVG, which
-          carries its sheet: choose them, or drop them anywhere on the page.
+          A sheet saved to a file opens here again, and so do a drawing saved as SVG and a report
+          saved as PDF, which carry their sheet: choose them, or drop them anywhere on the page.
         </p>
       </form>
     </Dialog>

@@ -1,9 +1,7 @@
-import { extractSheetText, parseLink, parseSheetText, type SheetResult } from '../../sheet'
+import { parseLink, type SheetResult } from '../../sheet'
 import type { Keeping } from '../keep'
 import { openFiled, openLinked } from '../keep/open-kept'
 import type { Store } from '../store'
-
-const largestFile = 5_000_000
 
 /** Opens the sheet that a link carries. A link that cannot be read costs nothing and is said. */
 export async function openLink(store: Store, keeping: Keeping, text: string): Promise<boolean> {
@@ -14,7 +12,7 @@ export async function openLink(store: Store, keeping: Keeping, text: string): Pr
 }
 
 /**
- * Opens the sheets in files: a sheet's own JSON, or a drawing that carries its sheet. The first of
+ * Opens the sheets in files: a sheet's own JSON, or a drawing or print that carries its sheet. The first of
  * several is shown, and all are kept; those that hold no sheet are named with the reason.
  */
 export async function openFiles(
@@ -22,6 +20,7 @@ export async function openFiles(
   keeping: Keeping,
   files: readonly File[],
 ): Promise<void> {
+  const { readFile } = await import('./read-file')
   const refusals: string[] = []
   let opened = 0
   for (const file of [...files].reverse()) {
@@ -39,25 +38,6 @@ export async function openFiles(
       offer: 'go-back',
     })
   }
-}
-
-async function readFile(file: File): Promise<SheetResult> {
-  if (file.size > largestFile) {
-    return refusal(
-      'it is larger than 5 MB, and no sheet is. Choose a drawing or sheet that Phasogon saved.',
-    )
-  }
-  const text = await file.text().catch(() => undefined)
-  if (text === undefined) return refusal('the browser could not read it. Choose it again.')
-  const carried = extractSheetText(text)
-  if (carried === undefined && text.trimStart().startsWith('<')) {
-    return refusal('it is a drawing that carries no sheet. Choose an SVG that Phasogon saved.')
-  }
-  return parseSheetText(carried ?? text)
-}
-
-function refusal(message: string): SheetResult {
-  return { ok: false, errors: [{ path: '', message }] }
 }
 
 function describeRefusal(result: SheetResult & { readonly ok: false }, what: string): string {

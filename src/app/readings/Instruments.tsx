@@ -1,9 +1,11 @@
 import { type Edit, type Instrument, newId, type Remark, type Sheet } from '../../sheet'
 import { Field } from '../details/Field'
+import { Folded } from '../shell/Folded'
 import { usePageStore } from '../store'
 import { AccuracyList } from './AccuracyList'
 import { ChoiceField } from './ChoiceField'
 import { tryEdit } from './commit'
+import { EarlierInstruments } from './EarlierInstruments'
 import { commitTyped } from './typed-field'
 
 /** The meters that were used, with what their makers promise of them. */
@@ -20,8 +22,7 @@ export function Instruments(properties: {
     store.getState().edit({ kind: 'add-instrument', instrument: { id, name } })
   }
   return (
-    <details>
-      <summary>{`Instruments${instruments.length === 0 ? '' : `: ${instruments.length}`}`}</summary>
+    <Folded heading={`Instruments${instruments.length === 0 ? '' : `: ${instruments.length}`}`}>
       {instruments.map((instrument) => (
         <InstrumentEditor
           key={instrument.id}
@@ -33,8 +34,9 @@ export function Instruments(properties: {
         <button type="button" className="verb" onClick={add}>
           Add instrument
         </button>
+        <EarlierInstruments sheet={sheet} />
       </div>
-    </details>
+    </Folded>
   )
 }
 

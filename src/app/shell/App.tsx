@@ -8,6 +8,7 @@ import { HandPanel } from '../hand'
 import { CopyBanner, KeepNotes } from '../keep'
 import { VersionNote } from '../offline'
 import { Readings } from '../readings'
+import { BeforeMeasuring, Findings } from '../report'
 import { Schedule } from '../schedule'
 import { Sums } from '../sums'
 import { Announcer } from './Announcer'
@@ -39,6 +40,8 @@ export function App() {
         <AnswerPanel />
         <section aria-label="Sheet">
           <TitleBlock />
+          <BeforeMeasuring />
+          <Findings />
           <DrawingSettings />
         </section>
         <Safety />

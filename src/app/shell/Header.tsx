@@ -1,5 +1,6 @@
 import { DrawingMenu } from '../export'
 import { LinkVerbs } from '../link'
+import { ReportVerb } from '../report'
 import { usePage, usePageStore } from '../store'
 
 /** The page's head: the sheet's title and the verbs for the sheet as a whole. */
@@ -33,6 +34,7 @@ export function Header() {
         </button>
         <LinkVerbs />
         <DrawingMenu />
+        <ReportVerb />
       </div>
     </header>
   )

@@ -26,6 +26,8 @@ export function Menu({
     }
     const onKeyDown = (event: KeyboardEvent) => {
       if (event.key !== 'Escape') return
+      // Of a menu in a window, Escape closes the menu and not the window.
+      event.preventDefault()
       setOpen(false)
       button.current?.focus()
     }

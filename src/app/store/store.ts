@@ -10,6 +10,7 @@ import {
   type Sheet,
   serializeSheet,
   undo,
+  voidedBetween,
 } from '../../sheet'
 import { describeAnswer } from './describe'
 import { createIdentity } from './identity'
@@ -94,7 +95,9 @@ export function createStore(
       continueAnswer(history.sheet, result.value)
       const description = describeEdit(history.sheet, edit)
       const said = `${description}.`
-      settle(commit(history, result.value, description), said, removalNotice(edit, said))
+      const voided = voidNotice(history.sheet, result.value)
+      const told = voided ? `${said} ${voided.text}` : said
+      settle(commit(history, result.value, description), told, voided ?? removalNotice(edit, said))
       return true
     }
 
@@ -236,6 +239,15 @@ function keptSelection(sheet: Sheet, selection: Selection | undefined): Selectio
   if (!selection) return undefined
   const has = { phasor: hasPhasor, sum: hasSum, hand: hasHandArrow }[selection.kind]
   return has(sheet, selection.id) ? selection : undefined
+}
+
+/** Says that an edit voided signatures, since nobody who types a figure need have them in sight. */
+function voidNotice(before: Sheet, after: Sheet): Notice | undefined {
+  const voided = voidedBetween(before, after)
+  if (voided.length === 0) return undefined
+  const names = voided.map(({ kind, by }) => `${kind} by ${by}`).join(', ')
+  const text = `The sheet was ${names}: that no longer holds, since it was changed. It is revision ${after.revision ?? '0'} now.`
+  return { tone: 'news', text, offer: 'undo' }
 }
 
 function removalNotice(edit: Edit, said: string): Notice | undefined {

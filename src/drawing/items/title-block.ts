@@ -29,8 +29,13 @@ export function titleBlockHeight(sheet: Sheet): number {
 }
 
 /** The title block of a sheet. What is too long for its cell is shortened. */
-export function createTitleBlock(sheet: Sheet, frame: Box, palette: Palette): TitleBlock {
-  const rows = fieldRowsOf(sheet)
+export function createTitleBlock(
+  sheet: Sheet,
+  frame: Box,
+  palette: Palette,
+  sheetNumber?: string,
+): TitleBlock {
+  const rows = fieldRowsOf(sheet, sheetNumber)
   const box = {
     left: frame.right - WIDTH,
     right: frame.right,

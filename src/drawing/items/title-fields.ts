@@ -1,4 +1,4 @@
-import type { Sheet } from '../../sheet'
+import { type Sheet, type SignatureKind, signatureOf, voidedSignatureOf } from '../../sheet'
 import { formatFrequency } from '../text/quantity-text'
 
 /** A field of the title block. */
@@ -12,8 +12,10 @@ const COLUMNS = 3
 /**
  * The fields of a sheet below its title, row by row, named as ISO 7200 names them (from memory): what
  * the sheet fills, and always revision index, frequency with "rms", and sheet number.
+ *
+ * @param sheetNumber Which of how many sheets it is.
  */
-export function fieldRowsOf(sheet: Sheet): Field[][] {
+export function fieldRowsOf(sheet: Sheet, sheetNumber = 'Sheet 1 of 1'): Field[][] {
   const job = sheet.job ?? {}
   const optional: [string, string | undefined][] = [
     ['Identification number', job.number],
@@ -21,8 +23,8 @@ export function fieldRowsOf(sheet: Sheet): Field[][] {
     ['Supplementary title', job.circuit],
     ['Site', job.site],
     ['Creator', job.testedBy],
-    ['Checked by', job.checkedBy],
-    ['Approval person', job.approvedBy],
+    ['Checked by', signedText(sheet, 'checked')],
+    ['Approval person', signedText(sheet, 'approved')],
   ]
   const filled = optional.flatMap(([caption, value = '']) =>
     value.trim() === '' ? [] : [{ caption, value: value.trim() }],
@@ -36,7 +38,15 @@ export function fieldRowsOf(sheet: Sheet): Field[][] {
   rows.push([
     { caption: 'Revision index', value: sheet.revision?.trim() || '0' },
     { caption: 'Frequency and values', value: frequency ? `${frequency} · rms` : 'rms' },
-    { caption: 'Sheet number', value: 'Sheet 1 of 1' },
+    { caption: 'Sheet number', value: sheetNumber },
   ])
   return rows
+}
+
+/** Who signed and on which day, or whose signature no longer holds. */
+function signedText(sheet: Sheet, kind: SignatureKind): string | undefined {
+  const signature = signatureOf(sheet, kind)
+  const voided = voidedSignatureOf(sheet, kind)
+  if (signature === undefined) return voided && `VOID: ${voided.by}`
+  return signature.date === undefined ? signature.by : `${signature.by}, ${signature.date}`
 }

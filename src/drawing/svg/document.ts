@@ -5,7 +5,11 @@ import { formatMillimetres } from './number'
 
 /** Where the sheet stands inside the drawing's metadata. */
 export const SHEET_NAMESPACE = 'urn:phasogon:sheet'
-const FAMILY = 'Phasogon Sans, DejaVu Sans, Verdana, sans-serif'
+/** The upright face, and what stands in for it. */
+export const FAMILY = 'Phasogon Sans, DejaVu Sans, Verdana, sans-serif'
+
+/** What of a scene, or of a page of a report, an SVG is written from. */
+export type SvgScene = Pick<Scene, 'width' | 'height' | 'items' | 'title' | 'description'>
 
 /**
  * The scene as an SVG document whose millimetres are true: `width` and `height` in mm, one unit of
@@ -14,7 +18,7 @@ const FAMILY = 'Phasogon Sans, DejaVu Sans, Verdana, sans-serif'
  *
  * @param sheetText The sheet as JSON.
  */
-export function svg(scene: Scene, sheetText: string): string {
+export function svg(scene: SvgScene, sheetText: string): string {
   const [width, height] = [formatMillimetres(scene.width), formatMillimetres(scene.height)]
   const size = `width="${width}mm" height="${height}mm" viewBox="0 0 ${width} ${height}"`
   const named = 'role="img" aria-labelledby="phasogon-title phasogon-description"'

@@ -1,6 +1,6 @@
 import * as v from 'valibot'
 import { MAXIMUM_PHASORS } from '../limits'
-import type { Job, Sheet } from '../types'
+import type { Job, Sheet, VoidedSignature } from '../types'
 import { elementSchema, threePhaseSchema } from './circuit'
 import { channelSchema, instrumentSchema } from './instrument'
 import { drawingSchema, handArrowSchema, hazardSchema } from './paper'
@@ -10,6 +10,7 @@ import {
   maybeText,
   notNegativeSchema,
   numberSchema,
+  oneOf,
   typedPositiveSchema,
 } from './parts'
 import { phasorSchema } from './phasor'
@@ -20,6 +21,13 @@ import { dateSchema, idSchema, textSchema } from './text'
 const maybeId = v.exactOptional(idSchema)
 const maybeLimit = v.exactOptional(notNegativeSchema)
 
+const voidedSchema: v.GenericSchema<unknown, VoidedSignature> = fields({
+  kind: oneOf(['checked', 'approved']),
+  by: textSchema,
+  date: v.exactOptional(dateSchema),
+  revision: maybeText,
+})
+
 /** Which job the sheet belongs to. */
 export const jobSchema: v.GenericSchema<unknown, Job> = fields({
   number: maybeText,
@@ -28,8 +36,11 @@ export const jobSchema: v.GenericSchema<unknown, Job> = fields({
   conditions: maybeText,
   testedBy: maybeText,
   checkedBy: maybeText,
+  checkedDate: v.exactOptional(dateSchema),
   approvedBy: maybeText,
+  approvedDate: v.exactOptional(dateSchema),
   date: v.exactOptional(dateSchema),
+  voided: v.exactOptional(list(voidedSchema)),
   notes: maybeText,
 })
 

@@ -15,6 +15,13 @@ function drawingOf(title: string): File {
   return new File([`<svg><metadata><![CDATA[${text}]]></metadata></svg>`], `${title}.svg`)
 }
 
+/** As small as a PDF with an attachment can be; other readers would want more. */
+function printOf(title: string): File {
+  const text = new TextEncoder().encode(serializeSheet(sheetOf(title)))
+  const head = `%PDF-1.7\n1 0 obj\n<< /Type /EmbeddedFile /Length ${text.length} >>\nstream\n`
+  return new File([head, text, '\nendstream\nendobj\n%%EOF\n'], `${title}.pdf`)
+}
+
 async function keptTitles(world: World, page: Page): Promise<readonly string[]> {
   await turns(20)
   await page.keeper.settled()
@@ -27,7 +34,7 @@ describe('files', () => {
   test('of several the first is shown, and all are kept', async () => {
     const world = createWorld()
     const page = await world.open()
-    await openFiles(page.store, page, [fileOf('One'), drawingOf('Two'), fileOf('Three')])
+    await openFiles(page.store, page, [fileOf('One'), drawingOf('Two'), printOf('Three')])
     expect(titleOf(page)).toBe('One')
     expect(await keptTitles(world, page)).toEqual(['One', 'Two', 'Three'])
     expect(page.store.getState().notice?.text).toMatch(/^3 sheets opened/)
@@ -39,11 +46,13 @@ describe('files', () => {
     const bare = new File(['<svg/>'], 'bare.svg')
     const notes = new File(['hello'], 'notes.txt')
     const huge = new File([' '.repeat(5_000_001)], 'huge.json')
-    await openFiles(page.store, page, [bare, notes, fileOf('Good'), huge])
+    const print = new File(['%PDF-1.7\n%%EOF\n'], 'print.pdf')
+    await openFiles(page.store, page, [bare, notes, fileOf('Good'), huge, print])
     expect(titleOf(page)).toBe('Good')
     const { notice } = page.store.getState()
     expect(notice?.tone).toBe('problem')
-    for (const name of ['bare.svg', 'notes.txt', 'huge.json']) expect(notice?.text).toContain(name)
+    for (const name of ['bare.svg', 'notes.txt', 'huge.json', 'print.pdf'])
+      expect(notice?.text).toContain(name)
     expect(await keptTitles(world, page)).toEqual(['Good'])
   })
 

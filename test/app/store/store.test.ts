@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { createStore, type Store, shownEvaluation, shownSheet } from '../../../src/app/store'
+import { exampleSheet } from '../../../src/sheet'
 import { phasor, sheetOf, sum } from '../../drawing/sheets'
 
 const sheet = sheetOf([phasor('V1', '30.0', '0'), phasor('V2', '40.0', '90')], {
@@ -80,4 +81,17 @@ describe('the store', () => {
     expect(store.getState().values).toBe('adjusted')
     expect(store.getState().notice?.text).toContain('pen is put down')
   })
+})
+
+it('an edit that voids a signature says so, and offers to take it back', () => {
+  const store = createStore(exampleSheet, 'file')
+  const { edit } = store.getState()
+  edit({ kind: 'set-job', job: { checkedBy: 'A. Berg' } })
+  expect(store.getState().notice).toBeUndefined()
+  edit({ kind: 'set-reading', id: 'r2', change: { shown: '29.1' } })
+  expect(store.getState().notice).toMatchObject({ tone: 'news', offer: 'undo' })
+  expect(store.getState().notice?.text).toContain('checked by A. Berg')
+  expect(store.getState().announcement).toContain('no longer holds')
+  store.getState().undo()
+  expect(store.getState().history.sheet.job?.checkedBy).toBe('A. Berg')
 })

@@ -9,11 +9,14 @@ test('the dictionary of version 1 is what it was when the first link was made', 
   expect(digest).toBe('c939e1bcfbf5037cd262100d2e014b72fc7ad9a8178dc6d22cf13427278016f8')
 })
 
-test('the dictionary holds every field and every word of the schema', () => {
+/** Fields that came after it. */
+const later = ['checkedDate', 'approvedDate', 'voided']
+
+test('the dictionary holds every field and every word of the schema as they were then', () => {
   const words =
     'voltage current impedance power other magnitude angle shift ellipse reactive-power power-factor rms peak peak-to-peak rising falling leads lags true-rms average lead-positive lag-positive time resistance tip-to-tail from-origin resistor coil capacitor phase line star delta closing A4 A3 Letter landscape portrait low medium high true'
   const all = [...FIELD_ORDER, ...MISTAKES, ...words.split(' ')]
-  expect(all.filter((word) => !DICTIONARY_1.includes(word))).toEqual([])
+  expect(all.filter((word) => !DICTIONARY_1.includes(word))).toEqual(later)
 })
 
 test('the dictionary takes no more than 3 KiB', () => {

@@ -1,0 +1,3 @@
+export { BeforeMeasuring } from './BeforeMeasuring'
+export { Findings } from './Findings'
+export { ReportVerb } from './ReportVerb'

@@ -1,0 +1,3 @@
+export { createPdf, type PdfOptions } from './create-pdf'
+export type { PdfFonts } from './faces'
+export type { PaintedText, PaintText } from './missing'
