@@ -13,7 +13,8 @@ const tables: { [face in Face]?: Map<number, number> } = {}
 /**
  * The width of a line of text in millimetres: the sum of its characters' advances in the shipped
  * fonts. A character that they lack takes a whole em where it is ideographic or a pictograph, nothing
- * where it is a mark or invisible, and 0.64 em otherwise.
+ * where it is a mark or invisible, that of its letter where it only has an accent more, and otherwise
+ * what letters of its script usually take.
  */
 export function measureText(runs: readonly TextRun[]): number {
   let width = 0
@@ -51,5 +52,21 @@ function unknownAdvance(character: string, code: number, face: Face): number {
   if (/[\p{M}\p{Cc}\p{Cf}]/u.test(character)) return 0
   const isWide =
     /[\p{Ideographic}\p{Extended_Pictographic}\p{Regional_Indicator}\u3000-\u30ff\uac00-\ud7a3\uff01-\uff60]/u
-  return isWide.test(character) ? UNITS_PER_EM : 0.64 * UNITS_PER_EM
+  if (isWide.test(character)) return UNITS_PER_EM
+  const base = character.normalize('NFD').codePointAt(0) ?? code
+  const own = base === code ? undefined : tableOf(face).get(base)
+  if (own !== undefined) return own
+  const share = /\p{Script=Cyrillic}/u.test(character) ? cyrillicAdvance(character) : USUAL_ADVANCE
+  return (face === 'bold' ? BOLDER * share : share) * UNITS_PER_EM
+}
+
+/** The advance of most letters that the faces lack, in ems, and how much wider bold ones are. */
+const USUAL_ADVANCE = 0.64
+const BOLDER = 1.12
+
+/** The advance of a Cyrillic letter in ems: small and capital ones, and the broad ones of both. */
+function cyrillicAdvance(character: string): number {
+  const isCapital = /\p{Lu}/u.test(character)
+  if (/[жмфшщыюњљ]/iu.test(character)) return isCapital ? 1.06 : 0.88
+  return isCapital ? 0.74 : 0.62
 }

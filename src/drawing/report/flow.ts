@@ -9,7 +9,7 @@ export interface Piece {
   readonly draw: (topLeft: Place) => readonly Item[]
 }
 
-/** Pieces that stay together where a column can hold them: a row of a table, a heading, a paragraph. */
+/** Pieces that stay together unless they are long: a row of a table, a heading, a paragraph. */
 export interface Block {
   readonly pieces: readonly Piece[]
   /** Free millimetres above it, but not at the top of a column. */
@@ -30,12 +30,15 @@ export function heightOf(pieces: readonly Piece[]): number {
   return pieces.reduce((sum, { height }) => sum + height, 0)
 }
 
+/** A block that takes more of a column than this is broken rather than leave so much of one empty. */
+const LARGEST_WHOLE = 0.35
+
 /** What a rounding error may let a column run over, in millimetres. */
 const ROUNDING = 1e-6
 
 /**
- * Sets blocks one below the other into the columns of as many pages as they need. A block that a column
- * can hold is not broken; one that none can hold is broken between its pieces. The columns of every page
+ * Sets blocks one below the other into the columns of as many pages as they need. A block is not broken
+ * unless it is long; a long one is broken between its pieces. The columns of every page
  * are alike.
  */
 export function flow(blocks: readonly Block[], columns: readonly Box[]): FilledPage[] {
@@ -66,7 +69,7 @@ export function flow(blocks: readonly Block[], columns: readonly Box[]): FilledP
   blocks.forEach((block, index) => {
     const { pieces, head = [], space = 0 } = block
     const wanted = heightOf(pieces) + heightKeptWith(blocks, index, fullHeight)
-    const isBreakable = heightOf(head) + wanted > fullHeight
+    const isBreakable = heightOf(head) + wanted > LARGEST_WHOLE * fullHeight
     const needed = isBreakable ? heightOf(pieces.slice(0, 3)) : wanted
     if (room() < (isTop ? 0 : space) + needed) next()
     else if (!isTop) y -= space
@@ -85,6 +88,6 @@ function heightKeptWith(blocks: readonly Block[], index: number, fullHeight: num
   if (following === undefined) return 0
   const { pieces, space = 0 } = following
   const whole = heightOf(pieces)
-  const own = whole > 0.5 * fullHeight ? heightOf(pieces.slice(0, 3)) : whole
+  const own = whole > LARGEST_WHOLE * fullHeight ? heightOf(pieces.slice(0, 3)) : whole
   return space + own + heightKeptWith(blocks, index + 1, fullHeight)
 }

@@ -29,14 +29,7 @@ export function stripItems(
 ): readonly Item[] {
   const fields = fieldsOf(sheet, kind, sheetNumber)
   const top = frame.bottom + STRIP_HEIGHT
-  const needs = fields.map(
-    ({ caption, value, style }) =>
-      Math.max(widthOf(caption, CAPTION), widthOf(value, style)) + 2 * PADDING,
-  )
-  const [title = 0, ...others] = needs
-  const width = frame.right - frame.left
-  const beside = shareOut(Math.min(0.7 * width, sum(others)), others)
-  const widths = [Math.max(width - sum(beside), Math.min(title, 0.3 * width)), ...beside]
+  const widths = widthsOf(fields, frame.right - frame.left)
   const rules = [frame.left, top, frame.right, top]
   const texts: Item[] = []
   let left = frame.left
@@ -71,6 +64,23 @@ interface Field {
   readonly caption: string
   readonly value: string
   readonly style: typeof VALUE | typeof TITLE
+  /** Is never shortened. */
+  readonly isWhole?: true
+}
+
+/** The title takes what the others leave, and at least its share; what is never shortened comes first. */
+function widthsOf(fields: readonly Field[], width: number): readonly number[] {
+  const needs = fields.map(
+    ({ caption, value, style }) =>
+      Math.max(widthOf(caption, CAPTION), widthOf(value, style)) + 2 * PADDING,
+  )
+  const wholes = needs.filter((_, at) => fields[at]?.isWhole)
+  const others = needs.filter((_, at) => at > 0 && !fields[at]?.isWhole)
+  const room = width - sum(wholes)
+  const title = Math.min(needs[0] ?? 0, 0.3 * width)
+  const shared = shareOut(Math.min(room - title, sum(others)), others)
+  const left = [room - sum(shared), ...shared]
+  return fields.map((field, at) => (field.isWhole ? (needs[at] ?? 0) : (left.shift() ?? 0)))
 }
 
 function fieldsOf(
@@ -86,12 +96,12 @@ function fieldsOf(
   ]
   return [
     { caption: 'Title', value: oneLine(title) || 'Untitled', style: TITLE },
-    { caption: 'Document type', value: kind, style: VALUE },
+    { caption: 'Document type', value: kind, style: VALUE, isWhole: true },
     ...optional.flatMap(([caption, value = '']) =>
       value.trim() === '' ? [] : [{ caption, value: oneLine(value), style: VALUE }],
     ),
     { caption: 'Revision index', value: oneLine(revision ?? '') || '0', style: VALUE },
-    { caption: 'Sheet number', value: sheetNumber, style: VALUE },
+    { caption: 'Sheet number', value: sheetNumber, style: VALUE, isWhole: true },
   ]
 }
 
