@@ -1,6 +1,12 @@
 import { unitOf } from '../../../core'
-import type { CircuitElement, ElementEvaluation, Sheet } from '../../../sheet'
-import { heading } from '../blocks'
+import {
+  type CircuitElement,
+  type ElementEvaluation,
+  type Evaluation,
+  foundBesideMark,
+  type Sheet,
+} from '../../../sheet'
+import { heading, paragraph } from '../blocks'
 import type { Cell } from '../columns'
 import { cell, labelOf, labelsOf, limitedText, symbolsCell } from '../names'
 import type { Section } from '../section'
@@ -23,8 +29,21 @@ export const elements: Section = {
         rows,
         width,
       ),
+      ...all
+        .flatMap((element) => sentencesOf(sheet, element, evaluation))
+        .map((text) => paragraph(text, width)),
     ]
   },
+}
+
+/** What is said of an element's values beside their marks. */
+function sentencesOf(
+  sheet: Sheet,
+  element: CircuitElement,
+  { elements: evaluated = [] }: Evaluation,
+): readonly string[] {
+  const found = evaluated.find(({ id }) => id === element.id)
+  return found ? foundBesideMark(sheet, element, found).map(({ text }) => text) : []
 }
 
 const QUANTITIES = [

@@ -1,5 +1,6 @@
 import type { Section } from '../section'
 import { cautions } from './cautions'
+import { comparison } from './comparison'
 import { conclusion } from './conclusion'
 import { corrections } from './corrections'
 import { elements } from './elements'
@@ -8,6 +9,7 @@ import { hazards } from './hazards'
 import { instruments } from './instruments'
 import { job } from './job'
 import { link } from './link'
+import { power } from './power'
 import { readings } from './readings'
 import { schedule } from './schedule'
 import { signOff } from './sign-off'
@@ -24,7 +26,9 @@ export const SECTIONS: readonly Section[] = [
   readings,
   instruments,
   hand,
+  comparison,
   elements,
+  power,
   corrections,
   cautions,
   conclusion,
