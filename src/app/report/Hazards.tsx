@@ -45,7 +45,7 @@ export function Hazards() {
       {cautions.length > 0 && (
         <>
           <h3>What the numbers give to take care of</h3>
-          <ul className="cautions">
+          <ul className="hazard-cautions">
             {cautions.map((caution) => (
               <li key={caution.hazard}>
                 <span>{caution.hazard}</span>

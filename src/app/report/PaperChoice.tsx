@@ -46,13 +46,13 @@ export function PaperChoice(properties: {
         onChoose={(lies) => setDrawing({ orientation: lies })}
       />
       <Select
-        caption="Paper of the other pages"
+        caption="Paper of the others"
         value={format ?? drawing.format}
         choices={formats}
         onChoose={(chosen) => setPaper({ format: chosen })}
       />
       <Select
-        caption="The other pages lie"
+        caption="The others lie"
         value={orientation ?? drawing.orientation}
         choices={orientations}
         onChoose={(lies) => setPaper({ orientation: lies })}
