@@ -10,7 +10,7 @@ const anyPackage = '^node_modules/'
  */
 const rooms = {
   core: { rooms: [], packages: ['complex.js', 'ml-matrix'] },
-  sheet: { rooms: ['core'], packages: ['valibot', 'fflate'] },
+  sheet: { rooms: ['core'], packages: ['valibot', 'fflate', '@noble/hashes'] },
   drawing: { rooms: ['sheet', 'core'], packages: ['jspdf'] },
 }
 

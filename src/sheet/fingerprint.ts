@@ -1,6 +1,7 @@
+import { sha256 } from '@noble/hashes/sha2.js'
+import { bytesToHex } from '@noble/hashes/utils.js'
 import { strToU8 } from 'fflate'
 import { toCanonical } from './canonical'
-import { sha256 } from './sha-256'
 import { signedPartOf } from './signed-part'
 import type { Sheet } from './types'
 
@@ -11,7 +12,7 @@ import type { Sheet } from './types'
  */
 export function fingerprintOf(sheet: Sheet): string {
   const text = JSON.stringify(toCanonical(signedPartOf(sheet)))
-  return sha256(strToU8(text))
+  return bytesToHex(sha256(strToU8(text)))
     .slice(0, 12)
     .replace(/....(?=.)/g, '$& ')
 }
