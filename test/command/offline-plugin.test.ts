@@ -77,10 +77,11 @@ describe('the manifest', () => {
     for (const address of addresses) expect(address).not.toMatch(/^(\/|\w+:)/)
   })
 
-  test('takes sheets and the drawings that carry one', () => {
+  test('takes sheets, and the drawings and reports that carry one', () => {
     expect(manifest.file_handlers[0].accept).toEqual({
       'application/json': ['.phasogon.json'],
       'image/svg+xml': ['.svg'],
+      'application/pdf': ['.pdf'],
     })
   })
 })

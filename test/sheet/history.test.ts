@@ -63,7 +63,7 @@ test('random edits are often made, and of every kind', unhurried, () => {
   const made = new Set<string>()
   for (const [sheet, edits] of fc.sample(fc.tuple(anySheet, fc.array(anyEdit)), {
     seed: 3,
-    numRuns: 300,
+    numRuns: 900,
   })) {
     for (const editOf of edits) {
       const edit = editOf(sheet)

@@ -107,7 +107,7 @@ describe('before a job', () => {
       at: [],
       form: 'parallel',
     })
-    expect(caution(bare, 'motor')).toBe(
+    expect(caution(bare, 'to predict from')).toBe(
       'motor has no value to predict from: what hangs on it is not predicted.',
     )
     expect(evaluate(bare).comparison?.map(({ phasor }) => phasor)).toEqual([
