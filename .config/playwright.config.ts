@@ -17,7 +17,9 @@ export default defineConfig({
   use: {
     // Known once the server is up: it prints its address.
     baseURL: process.env.PHASOGON_ADDRESS ?? '',
-    trace: 'retain-on-failure',
+    // A trace of every test would take a quarter of the time: --trace on makes one of those asked for.
+    trace: 'off',
+    screenshot: 'only-on-failure',
     launchOptions: {
       executablePath: process.env.PLAYWRIGHT_CHROMIUM_EXECUTABLE_PATH,
       args: browserFlags,

@@ -28,7 +28,7 @@ const parts = 4
 
 test.describe.configure({ mode: 'parallel' })
 // Two hundred pages are loaded: as small as they can be, and without their service worker.
-test.use({ viewport: { width: 320, height: 240 }, trace: 'off', serviceWorkers: 'block' })
+test.use({ viewport: { width: 320, height: 240 }, serviceWorkers: 'block' })
 
 for (let part = 0; part < parts; part += 1) {
   test(`the last committed edit is back after a page was killed, part ${part + 1} of ${parts}`, async ({
