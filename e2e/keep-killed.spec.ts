@@ -23,11 +23,12 @@ const names = [
   'Angle of Vcable',
 ] as const
 
-const sequences = 200
+/** In every run of the tests; SEQUENCES=200 kills as many pages as a release is held to. */
+const sequences = Number(process.env.SEQUENCES ?? 60)
 const parts = 4
 
 test.describe.configure({ mode: 'parallel' })
-// Two hundred pages are loaded: as small as they can be, and without their service worker.
+// Many pages are loaded: as small as they can be, and without their service worker.
 test.use({ viewport: { width: 320, height: 240 }, serviceWorkers: 'block' })
 
 for (let part = 0; part < parts; part += 1) {

@@ -7,11 +7,11 @@ import { expect, test } from './support/test'
 const edits = 500
 const rounds = 10
 
-test.use({ trace: 'off' })
-
 async function openPage(page: Page): Promise<void> {
   await page.goto('./')
   await isDrawn(page)
+  await page.getByText('Title block', { exact: true }).click()
+  await expect(page.getByRole('textbox', { name: 'Conditions' })).toBeVisible()
 }
 
 /** Appends marks to a field of the title block, one edit each, with random pauses between them. */

@@ -32,6 +32,8 @@ export const browserFlags = [
   '--disable-background-networking',
   '--disable-component-update',
   '--disable-sync',
+  // Without it a Chromium without a window sets letters on whole pixels.
+  '--font-render-hinting=none',
 ]
 
 /**
