@@ -24,7 +24,7 @@ const names = [
 ] as const
 
 /** In every run of the tests; SEQUENCES=200 kills as many pages as a release is held to. */
-const sequences = Number(process.env.SEQUENCES ?? 60)
+const sequences = Number(process.env.SEQUENCES ?? 40)
 const parts = 4
 
 test.describe.configure({ mode: 'parallel' })
