@@ -27,7 +27,7 @@ export function Comparison(properties: {
     )
   }
   return (
-    <table className="compared">
+    <table className="compared comparison">
       <caption>Predicted and measured; differences are measured less predicted</caption>
       <thead>
         <tr>

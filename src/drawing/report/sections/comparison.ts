@@ -13,7 +13,13 @@ export const comparison: Section = {
     if (rows.length === 0) return []
     return [
       heading('Predicted and measured', width),
-      note('Differences are measured less predicted; allowed are both limits together.', width),
+      {
+        ...note(
+          'Differences are measured less predicted; allowed are both limits together.',
+          width,
+        ),
+        isHeading: true,
+      },
       ...table(
         [
           { title: 'Quantity' },

@@ -3,8 +3,11 @@ import {
   type CircuitElement,
   type ElementEvaluation,
   type Evaluation,
+  formatElementLimit,
+  formatElementValue,
   foundBesideMark,
   type Sheet,
+  type Typed,
 } from '../../../sheet'
 import { heading, paragraph } from '../blocks'
 import type { Cell } from '../columns'
@@ -67,11 +70,9 @@ function rowOf(
       labelsOf(sheet),
     ),
     cell(
-      QUANTITIES.flatMap(([name, symbol, unit]) => {
+      QUANTITIES.flatMap(([name, symbol]) => {
         const value = marked?.[name]
-        return value === undefined
-          ? []
-          : [`${symbol} = ${limitedText(value.value, value.limit, unit)}`]
+        return value === undefined ? [] : [`${symbol} = ${markText(value, name)}`]
       }).join('; '),
     ),
     cell(
@@ -83,4 +84,11 @@ function rowOf(
       }).join('; '),
     ),
   ]
+}
+
+/** A mark with the digits and the tolerance that were typed. */
+function markText(value: Typed, name: (typeof QUANTITIES)[number][0]): string {
+  const limit = formatElementLimit(value, name)
+  const figure = formatElementValue(value, name)
+  return limit === undefined ? figure : `${figure} ${limit}`
 }

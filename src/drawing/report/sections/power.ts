@@ -14,7 +14,12 @@ export const power: Section = {
     return [
       heading('Power', width),
       ...(rows.some(({ isPredicted }) => isPredicted)
-        ? [note('Predicted by the circuit: the readings do not give it.', width)]
+        ? [
+            {
+              ...note('Predicted by the circuit: the readings do not give it.', width),
+              isHeading: true,
+            },
+          ]
         : []),
       ...table(
         [
