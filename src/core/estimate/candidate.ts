@@ -1,3 +1,4 @@
+import { anyPlace } from './any-place'
 import { ConditionsAt } from './conditions-at'
 import type { PhasorEquations } from './equations'
 import { feasible } from './feasible'
@@ -61,11 +62,21 @@ export class Candidate {
 
   /**
    * Whether the observations and conditions fix an observable. Where something is open, what happens
-   * to have no slope just here (an open angle that was guessed in line) does not count as fixed.
+   * to have no slope just here (an open angle that was guessed in line, an open current that was guessed
+   * as 0) does not count as fixed: it must be so beside the solution, and at any other place too.
    */
   isFixed(observable: Observable): boolean {
-    const { x, at } = this.#beside ?? { x: this.solution.x, at: this.linearisation }
-    return at.spreadOf(gradientAt(this.equations, observable, x).gradient).isFixed
+    const beside = this.#beside
+    if (beside === undefined) return isFixedAt(this.equations, observable, this.#here)
+    const elsewhere = elsewhereOn(this.equations)
+    return (
+      isFixedAt(this.equations, observable, beside) &&
+      (elsewhere === undefined || isFixedAt(this.equations, observable, elsewhere))
+    )
+  }
+
+  get #here(): Beside {
+    return { x: this.solution.x, at: this.linearisation }
   }
 }
 
@@ -80,6 +91,22 @@ function gradientAt(equations: PhasorEquations, observable: Observable, x: Float
     if (column !== undefined) gradient[column] = (gradient[column] ?? 0) + slope
   })
   return { value, gradient }
+}
+
+function isFixedAt(equations: PhasorEquations, observable: Observable, { x, at }: Beside): boolean {
+  return at.spreadOf(gradientAt(equations, observable, x).gradient).isFixed
+}
+
+/** Found once for all solutions of a problem. */
+const elsewheres = new WeakMap<PhasorEquations, { readonly place: Beside | undefined }>()
+
+function elsewhereOn(equations: PhasorEquations): Beside | undefined {
+  const known = elsewheres.get(equations)
+  if (known) return known.place
+  const x = anyPlace(equations)
+  const place = x && { x, at: linearisedAt(equations, x) }
+  elsewheres.set(equations, { place })
+  return place
 }
 
 function linearisedAt(equations: PhasorEquations, x: Float64Array): Linearisation {

@@ -1,11 +1,10 @@
 import type { Matrix } from 'ml-matrix'
+import { anyPlace } from './any-place'
 import { ConditionsAt, linearise } from './conditions-at'
 import { equationsOf, type PhasorEquations } from './equations'
-import { feasible } from './feasible'
 import { fixedDirections } from './fixed-directions'
 import type { PhasorIndex, PhasorProblem } from './phasor-problem'
 import { sumOfSquares } from './problem'
-import { createRandom } from './random'
 import { dot, rowLengths, times, timesTransposed } from './vectors'
 
 /** A quantity that nothing fixes is magnitude or angle of a phasor; a reading that would fix it is, too. */
@@ -27,7 +26,6 @@ export interface MissingReadings {
 
 /** How much of a gradient may point where the observations do not reach. */
 const FIXED_TOLERANCE = 1e-6
-const TRIES = 8
 
 /** A quantity, and the part of its gradient that points where nothing reaches. */
 interface Open {
@@ -60,17 +58,6 @@ export function missingReadings(
     left = after
   }
   return { open, plan }
-}
-
-/** Somewhere on the conditions, nothing in line with anything. */
-function anyPlace(equations: PhasorEquations): Float64Array | undefined {
-  const random = createRandom(4)
-  for (let each = 0; each < TRIES; each++) {
-    const start = Float64Array.from({ length: equations.unknowns }, () => 2 * random() - 1)
-    const found = feasible(equations, start)
-    if (found) return found
-  }
-  return undefined
 }
 
 function openAt(
