@@ -21,9 +21,13 @@ export interface SharedLimitPart extends LimitPart {
   readonly group?: string
 }
 
+/** A limit that is smaller has no square that a computer can hold: it counts as exact. */
+const LEAST = 1e-150
+
 /** An error that lies within a limit for certain. */
 export function withinLimit(name: string, limit: number): LimitPart {
-  return { name, limit, uncertainty: limit / Math.sqrt(3), shape: 'rectangular' }
+  const uncertainty = limit < LEAST ? 0 : limit / Math.sqrt(3)
+  return { name, limit, uncertainty, shape: 'rectangular' }
 }
 
 /** The share of a common error that lies within a limit for certain; `move` is signed. */
