@@ -1,7 +1,7 @@
 import type { Page } from '@playwright/test'
 import { addDrivers, createRandom } from './support/drive'
 import { keptOf } from './support/kept'
-import { isDrawn } from './support/page'
+import { isDrawn, unfold } from './support/page'
 import { expect, test } from './support/test'
 
 const edits = 500
@@ -10,7 +10,7 @@ const rounds = 10
 async function openPage(page: Page): Promise<void> {
   await page.goto('./')
   await isDrawn(page)
-  await page.getByText('Title block', { exact: true }).click()
+  await unfold(page, 'Title block')
   await expect(page.getByRole('textbox', { name: 'Conditions' })).toBeVisible()
 }
 

@@ -2,7 +2,7 @@ import type { Page } from '@playwright/test'
 import { emptySheet, type Sheet } from '../src/sheet'
 import { brakeSheet } from './support/circuit'
 import { fullSheet, longSheet } from './support/full'
-import { openPage } from './support/page'
+import { openPage, unfold } from './support/page'
 import { screens } from './support/screens'
 import { expect, test } from './support/test'
 
@@ -24,7 +24,7 @@ for (const [name, sheet] of sheets) {
       'Criterion and conclusion',
       'Paper, scale and reference',
     ]) {
-      await page.getByText(group, { exact: true }).click()
+      await unfold(page, group)
     }
     for (const width of [1280, 820, 390, 320]) {
       await page.setViewportSize({ width, height: 800 })

@@ -4,7 +4,7 @@ import papa from 'papaparse'
 import { exampleSheet, fingerprintOf, parseSheetText, serializeSheet } from '../src/sheet'
 import { allowClipboard } from './support/clipboard'
 import { drop } from './support/files'
-import { openPage, settledSheet } from './support/page'
+import { openPage, settledSheet, unfold } from './support/page'
 import { lengthOf, type PrintedPage, readPrint } from './support/print'
 import { expect, test } from './support/test'
 
@@ -35,7 +35,7 @@ test('a job is described, signed, changed, printed, saved as a PDF and opened fr
   page,
 }) => {
   await openPage(page, exampleSheet)
-  await page.getByText('Title block', { exact: true }).click()
+  await unfold(page, 'Title block')
   await fill(page, 'Tested by', 'E. Falk')
   await fill(page, 'Checked by', 'A. Berg')
   await fill(page, 'Checked on', '2026-11-30')
@@ -131,7 +131,7 @@ test('the tables leave with their figures as numbers, and earlier names are offe
   await verbOf(page, 'Close').click()
 
   await page.getByRole('button', { name: 'New sheet', exact: true }).click()
-  await page.getByText('Title block', { exact: true }).click()
+  await unfold(page, 'Title block')
   const site = page.getByLabel('Site', { exact: true })
   await expect
     .poll(() =>

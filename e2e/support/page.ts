@@ -13,6 +13,12 @@ export async function isDrawn(page: Page): Promise<void> {
   await expect(page.locator('html')).toHaveAttribute('data-ready', 'true')
 }
 
+/** Opens a part of the page by its heading, once the first answer has come: until then it may move down. */
+export async function unfold(page: Page, heading: string): Promise<void> {
+  await expect(page.locator('html')).toHaveAttribute('data-settled', 'true')
+  await page.getByText(heading, { exact: true }).click()
+}
+
 /** The sheet that the address carries; undefined where it carries none that can be read. */
 export function sheetInAddress(page: Page): Sheet | undefined {
   const result = parseLink(page.url())

@@ -3,7 +3,7 @@ import { emptySheet, type Sheet } from '../../src/sheet'
 import { benchSheet } from './bench'
 import { brakeSheet, circuitOf } from './circuit'
 import { fullSheet } from './full'
-import { openPage } from './page'
+import { openPage, unfold } from './page'
 import { cell } from './schedule'
 import { expect } from './test'
 
@@ -79,8 +79,8 @@ export const screens: readonly Screen[] = [
     part: '[aria-label="Sheet"]',
     reach: async (page) => {
       await afresh(page, benchSheet)
-      await page.getByText('Title block', { exact: true }).click()
-      await page.getByText('Paper, scale and reference', { exact: true }).click()
+      await unfold(page, 'Title block')
+      await unfold(page, 'Paper, scale and reference')
       await expect(page.getByRole('textbox', { name: 'Job number' })).toBeVisible()
     },
   },
@@ -89,7 +89,7 @@ export const screens: readonly Screen[] = [
     part: '[aria-label="Sheet"]',
     reach: async (page) => {
       await afresh(page, signedSheet)
-      await page.getByText('Title block', { exact: true }).click()
+      await unfold(page, 'Title block')
       await page.getByText('Before you measure', { exact: true }).click()
       await page.getByText('Criterion and conclusion', { exact: true }).click()
       await pressVerb(page, 'Add the usual ones')
