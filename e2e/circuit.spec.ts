@@ -95,6 +95,18 @@ test('a circuit is built with words, readings are typed, and verdicts and values
     await page.getByRole('button', { name: 'Undo', exact: true }).first().click()
     await expect(circuit.getByText(/^No sum adds up/)).toHaveCount(0)
   })
+
+  await test.step('prints the comparison', async () => {
+    await page.getByRole('button', { name: 'Report', exact: true }).click()
+    const pages = page.getByRole('dialog').locator('.page-paper')
+    const printed = async () => (await pages.allTextContents()).join('\n')
+    await expect.poll(printed).toContain('Predicted and measured')
+    const text = await printed()
+    for (const { parts, verdict } of comparisonRows(sheet, evaluation)) {
+      expect(text).toContain(verdict)
+      for (const { predicted } of parts) expect(text).toContain(predicted)
+    }
+  })
 })
 
 test('a bad capacitor is found as such, and the drawings say so', async ({ page }) => {

@@ -6,8 +6,8 @@ export interface AddressBar {
   readHash(): string
   /** Writes the fragment without a step in the browser's history; throws where the browser refuses. */
   replaceHash(hash: string): void
-  /** Calls back when someone pastes another fragment. */
-  onHash(listener: () => void): () => void
+  /** Calls back with a fragment that someone pastes, whatever has been written over it since. */
+  onHash(listener: (hash: string) => void): () => void
   /** Calls back when the page is about to go. */
   onLeave(listener: () => void): () => void
 }
@@ -57,8 +57,7 @@ export function keepAddress(
   const stopStore = store.subscribe((state, before) => {
     if (state.history.sheet !== before.history.sheet) schedule(state.history.sheet)
   })
-  const stopHash = bar.onHash(() => {
-    const hash = bar.readHash()
+  const stopHash = bar.onHash((hash) => {
     if (hash !== '' && hash !== written) {
       written = hash
       onForeign(hash)
@@ -78,8 +77,9 @@ export const browserAddress: AddressBar = {
   readHash: () => window.location.hash,
   replaceHash: (hash) => window.history.replaceState(window.history.state, '', hash),
   onHash: (listener) => {
-    window.addEventListener('hashchange', listener)
-    return () => window.removeEventListener('hashchange', listener)
+    const tell = ({ newURL }: HashChangeEvent) => listener(new URL(newURL).hash)
+    window.addEventListener('hashchange', tell)
+    return () => window.removeEventListener('hashchange', tell)
   },
   onLeave: (listener) => {
     window.addEventListener('pagehide', listener)

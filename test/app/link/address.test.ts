@@ -5,7 +5,7 @@ import { exampleSheet, parseLink } from '../../../src/sheet'
 
 /** An address bar that keeps what it is told and can refuse it. */
 function createBar() {
-  const listeners = { hash: () => {}, leave: () => {} }
+  const listeners = { hash: (_: string) => {}, leave: () => {} }
   const bar = {
     hash: '',
     writes: 0,
@@ -16,7 +16,7 @@ function createBar() {
       if (bar.refuses) throw new Error('Too many calls.')
       bar.hash = hash
     },
-    onHash: (listener: () => void) => {
+    onHash: (listener: (hash: string) => void) => {
       listeners.hash = listener
       return () => {}
     },
@@ -26,7 +26,13 @@ function createBar() {
     },
     paste: (hash: string) => {
       bar.hash = hash
-      listeners.hash()
+      listeners.hash(hash)
+    },
+    /** Pastes, and lets time pass before the page hears of it. */
+    pasteLate: (hash: string, milliseconds: number) => {
+      bar.hash = hash
+      vi.advanceTimersByTime(milliseconds)
+      listeners.hash(hash)
     },
     leave: () => listeners.leave(),
   }
@@ -87,6 +93,17 @@ describe('keeping the address in step', () => {
     bar.refuses = false
     bar.leave()
     expect(titleIn(bar.hash)).toBe('Refused at first')
+  })
+
+  it('hears of a link that was pasted while a write of its own was due', () => {
+    const bar = createBar()
+    const store = createStore(exampleSheet, 'example')
+    const pasted: string[] = []
+    keepAddress(store, bar, (hash) => pasted.push(hash))
+    rename(store, 'Just typed')
+    bar.pasteLate('#sheet=1.somebody-else', 2_000)
+    expect(titleIn(bar.hash)).toBe('Just typed')
+    expect(pasted).toEqual(['#sheet=1.somebody-else'])
   })
 
   it('tells a pasted link from one of its own', () => {
