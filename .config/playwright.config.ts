@@ -12,7 +12,7 @@ export default defineConfig({
   retries: 0,
   // For what hangs, not for what is slow: a busy machine fails no test.
   timeout: 300_000,
-  expect: { timeout: 20_000 },
+  expect: { timeout: 45_000 },
   reporter: 'list',
   use: {
     // Known once the server is up: it prints its address.
