@@ -3,7 +3,7 @@ import { checkFigure, expectCheckedAs } from './support/check-line'
 import { sheetInLink } from './support/clipboard'
 import { expectFigures, textOf } from './support/figures'
 import { type JobPhasor, jobPhasors, jobResultant, jobTerms } from './support/job'
-import { press, tabTo } from './support/keyboard'
+import { addPhasor, choose, press, tabTo } from './support/keyboard'
 import { isDrawn, openPage, settledSheet } from './support/page'
 import { cell } from './support/schedule'
 import { expect, test } from './support/test'
@@ -95,31 +95,11 @@ test('a technician does the whole job without touching the mouse', async ({ page
 async function typePhasor(page: Page, phasor: JobPhasor): Promise<void> {
   const { label, quantity, magnitude, angle, known } = phasor
   const { keyboard } = page
-  await press(page, 'Add phasor')
-  await expect(
-    page
-      .getByRole('table', { name: 'Phasors' })
-      .locator('tbody')
-      .getByRole('row')
-      .last()
-      .getByRole('textbox')
-      .first(),
-  ).toBeFocused()
-  await keyboard.type(label)
-  await keyboard.press('Tab')
-  await expect(page.getByRole('combobox', { name: `Quantity of ${label}` })).toBeFocused()
-  await keyboard.type(quantity)
+  await addPhasor(page, label, quantity)
   await keyboard.press('Tab')
   await keyboard.type(magnitude)
   await keyboard.press('Tab')
   await keyboard.type(angle)
   await tabTo(page, page.getByRole('combobox', { name: `How ${label} is known` }))
   await keyboard.type(known)
-}
-
-/** Opens the list that has the focus and picks from it by typing its name. */
-async function choose(page: Page, name: string): Promise<void> {
-  await page.keyboard.press('Space')
-  await page.keyboard.type(name)
-  await page.keyboard.press('Enter')
 }

@@ -3,7 +3,7 @@ import type { Sheet } from '../src/sheet'
 import { expectTermsOnBoard, savedByKeyboard } from './support/agreement'
 import { arrowOf, sceneOf } from './support/board'
 import { expectCheckedAs } from './support/check-line'
-import { press, tabTo } from './support/keyboard'
+import { addPhasor, choose, press, tabTo } from './support/keyboard'
 import { openPage, settledSheet } from './support/page'
 import { nextReading, pickForNext, typeReading, wordsOfReading } from './support/readings'
 import { cell } from './support/schedule'
@@ -102,38 +102,16 @@ test('a four-voltage job is taken down as shown, by keyboard alone', async ({ pa
   })
 })
 
-async function addPhasor(page: Page, label: string, quantity: string): Promise<void> {
-  await press(page, 'Add phasor')
-  await expect(
-    page
-      .getByRole('table', { name: 'Phasors' })
-      .locator('tbody')
-      .getByRole('row')
-      .last()
-      .getByRole('textbox')
-      .first(),
-  ).toBeFocused()
-  await page.keyboard.type(label)
-  await page.keyboard.press('Tab')
-  await page.keyboard.type(quantity)
-}
-
 /** The first three voltages must add up to the last. */
 async function addSum(page: Page): Promise<void> {
   await press(page, 'Add sum')
   for (const label of voltages.slice(0, 3)) {
     await tabTo(page, page.getByRole('combobox', { name: 'Add a term to the sum' }), 'Shift+Tab')
-    await pick(page, label)
+    await choose(page, label)
     await tabTo(page, page.getByRole('button', { name: 'Add sum' }))
   }
   await tabTo(page, page.getByRole('combobox', { name: 'What the sum must equal' }), 'Shift+Tab')
-  await pick(page, 'VS')
-}
-
-async function pick(page: Page, name: string): Promise<void> {
-  await page.keyboard.press('Space')
-  await page.keyboard.type(name)
-  await page.keyboard.press('Enter')
+  await choose(page, 'VS')
 }
 
 async function openPart(page: Page, name: string): Promise<void> {

@@ -1,4 +1,5 @@
 import type { Locator, Page } from '@playwright/test'
+import { expect } from './test'
 
 /** More stops than the page has: whoever has not arrived by then never will. */
 const mostStops = 200
@@ -23,6 +24,31 @@ export async function press(
   key: 'Tab' | 'Shift+Tab' = 'Tab',
 ): Promise<void> {
   await tabTo(page, page.getByRole('button', { name, exact: true }), key)
+  await page.keyboard.press('Enter')
+}
+
+/** Adds a phasor, names it and picks its quantity, whose list has the focus then. */
+export async function addPhasor(page: Page, label: string, quantity: string): Promise<void> {
+  await press(page, 'Add phasor')
+  await expect(
+    page
+      .getByRole('table', { name: 'Phasors' })
+      .locator('tbody')
+      .getByRole('row')
+      .last()
+      .getByRole('textbox')
+      .first(),
+  ).toBeFocused()
+  await page.keyboard.type(label)
+  await page.keyboard.press('Tab')
+  await expect(page.getByRole('combobox', { name: `Quantity of ${label}` })).toBeFocused()
+  await page.keyboard.type(quantity)
+}
+
+/** Opens the list that has the focus and picks from it by typing its name. */
+export async function choose(page: Page, name: string): Promise<void> {
+  await page.keyboard.press('Space')
+  await page.keyboard.type(name)
   await page.keyboard.press('Enter')
 }
 

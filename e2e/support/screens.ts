@@ -40,6 +40,15 @@ const signedSheet: Sheet = {
   },
 }
 
+/** Opens a dialog, types into it what it refuses, and sees it refused. */
+async function refusedBy(page: Page, opens: string, text: string, takes: string): Promise<void> {
+  await afresh(page, benchSheet)
+  await pressVerb(page, opens)
+  await page.getByRole('dialog').getByRole('textbox').fill(text)
+  await pressVerb(page, takes)
+  await expect(page.getByRole('dialog').getByRole('alert')).toBeVisible()
+}
+
 /** Every screen that the page has. */
 export const screens: readonly Screen[] = [
   { name: 'a first visit', reach: (page) => afresh(page) },
@@ -110,24 +119,12 @@ export const screens: readonly Screen[] = [
   {
     name: 'the dialog to open a sheet, with a refusal',
     part: 'dialog',
-    reach: async (page) => {
-      await afresh(page, benchSheet)
-      await pressVerb(page, 'Open')
-      await page.getByRole('dialog').getByRole('textbox').fill('nothing')
-      await pressVerb(page, 'Open the link')
-      await expect(page.getByRole('dialog').getByRole('alert')).toBeVisible()
-    },
+    reach: (page) => refusedBy(page, 'Open', 'nothing', 'Open the link'),
   },
   {
     name: 'the dialog for rows, with a refusal',
     part: 'dialog',
-    reach: async (page) => {
-      await afresh(page, benchSheet)
-      await pressVerb(page, 'Paste rows')
-      await page.getByRole('dialog').getByRole('textbox').fill('V9\tx\ty')
-      await pressVerb(page, 'Add rows')
-      await expect(page.getByRole('dialog').getByRole('alert')).toBeVisible()
-    },
+    reach: (page) => refusedBy(page, 'Paste rows', 'V9\tx\ty', 'Add rows'),
   },
   {
     name: 'the menu to save a drawing',

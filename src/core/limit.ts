@@ -53,3 +53,8 @@ export function readLimit(
     return failure(`A limit cannot be negative: write ± ${text.replace(/^[-−–‐‑]\s*/, '')}.`)
   return success(isPercent ? { percent: size } : { absolute: size })
 }
+
+/** What was typed for a limit in a field of its own, as `parseCell` reads a limit: with ± before it. */
+export function asLimit(text: string): string {
+  return /^(±|\+\s*\/?\s*[-−])/.test(text) ? text : `± ${text}`
+}

@@ -1,4 +1,5 @@
 import {
+  asLimit,
   type CellValue,
   failure,
   parseCell,
@@ -180,7 +181,7 @@ function takeInto(
 
 function limited(values: Values, unit: string, text: string): Result<Values> {
   if (text === '') return success(values)
-  const parsed = parseCell(/^(±|\+\/-)/.test(text) ? text : `± ${text}`, { unit })
+  const parsed = parseCell(asLimit(text), { unit })
   if (!parsed.ok) return failure(`its limit: ${parsed.problem}`)
   if (parsed.value.form !== 'limit')
     return failure('its limit cannot be read. Type it as 0.5 or 1 %.')

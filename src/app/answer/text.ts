@@ -1,23 +1,13 @@
 import { formatAngle, formatNumber, formatQuantity } from '../../core'
-import { type Evaluation, type Id, type Move, movesOf, type Reading, type Sheet } from '../../sheet'
-import { labelOf } from '../store'
-
-const KINDS: { readonly [kind in Reading['kind']]: string } = {
-  magnitude: 'magnitude',
-  angle: 'angle',
-  shift: 'shift',
-  ellipse: 'ellipse',
-  power: 'power',
-  'reactive-power': 'reactive power',
-  'power-factor': 'power factor',
-}
-
-/** How a reading is called: its number and what it is of, as `3: Vcoil, magnitude`. */
-export function nameOfReading(sheet: Sheet, id: Id): string {
-  const at = (sheet.readings ?? []).findIndex((reading) => reading.id === id)
-  const reading = sheet.readings?.[at]
-  return reading ? `${at + 1}: ${labelOf(sheet, reading.of)}, ${KINDS[reading.kind]}` : id
-}
+import {
+  type Evaluation,
+  type Id,
+  labelOf,
+  type Move,
+  movesOf,
+  nameOfReading,
+  type Sheet,
+} from '../../sheet'
 
 /** A row of the list of readings. */
 export interface ReadingLine {

@@ -1,6 +1,5 @@
 import { formatNumber, formatPolar, unitOf } from '../../core'
-import type { Place, Sheet } from '../../sheet'
-import { labelOf } from '../store'
+import { labelOf, type Place, type Sheet } from '../../sheet'
 import type { Readout } from './gestures'
 import type { Size } from './view'
 

@@ -13,8 +13,8 @@ import {
   type Tail,
   type TipDrag,
 } from '../../drawing'
-import type { Place, Sheet } from '../../sheet'
-import { answerOf, labelOf, nameOfSum, type Selection, type Store } from '../store'
+import { labelOf, type Place, type Sheet } from '../../sheet'
+import { answerOf, nameOfSum, type Selection, type Store } from '../store'
 import { panView, type Size, toPaper, type View, zoomView } from './view'
 
 /** What the gestures read from the board and tell it. Points are CSS pixels from its corner. */

@@ -1,16 +1,23 @@
-import { differenceDegrees, formatAngle, formatNumber, formatQuantity, unitOf } from '../../core'
+import {
+  differenceDegrees,
+  formatAngle,
+  formatNumber,
+  formatQuantity,
+  signed,
+  unitOf,
+} from '../../core'
 import { type Digits, digitsOfDrawn, formatDrawn } from '../../drawing'
 import {
   type Evaluation,
   type HandEvaluation,
+  labelOf,
   largestContribution,
   type Sheet,
   type Sum,
   seatsOf,
 } from '../../sheet'
-import { labelOf, quantityOfSum } from '../store'
+import { quantityOfSum } from '../store'
 import type { CheckFigure } from './figure'
-import { signed } from './signed'
 
 /** What the check line says of a construction by hand. */
 export interface HandFigures {

@@ -4,14 +4,21 @@ import {
   formatNumber,
   formatPolar,
   formatQuantity,
+  signed,
   unitOf,
 } from '../../core'
 import { type Digits, digitsOf, digitsOfResult, formatScale, readingsByPhasor } from '../../drawing'
-import type { Evaluation, Id, Sheet, Sum, SumEvaluation } from '../../sheet'
-import { labelOf, quantityOfSum } from '../store'
+import {
+  type Evaluation,
+  type Id,
+  labelOf,
+  type Sheet,
+  type Sum,
+  type SumEvaluation,
+} from '../../sheet'
+import { quantityOfSum } from '../store'
 import type { CheckFigure } from './figure'
 import { handFigures } from './hand-figures'
-import { signed } from './signed'
 
 /** What the check line says of a sum. */
 export interface CheckText {

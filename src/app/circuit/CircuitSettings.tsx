@@ -1,9 +1,16 @@
 import { parseNumber } from '../../core'
-import { assumedOf, type Phasor, type Sheet, type WiredNode, wiredNodes } from '../../sheet'
+import {
+  assumedOf,
+  labelOf,
+  type Phasor,
+  type Sheet,
+  type WiredNode,
+  wiredNodes,
+} from '../../sheet'
 import { Field } from '../details/Field'
 import { maybeNumber, tryEdit } from '../readings/commit'
 import { commitValue } from '../schedule/commit'
-import { labelOf, usePage, usePageStore } from '../store'
+import { usePage, usePageStore } from '../store'
 
 /** What drives the prediction, and what it assumes where nothing is stated. */
 export function CircuitSettings(properties: { readonly sheet: Sheet; readonly wiring: WiredNode }) {

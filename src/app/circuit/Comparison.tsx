@@ -1,7 +1,6 @@
 import { type ComparedPart, type ComparedRow, comparisonRows } from '../../drawing/circuit'
-import { type Evaluation, type Sheet, type WiredNode, wiredNodes } from '../../sheet'
+import { type Evaluation, labelOf, type Sheet, type WiredNode, wiredNodes } from '../../sheet'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
-import { labelOf } from '../store'
 
 const COLUMNS: readonly (readonly [keyof ComparedPart, string])[] = [
   ['predicted', 'Predicted'],

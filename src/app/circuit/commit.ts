@@ -1,8 +1,10 @@
+import { asLimit } from '../../core'
 import {
   type CircuitElement,
   type Edit,
   type ElementValue,
   formatElementLimit,
+  type Id,
   parseElementValue,
   type Typed,
 } from '../../sheet'
@@ -22,13 +24,21 @@ export function commitElementValue(
   before: Typed | undefined,
   text: string,
 ): string | undefined {
-  const as = standing === undefined ? {} : { as: standing }
-  if (text === '')
-    return tryEdit(store, { kind: 'set-element-value', id, value, typed: null, ...as })
+  const set = setterOf(store, id, value, standing)
+  if (text === '') return set(null)
   const parsed = parseElementValue(text, value, before)
-  if (!parsed.ok) return parsed.problem
-  const typed = withFormerLimit(parsed.value, value, before)
-  return tryEdit(store, { kind: 'set-element-value', id, value, typed, ...as })
+  return parsed.ok ? set(withFormerLimit(parsed.value, value, before)) : parsed.problem
+}
+
+/** Sets a value of an element where it stands, or takes it back; returns why the sheet refuses it. */
+function setterOf(
+  store: Store,
+  id: Id,
+  value: ElementValue,
+  standing: Standing | undefined,
+): (typed: Typed | null) => string | undefined {
+  const as = standing === undefined ? {} : { as: standing }
+  return (typed) => tryEdit(store, { kind: 'set-element-value', id, value, typed, ...as })
 }
 
 /** A new value goes on with the tolerance of the old one: the same percentage, where it is one. */
@@ -51,14 +61,11 @@ export function commitElementLimit(
   if (before === undefined) {
     return text === '' ? undefined : 'Type the value first, then how far off it may be.'
   }
-  const as = standing === undefined ? {} : { as: standing }
+  const set = setterOf(store, id, value, standing)
   const { limit: _, ...bare } = before
-  if (text === '')
-    return tryEdit(store, { kind: 'set-element-value', id, value, typed: bare, ...as })
-  const limit = /^(±|\+\s*\/?\s*[-−])/.test(text) ? text : `± ${text}`
-  const parsed = parseElementValue(limit, value, before)
-  if (!parsed.ok) return parsed.problem
-  return tryEdit(store, { kind: 'set-element-value', id, value, typed: parsed.value, ...as })
+  if (text === '') return set(bare)
+  const parsed = parseElementValue(asLimit(text), value, before)
+  return parsed.ok ? set(parsed.value) : parsed.problem
 }
 
 /** Changes an element; returns why the sheet refuses it. */

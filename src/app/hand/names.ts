@@ -1,6 +1,6 @@
 import { handArrowAt, type Position } from '../../drawing'
-import type { Sheet, Sum } from '../../sheet'
-import { labelOf, nameOfSum } from '../store'
+import { labelOf, type Sheet, type Sum } from '../../sheet'
+import { nameOfSum } from '../store'
 
 /** How an arrow of a construction is called: a term by its label, the last one by what it closes. */
 export function nameOfPosition(sheet: Sheet, sum: Sum, position: Position): string {

@@ -1,7 +1,6 @@
-import { formatAngle, formatNumber, formatQuantity, unitOf } from '../../core'
+import { formatAngle, formatNumber, formatQuantity, signed, unitOf } from '../../core'
 import { digitsOfDrawn } from '../../drawing'
 import type { HandEvaluation, Sheet, Sum } from '../../sheet'
-import { signed } from '../check/signed'
 import { quantityOfSum } from '../store'
 
 /**

@@ -2,6 +2,7 @@ import { type KeyboardEvent, useId, useState } from 'react'
 import {
   createReading,
   type Id,
+  labelOf,
   type NextReading as Next,
   newId,
   parseReadingText,
@@ -9,7 +10,7 @@ import {
   referenceOf,
   type Sheet,
 } from '../../sheet'
-import { labelOf, usePageStore } from '../store'
+import { usePageStore } from '../store'
 import { quantityOf, tryEdit } from './commit'
 import { KIND_LIST, KINDS, otherField } from './kinds'
 import { PhasorSelect } from './PhasorSelect'

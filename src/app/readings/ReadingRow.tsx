@@ -1,6 +1,7 @@
 import { formatLimit } from '../../core'
 import {
   type Id,
+  labelOf,
   limitOf,
   type Reading,
   type Remark,
@@ -10,7 +11,7 @@ import {
   wordsOf,
 } from '../../sheet'
 import { Cell } from '../schedule/Cell'
-import { labelOf, usePageStore } from '../store'
+import { usePageStore } from '../store'
 import { changeReading, commitFigures, commitReadingLimit, unitOfReading } from './commit'
 import { KINDS, otherField } from './kinds'
 import { PhasorSelect } from './PhasorSelect'

@@ -1,4 +1,4 @@
-import { absoluteLimit, parseCell, parseNumber, type Result, success } from '../../core'
+import { absoluteLimit, asLimit, parseCell, parseNumber, type Result, success } from '../../core'
 import {
   apply,
   type Edit,
@@ -61,7 +61,7 @@ export function commitReadingLimit(
 ): string | undefined {
   if (text === '') return changeReading(store, reading, { limit: null })
   const unit = unitOfReading(sheet, reading)
-  const parsed = parseCell(/^(±|\+\s*\/?\s*[-−])/.test(text) ? text : `± ${text}`, { unit })
+  const parsed = parseCell(asLimit(text), { unit })
   if (!parsed.ok) return parsed.problem
   if (parsed.value.form !== 'limit') return 'Type the limit as half a width, such as 0.5 or 1 %.'
   const shown = shownValue(sheet, reading)

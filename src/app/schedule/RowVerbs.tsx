@@ -1,6 +1,6 @@
-import { describeRemoval, type Id, newId, type Sheet } from '../../sheet'
+import { describeRemoval, type Id, labelOf, newId, type Sheet } from '../../sheet'
 import { Direction } from '../readings'
-import { labelOf, usePageStore } from '../store'
+import { usePageStore } from '../store'
 
 /** What can be done to the picked row as a whole. */
 export function RowVerbs({ sheet, id }: { readonly sheet: Sheet; readonly id: Id }) {

@@ -1,4 +1,4 @@
-import { parseCell, unitOf } from '../../core'
+import { asLimit, parseCell, unitOf } from '../../core'
 import { apply, type Edit, type Phasor } from '../../sheet'
 import type { Store } from '../store'
 
@@ -36,7 +36,7 @@ export function commitLimit(store: Store, phasor: Phasor, text: string): string 
   for (const piece of text.split(/;|,\s/)) {
     const bare = piece.trim()
     const part = /°|deg/.test(bare) ? 'angle' : 'magnitude'
-    const parsed = parseCell(/^(±|\+\/-)/.test(bare) ? bare : `± ${bare}`, {
+    const parsed = parseCell(asLimit(bare), {
       unit: unitOf(phasor.quantity),
       part,
     })

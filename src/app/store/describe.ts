@@ -1,5 +1,5 @@
 import { formatAngle, formatQuantity, unitOf } from '../../core'
-import type { Id, Quantity, Sheet, Sum } from '../../sheet'
+import { type Id, labelOf, type Quantity, type Sheet, type Sum } from '../../sheet'
 import { checkedSum } from './selectors'
 import type { Answer } from './state'
 
@@ -10,11 +10,6 @@ export function quantityOfSum(sheet: Sheet, sum: Sum): Quantity {
     if (phasor) return phasor.quantity
   }
   return 'other'
-}
-
-/** The label of a phasor, or its id where it has none. */
-export function labelOf(sheet: Sheet, id: Id): string {
-  return sheet.phasors.find((phasor) => phasor.id === id)?.label || id
 }
 
 /** How a sum is called: its own label, else what it equals, else that it is a sum. */

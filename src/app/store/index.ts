@@ -1,5 +1,5 @@
 export { StoreContext, usePage, usePageStore } from './context'
-export { describeAnswer, labelOf, nameOfSum, quantityOfSum } from './describe'
+export { describeAnswer, nameOfSum, quantityOfSum } from './describe'
 export { createIdentity, createName } from './identity'
 export {
   answerOf,

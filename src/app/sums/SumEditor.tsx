@@ -1,6 +1,6 @@
-import type { Edit, Sheet, Sum, Term } from '../../sheet'
+import { type Edit, labelOf, type Sheet, type Sum, type Term } from '../../sheet'
 import { PhasorSymbol } from '../shell/PhasorSymbol'
-import { labelOf, nameOfSum, quantityOfSum, usePageStore } from '../store'
+import { nameOfSum, quantityOfSum, usePageStore } from '../store'
 import { type TermHandle, useTermDrag } from './useTermDrag'
 
 type SumChange = Extract<Edit, { kind: 'set-sum' }>['change']

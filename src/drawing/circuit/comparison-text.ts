@@ -1,4 +1,4 @@
-import { formatAngle, formatLimit, formatQuantity, unitOf } from '../../core'
+import { formatAngle, formatLimit, formatQuantity, signed, unitOf } from '../../core'
 import type { ComparisonEvaluation, Evaluation, Id, Phasor, Sheet } from '../../sheet'
 import { type Digits, digitsOf, readingsByPhasor } from '../text/resolution'
 
@@ -72,10 +72,12 @@ function magnitudePart(
       formatQuantity(width, unit, { digits: 2, like }),
     ),
     measured: size(measured?.magnitude, { ...digits, like }),
-    difference: signed(difference?.magnitude, (value) =>
+    difference: signedOrNothing(difference?.magnitude, (value) =>
       size(value, allowed ? { limit: allowed } : digits),
     ),
-    percent: signed(difference?.percent, (value) => formatQuantity(value, '%', { digits: 2 })),
+    percent: signedOrNothing(difference?.percent, (value) =>
+      formatQuantity(value, '%', { digits: 2 }),
+    ),
     allowed: allowed === undefined ? '' : `± ${formatQuantity(allowed, unit, { digits: 2, like })}`,
   }
 }
@@ -97,7 +99,7 @@ function anglePart({
         formatLimit(width, '°').replace('± ', ''),
       ),
       measured: angle(measured?.angle),
-      difference: signed(difference?.angle, (value) => angle(value)),
+      difference: signedOrNothing(difference?.angle, (value) => angle(value)),
       percent: '',
       allowed: allowedAngle === undefined ? '' : formatLimit(allowedAngle, '°'),
     },
@@ -112,8 +114,6 @@ function withLimit(
   return text === '' || !limit ? text : `${text} ± ${print(limit)}`
 }
 
-function signed(value: number | undefined, print: (value: number) => string): string {
-  if (value === undefined) return ''
-  const text = print(value)
-  return value > 0 ? `+${text}` : text
+function signedOrNothing(value: number | undefined, print: (value: number) => string): string {
+  return value === undefined ? '' : signed(print(value))
 }

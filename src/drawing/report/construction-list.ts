@@ -1,12 +1,12 @@
 import { angleOf, formatAngle, formatNumber } from '../../core'
-import type { Evaluation, Id, Sheet } from '../../sheet'
+import { type Evaluation, type Id, labelOf, type Sheet } from '../../sheet'
 import type { PlacedArrow, Scene } from '../scene'
 import { formatMagnitude } from '../text/phasor-text'
 import { digitsOf, readingsByPhasor } from '../text/resolution'
 import { heading, note } from './blocks'
 import type { Cell } from './columns'
 import type { Block } from './flow'
-import { cell, labelOf, labelsOf, nameOfSum, phasorOf, symbolsCell } from './names'
+import { cell, labelsOf, nameOfSum, phasorOf, symbolsCell } from './names'
 import { table } from './table'
 
 /**

@@ -1,5 +1,5 @@
 import { type FormatOptions, formatAngle, formatQuantity } from '../../core'
-import type { Id, Phasor, Quantity, Reading, Sheet, Sum } from '../../sheet'
+import { type Id, labelOf, type Phasor, type Quantity, type Sheet, type Sum } from '../../sheet'
 import type { TextRun } from '../scene'
 import { labelRuns } from '../text/label-runs'
 import type { Cell } from './columns'
@@ -42,11 +42,6 @@ export function labelsOf(sheet: Sheet): ReadonlySet<string> {
   return new Set(sheet.phasors.map(({ label }) => label))
 }
 
-/** How a phasor is called. */
-export function labelOf(sheet: Sheet, id: Id): string {
-  return phasorOf(sheet, id)?.label ?? id
-}
-
 /** The phasor of an id. */
 export function phasorOf(sheet: Sheet, id: Id): Phasor | undefined {
   return sheet.phasors.find((phasor) => phasor.id === id)
@@ -79,24 +74,6 @@ export function quantityOfSum(sheet: Sheet, { terms, equals }: Sum): Quantity {
   return first?.quantity ?? other?.quantity ?? 'other'
 }
 
-/** The kinds of readings in words. */
-export const KINDS: { readonly [kind in Reading['kind']]: string } = {
-  magnitude: 'magnitude',
-  angle: 'angle',
-  shift: 'shift',
-  ellipse: 'ellipse',
-  power: 'power',
-  'reactive-power': 'reactive power',
-  'power-factor': 'power factor',
-}
-
-/** How a reading is called: its number and what it is of, as `3: Vcoil, magnitude`. */
-export function nameOfReading(sheet: Sheet, id: Id): string {
-  const at = (sheet.readings ?? []).findIndex((reading) => reading.id === id)
-  const reading = sheet.readings?.[at]
-  return reading ? `${at + 1}: ${labelOf(sheet, reading.of)}, ${KINDS[reading.kind]}` : id
-}
-
 /** A limit below this share of a size is rounding: the value is exact. */
 const ROUNDING = 1e-9
 
@@ -115,12 +92,6 @@ export function limitedText(value: number, limit: number | undefined, unit: stri
   const up = Math.ceil(limit / resolution - 1e-9) * resolution
   const off = print(up, { resolution, like: Math.max(Math.abs(value), up) })
   return `${print(value, { resolution })} ± ${off}`
-}
-
-/** A figure with its sign, plus or true minus; one that is nothing has none. */
-export function signed(text: string): string {
-  if (/^[−0]/.test(text) && !/[1-9]/.test(text)) return text.replace('−', '')
-  return text.startsWith('−') ? text : `+${text}`
 }
 
 /** So many of something, in words: `1 reading`, `2 readings`. */

@@ -1,4 +1,4 @@
-import { labelOf } from '../edits/labels'
+import { labelOf } from '../names'
 import type { Id, Sheet } from '../types'
 import { nameOfElement } from './names'
 import { formOf, isGroup } from './tree'

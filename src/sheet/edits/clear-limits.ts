@@ -1,9 +1,9 @@
 import { success, type Typed } from '../../core'
 import { readingsOf } from '../as-read'
+import { labelOf } from '../names'
 import type { Phasor, PhasorId, Reading, Sheet } from '../types'
 import { withChange, without } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf, withReplaced } from './lists'
 
 /** Takes back every limit that was stated for a phasor, typed or read: what is assumed serves again. */

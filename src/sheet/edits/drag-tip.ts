@@ -2,9 +2,9 @@ import { differenceDegrees, failure, fromPolar, success, unitOf, wrapDegrees } f
 import { asReadOf } from '../as-read'
 import { type FigureUnit, parseDigits } from '../digits'
 import { type Held, heldBy } from '../held'
+import { labelOf } from '../names'
 import type { Phasor, PhasorId, Sheet, Typed } from '../types'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf, withReplaced } from './lists'
 import { withTypedPolar, withTypedRectangular } from './typed-parts'
 

@@ -1,11 +1,11 @@
 import { failure, type Result, success } from '../../core'
 import { idsOf } from '../checks/ids'
 import { MAXIMUM_ENTRIES } from '../limits'
+import { labelOf, nameOfSum } from '../names'
 import { isId } from '../schema/text'
 import type { HandArrow, Id, Place, Sheet } from '../types'
 import { withChange } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf, nameOfSum } from './labels'
 import { orNone } from './lists'
 
 /**

@@ -1,9 +1,9 @@
 import { success } from '../../core'
 import { idsOf } from '../checks/ids'
+import { labelOf, nameOfSum } from '../names'
 import { newIdBeside } from '../new-id'
 import type { Id, Phasor, PhasorId, Reading, Sheet } from '../types'
 import type { EditKind } from './edit-kind'
-import { labelOf, nameOfSum } from './labels'
 import { entryOf, withAdded, withMoved, withReplaced } from './lists'
 
 /** Adds a phasor, at an index (omitted: the last), and as the last term of a sum where one is named. */

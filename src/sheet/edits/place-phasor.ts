@@ -1,8 +1,8 @@
 import { failure, type Result, success } from '../../core'
+import { labelOf } from '../names'
 import type { PhasorId, Sheet, Tail } from '../types'
 import { without } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf, withReplaced } from './lists'
 
 /** Places a loose phasor: its tail at a place or on another phasor's tip; null: where there is room. */

@@ -2,6 +2,7 @@ import { failure, type Result, success, type Typed, unitOf, wrapDegrees } from '
 import { type AngleLikeReading, asReadOf, type ReadingsOfPhasor } from '../as-read'
 import { type FigureUnit, parseShown } from '../digits'
 import { unitOfMagnitude } from '../figures'
+import { labelOf } from '../names'
 import { channelTurn, signOfReading } from '../readings/angle'
 import { magnitudeFactor } from '../readings/magnitude'
 import type {
@@ -15,7 +16,6 @@ import type {
   Sheet,
   Shown,
 } from '../types'
-import { labelOf } from './labels'
 import { withReplaced } from './lists'
 
 /** A part of a phasor that a meter can show. */

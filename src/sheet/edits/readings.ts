@@ -1,8 +1,8 @@
 import { success } from '../../core'
+import { labelOf } from '../names'
 import type { Id, Reading, Sheet } from '../types'
 import { type Change, withChange } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf, orNone, withAdded, withReplaced } from './lists'
 
 /** Adds a reading after the others. */

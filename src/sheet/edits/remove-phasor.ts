@@ -1,9 +1,9 @@
 import { success } from '../../core'
+import { labelOf, nameOfSum } from '../names'
 import type { Phasor, PhasorId, Reading, Sheet, Sum, ThreePhase } from '../types'
 import { withChange, without } from './change'
 import { prunedCircuit } from './circuit'
 import type { EditKind } from './edit-kind'
-import { labelOf, nameOfSum } from './labels'
 import { entryOf, orNone } from './lists'
 import { withoutSums } from './sums'
 

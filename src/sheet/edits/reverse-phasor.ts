@@ -9,13 +9,13 @@ import {
   wrapDegrees,
 } from '../../core'
 import { parseDigits } from '../digits'
+import { labelOf } from '../names'
 import { turnsWith, withLeadsExchanged } from '../readings/reverse'
 import { referenceOf } from '../reference'
 import { indexOf } from '../sheet-index'
 import type { HandArrow, Phasor, PhasorId, Sheet, Sum } from '../types'
 import { withChange } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf } from './lists'
 
 /** Counts a phasor the other way round: from its head to its tail, negated wherever it stands. */

@@ -1,10 +1,10 @@
 import { type Quantity, success, type Typed, unitOf } from '../../core'
 import { parseDigits, parseShown } from '../digits'
 import { unitOfMagnitude } from '../figures'
+import { labelOf } from '../names'
 import type { MagnitudeReading, Phasor, PhasorId, Reading, Sheet, Shown } from '../types'
 import { type Change, withChange, without } from './change'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { entryOf, withList, withReplaced } from './lists'
 
 /** Changes what a phasor is, but for its value; null takes a field away. */

@@ -8,9 +8,9 @@ import {
   type Typed,
 } from '../../core'
 import { asReadOf } from '../as-read'
+import { labelOf } from '../names'
 import type { Phasor, PhasorId, Sheet } from '../types'
 import type { EditKind } from './edit-kind'
-import { labelOf } from './labels'
 import { withLimit } from './limits'
 import { entryOf } from './lists'
 import { isRead, withPart, withPolar, withRectangular } from './parts'

@@ -1,8 +1,8 @@
 import { success } from '../../core'
+import { nameOfSum } from '../names'
 import type { Id, Sheet, Sum } from '../types'
 import { type Change, withChange } from './change'
 import type { EditKind } from './edit-kind'
-import { nameOfSum } from './labels'
 import { entryOf, orNone, withAdded, withMoved, withReplaced } from './lists'
 
 /** Adds a sum after the others. */

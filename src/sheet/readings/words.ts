@@ -8,8 +8,8 @@ import {
   unitOf,
 } from '../../core'
 import { asReadOf } from '../as-read'
-import { labelOf } from '../edits/labels'
 import { unitOfMagnitude } from '../figures'
+import { labelOf } from '../names'
 import { indexOf } from '../sheet-index'
 import type { MagnitudeReading, PhasorId, Reading, Sheet } from '../types'
 import { indicationOf } from './indication'

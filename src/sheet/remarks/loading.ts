@@ -8,7 +8,7 @@ import {
   ZERO,
 } from '../../core'
 import { asReadOf } from '../as-read'
-import { labelOf } from '../edits/labels'
+import { labelOf } from '../names'
 import { limitOf } from '../readings/limit'
 import { indexOf } from '../sheet-index'
 import type { CircuitElement, CircuitNode, Id, Reading, Sheet } from '../types'

@@ -1,7 +1,7 @@
 import { formatNumber, formatQuantity } from '../../core'
 import { asReadOf } from '../as-read'
 import { parseShown } from '../digits'
-import { labelOf } from '../edits/labels'
+import { labelOf } from '../names'
 import { indicationOf } from '../readings/indication'
 import { limitOf } from '../readings/limit'
 import { isMagnitudeOf } from '../readings/magnitude'

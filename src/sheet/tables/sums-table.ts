@@ -1,6 +1,6 @@
 import { unitOf } from '../../core'
-import { labelOf } from '../edits/labels'
 import type { Evaluation, SumEvaluation } from '../evaluation'
+import { labelOf } from '../names'
 import { indexOf } from '../sheet-index'
 import type { Sheet, Sum } from '../types'
 import { type Cell, type Table, worked } from './table'

@@ -1,11 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import {
-  describeAlternative,
-  nameOfReading,
-  readingLines,
-  uncheckedNames,
-} from '../../../src/app/answer/text'
-import type { Sheet } from '../../../src/sheet'
+import { describeAlternative, readingLines, uncheckedNames } from '../../../src/app/answer/text'
+import { nameOfReading, type Sheet } from '../../../src/sheet'
 import { evaluate } from '../../../src/sheet/estimate'
 import { phasor, reads, sheetWith } from '../../sheet/estimate/sheets'
 

@@ -1,6 +1,6 @@
-import { remarksOn } from '../../../sheet'
+import { labelOf, nameOfReading, remarksOn } from '../../../sheet'
 import { heading } from '../blocks'
-import { cell, labelOf, nameOfReading } from '../names'
+import { cell } from '../names'
 import type { Report, Section } from '../section'
 import { table } from '../table'
 

@@ -1,7 +1,7 @@
-import { type Reading, readingText, type Sheet } from '../../../sheet'
+import { nameOfReading, type Reading, readingText, type Sheet } from '../../../sheet'
 import { heading } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, nameOfReading } from '../names'
+import { cell } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 

@@ -6,12 +6,13 @@ import {
   formatElementLimit,
   formatElementValue,
   foundBesideMark,
+  labelOf,
   type Sheet,
   type Typed,
 } from '../../../sheet'
 import { heading, paragraph } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, labelOf, labelsOf, limitedText, symbolsCell } from '../names'
+import { cell, labelsOf, limitedText, symbolsCell } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 

@@ -2,6 +2,7 @@ import { formatNumber, formatQuantity, unitOf } from '../../../core'
 import {
   type Evaluation,
   formulasOf,
+  labelOf,
   type Move,
   movesOf,
   type Reading,
@@ -11,7 +12,7 @@ import {
 } from '../../../sheet'
 import { heading, note } from '../blocks'
 import type { Column } from '../columns'
-import { cell, labelCell, labelOf, phasorOf } from '../names'
+import { cell, labelCell, phasorOf } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 

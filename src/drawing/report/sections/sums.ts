@@ -4,9 +4,16 @@ import {
   formatNumber,
   formatPolar,
   formatQuantity,
+  signed,
   unitOf,
 } from '../../../core'
-import type { Sheet, Sum, SumEvaluation, UnitsPerCentimetre } from '../../../sheet'
+import {
+  labelOf,
+  type Sheet,
+  type Sum,
+  type SumEvaluation,
+  type UnitsPerCentimetre,
+} from '../../../sheet'
 import { digitsOfResult, formatPaperLength } from '../../text/phasor-text'
 import { type Digits, digitsOf, readingsByPhasor } from '../../text/resolution'
 import { heading } from '../blocks'
@@ -14,12 +21,10 @@ import type { Cell } from '../columns'
 import {
   cell,
   equationOf,
-  labelOf,
   labelsOf,
   NOTHING,
   nameOfSum,
   quantityOfSum,
-  signed,
   symbolsCell,
 } from '../names'
 import type { Section } from '../section'
