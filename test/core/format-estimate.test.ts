@@ -16,3 +16,12 @@ test('an exact value stands alone, and one that is no number is a dash', () => {
 test('a limit that is larger than the value sets the unit', () => {
   expect(formatEstimate(0.002, 0.5, 'V')).toBe('0.00 V ± 0.50 V')
 })
+
+test('a limit never looks tighter than it is, and an angle has its degrees', () => {
+  expect(formatEstimate(94.04, 4.74, 'V')).toBe('94.0 V ± 4.8 V')
+  expect(formatEstimate(-34.68, 1.03, '°')).toBe('−34.7° ± 1.1°')
+})
+
+test('a size may set the prefix of both', () => {
+  expect(formatEstimate(0.1336, 0.0018, 'H', 0.1336)).toBe('133.6 mH ± 1.8 mH')
+})

@@ -203,10 +203,10 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
   const values = [
     ...(magnitude === undefined || magnitudeLimit === undefined
       ? []
-      : [withLimit(magnitude, magnitudeLimit, unit, ROUNDING * magnitude)]),
+      : [formatEstimate(magnitude, magnitudeLimit, unit)]),
     ...(angle === undefined || angleLimit === undefined
       ? []
-      : [withLimit(angle, angleLimit, '°', ROUNDING * 180)]),
+      : [formatEstimate(angle, angleLimit, '°')]),
   ]
   const states =
     magnitudeState === angleState
@@ -216,14 +216,4 @@ export function bestText(phasor: Phasor, best: PhasorEvaluation | undefined): Be
           { of: 'angle', state: angleState },
         ]
   return { values, states }
-}
-
-/** A limit below this share of a size is rounding: the value is exact. */
-const ROUNDING = 1e-9
-
-function withLimit(value: number, found: number, unit: string, rounding: number): string {
-  const limit = found <= rounding ? 0 : found
-  if (unit !== '°') return formatEstimate(value, limit, unit)
-  const text = formatAngle(value, { limit })
-  return limit === 0 ? text : `${text} ${formatLimit(limit, unit)}`
 }

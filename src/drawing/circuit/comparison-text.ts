@@ -1,4 +1,11 @@
-import { formatAngle, formatLimit, formatQuantity, signed, unitOf } from '../../core'
+import {
+  formatAngle,
+  formatEstimate,
+  formatLimit,
+  formatQuantity,
+  signed,
+  unitOf,
+} from '../../core'
 import type { ComparisonEvaluation, Evaluation, Id, Phasor, Sheet } from '../../sheet'
 import { type Digits, digitsOf, readingsByPhasor } from '../text/resolution'
 
@@ -65,12 +72,12 @@ function magnitudePart(
   const like = predicted.magnitude ?? 0
   const size = (value: number | undefined, options: Digits) =>
     value === undefined ? '' : formatQuantity(value, unit, { like, ...options })
-  const limit = predicted.magnitudeLimit
   return {
     part: 'magnitude',
-    predicted: withLimit(size(predicted.magnitude, limit ? { limit } : {}), limit, (width) =>
-      formatQuantity(width, unit, { digits: 2, like }),
-    ),
+    predicted:
+      predicted.magnitude === undefined
+        ? ''
+        : formatEstimate(predicted.magnitude, predicted.magnitudeLimit, unit, like),
     measured: size(measured?.magnitude, { ...digits, like }),
     difference: signedOrNothing(difference?.magnitude, (value) =>
       size(value, allowed ? { limit: allowed } : digits),
@@ -89,29 +96,18 @@ function anglePart({
   allowedAngle,
 }: ComparisonEvaluation): readonly ComparedPart[] {
   if (predicted.angle === undefined) return []
-  const limit = predicted.angleLimit
   const angle = (value: number | undefined, options: Digits = {}) =>
     value === undefined ? '' : formatAngle(value, options)
   return [
     {
       part: 'angle',
-      predicted: withLimit(angle(predicted.angle, limit ? { limit } : {}), limit, (width) =>
-        formatLimit(width, '°').replace('± ', ''),
-      ),
+      predicted: formatEstimate(predicted.angle, predicted.angleLimit, '°'),
       measured: angle(measured?.angle),
       difference: signedOrNothing(difference?.angle, (value) => angle(value)),
       percent: '',
       allowed: allowedAngle === undefined ? '' : formatLimit(allowedAngle, '°'),
     },
   ]
-}
-
-function withLimit(
-  text: string,
-  limit: number | undefined,
-  print: (limit: number) => string,
-): string {
-  return text === '' || !limit ? text : `${text} ± ${print(limit)}`
 }
 
 function signedOrNothing(value: number | undefined, print: (value: number) => string): string {

@@ -1,4 +1,4 @@
-import { formatAngle, formatQuantity, toPolar } from '../../core'
+import { formatEstimate, toPolar } from '../../core'
 import { type Evaluation, type Id, type Limited, nameOfElement, type Sheet } from '../../sheet'
 import { triangleSubjects } from './triangle-subjects'
 
@@ -38,18 +38,6 @@ export function impedanceRows(sheet: Sheet, evaluation: Evaluation): readonly Im
 function textsOf(value: Limited | undefined): readonly string[] {
   if (value?.magnitude === undefined) return []
   const { magnitude, angle, magnitudeLimit, angleLimit } = value
-  const size = withLimit(magnitude, magnitudeLimit, (figure, options) =>
-    formatQuantity(figure, 'Ω', { like: magnitude, ...options }),
-  )
-  if (angle === undefined) return [size]
-  return [size, withLimit(angle, angleLimit, formatAngle)]
-}
-
-function withLimit(
-  value: number,
-  limit: number | undefined,
-  print: (value: number, options: { limit?: number; digits?: number }) => string,
-): string {
-  if (!limit) return print(value, {})
-  return `${print(value, { limit })} ± ${print(limit, { limit })}`
+  const size = formatEstimate(magnitude, magnitudeLimit, 'Ω')
+  return angle === undefined ? [size] : [size, formatEstimate(angle, angleLimit, '°')]
 }

@@ -1,4 +1,3 @@
-import { type FormatOptions, formatAngle, formatQuantity } from '../../core'
 import { type Id, labelOf, type Phasor, type Quantity, type Sheet, type Sum } from '../../sheet'
 import type { TextRun } from '../scene'
 import { labelRuns } from '../text/label-runs'
@@ -72,26 +71,6 @@ export function quantityOfSum(sheet: Sheet, { terms, equals }: Sum): Quantity {
   const first = terms[0] && phasorOf(sheet, terms[0].phasor)
   const other = typeof equals === 'string' ? phasorOf(sheet, equals) : undefined
   return first?.quantity ?? other?.quantity ?? 'other'
-}
-
-/** A limit below this share of a size is rounding: the value is exact. */
-const ROUNDING = 1e-9
-
-/**
- * A value with its limit, both to the second digit of the limit and in one unit: `48.21 V ± 0.35 V`,
- * `133.6 mH ± 1.8 mH`. The limit is rounded up.
- */
-export function limitedText(value: number, limit: number | undefined, unit: string): string {
-  const isAngle = unit === '°'
-  const print = (size: number, digits: FormatOptions) =>
-    isAngle ? formatAngle(size, digits) : formatQuantity(size, unit, digits)
-  if (limit === undefined) return print(value, {})
-  if (limit <= ROUNDING * (isAngle ? 180 : Math.abs(value))) return print(value, { limit: 0 })
-  const resolution = 10 ** (Math.floor(Math.log10(limit)) - 1)
-  // What lies within a rounding error above is no reason for a wider limit.
-  const up = Math.ceil(limit / resolution - 1e-9) * resolution
-  const off = print(up, { resolution, like: Math.max(Math.abs(value), up) })
-  return `${print(value, { resolution })} ± ${off}`
 }
 
 /** So many of something, in words: `1 reading`, `2 readings`. */

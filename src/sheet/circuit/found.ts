@@ -1,4 +1,4 @@
-import { formatLimit, formatNumber, formatQuantity } from '../../core'
+import { formatEstimate, formatLimit, formatNumber, formatQuantity } from '../../core'
 import { assumedOf } from '../assumed'
 import type { ElementEvaluation, Estimate } from '../evaluation'
 import type { CircuitElement, Sheet, Typed } from '../types'
@@ -58,7 +58,7 @@ function besideMark(
   const marked = markedValue(element, value)
   const name = nameOfFound(element, value)
   const subject = [element.label ?? element.id, name].filter((part) => part !== '').join(', ')
-  const start = `${subject}: ${figureOf(found, unit)} found`
+  const start = `${subject}: ${formatEstimate(found.value, found.expanded, unit, found.value)} found`
   const base = { value, name: name || nameOfElementValue(value), unit, found }
   if (marked === undefined)
     return { ...base, text: `${start}${addition(sheet, element, value, found)}.` }
@@ -98,13 +98,6 @@ function nameOfFound({ kind }: CircuitElement, value: MarkedValue): string {
   if (kind === 'coil') return 'inductance'
   if (kind === 'capacitor' && value === 'resistance') return 'series resistance'
   return kind === 'impedance' ? value : ''
-}
-
-function figureOf({ value, expanded }: Estimate, unit: string): string {
-  const figure = formatQuantity(value, unit, expanded > 0 ? { limit: expanded } : {})
-  if (!(expanded > 0)) return figure
-  const width = formatQuantity(expanded, unit, { digits: 2, like: value })
-  return `${figure} ± ${width}`
 }
 
 /** A mark with its tolerance, in per cent where that is how it comes out even: `16 µF ± 5 %`. */

@@ -41,7 +41,7 @@ describe('the comparison in words', () => {
         parts: [
           {
             part: 'magnitude',
-            predicted: '94.0 V ± 4.7 V',
+            predicted: '94.0 V ± 4.8 V',
             measured: '96.1 V',
             difference: '+2.1 V',
             percent: '+2.2 %',
@@ -104,7 +104,7 @@ describe('impedances in words', () => {
       {
         of: 'L1',
         name: 'Main winding',
-        predicted: ['47.8 Ω ± 2.2 Ω', '80.13° ± 0.79°'],
+        predicted: ['47.8 Ω ± 2.3 Ω', '80.13° ± 0.79°'],
         found: ['47.75 Ω', '80.3°'],
       },
       { of: 'total', name: 'Total', predicted: ['203.5 Ω', '−74.3°'], found: [] },

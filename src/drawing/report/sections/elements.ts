@@ -1,4 +1,4 @@
-import { unitOf } from '../../../core'
+import { formatEstimate, unitOf } from '../../../core'
 import {
   type CircuitElement,
   type ElementEvaluation,
@@ -12,7 +12,7 @@ import {
 } from '../../../sheet'
 import { heading, paragraph } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, labelsOf, limitedText, symbolsCell } from '../names'
+import { cell, labelsOf, symbolsCell } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 
@@ -81,7 +81,7 @@ function rowOf(
         const value = found?.found?.[name]
         return value === undefined
           ? []
-          : [`${symbol} = ${limitedText(value.value, value.expanded, unit)}`]
+          : [`${symbol} = ${formatEstimate(value.value, value.expanded, unit, value.value)}`]
       }).join('; '),
     ),
   ]

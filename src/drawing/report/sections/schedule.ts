@@ -1,9 +1,9 @@
-import { formatAngle, formatQuantity, unitOf } from '../../../core'
+import { formatAngle, formatEstimate, formatQuantity, unitOf } from '../../../core'
 import type { Phasor, PhasorEvaluation } from '../../../sheet'
 import { digitsOf, type ReadingsByPhasor, readingsByPhasor } from '../../text/resolution'
 import { heading, note } from '../blocks'
 import type { Cell } from '../columns'
-import { cell, labelCell, limitedText, NOTHING } from '../names'
+import { cell, labelCell, NOTHING } from '../names'
 import type { Section } from '../section'
 import { table } from '../table'
 
@@ -67,7 +67,7 @@ function bestOf(
   limit: number | undefined,
   unit: string,
 ): string | undefined {
-  return value === undefined || limit === undefined ? undefined : limitedText(value, limit, unit)
+  return value === undefined || limit === undefined ? undefined : formatEstimate(value, limit, unit)
 }
 
 function stateOf({ magnitudeState, angleState }: PhasorEvaluation): string {
